@@ -1,0 +1,25 @@
+package coilwright.problem;
+
+import coilwright.material.WireSize;
+import coilwright.spring.EndType;
+import coilwright.spring.Hand;
+
+/**
+ * The one spring that a check judges.
+ *
+ * @param material id of its grade, catalogue's or own
+ * @param wireSize its wire
+ * @param meanDiameter D [mm]
+ * @param activeCoils n [-]
+ * @param freeLength L0 [mm]
+ * @param ends how its ends are formed
+ * @param hand direction of winding
+ */
+public record Design(
+    String material,
+    WireSize wireSize,
+    double meanDiameter,
+    double activeCoils,
+    double freeLength,
+    EndType ends,
+    Hand hand) {}

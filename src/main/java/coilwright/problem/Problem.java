@@ -1,0 +1,43 @@
+package coilwright.problem;
+
+import coilwright.material.WireGrade;
+import coilwright.spring.Seating;
+import java.util.List;
+import java.util.Optional;
+
+/**
+ * A problem file, read and found valid, defaults filled in.
+ *
+ * @param title free text; empty where the file gives none
+ * @param units how text is shown
+ * @param facts what the file says about the load line
+ * @param required the load line and loads of one spring; empty only in a file for checking that
+ *     does not fix the line
+ * @param envelope the space
+ * @param seats how the ends are held; empty where the usual seating of each end type applies
+ * @param make what may be made; the defaults where the file has a {@code design} block
+ * @param design the spring to check; empty in a file for a shortlist
+ * @param limits the limits
+ * @param ownMaterials grades the file defines
+ * @param rankBy the order
+ * @param top how many lines of the ranked list are shown
+ */
+public record Problem(
+    String title,
+    UnitSystem units,
+    LoadFacts facts,
+    Optional<Requirement> required,
+    Envelope envelope,
+    Optional<Seating> seats,
+    Make make,
+    Optional<Design> design,
+    DesignLimits limits,
+    List<WireGrade> ownMaterials,
+    RankBy rankBy,
+    int top) {
+
+  /** Copies the list. */
+  public Problem {
+    ownMaterials = List.copyOf(ownMaterials);
+  }
+}
