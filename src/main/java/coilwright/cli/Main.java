@@ -1,6 +1,9 @@
 package coilwright.cli;
 
-/** The program. */
+import java.io.FileDescriptor;
+import java.io.FileOutputStream;
+
+/** The program's entry: runs the command line and exits with its status. */
 public final class Main {
 
   private Main() {}
@@ -11,6 +14,11 @@ public final class Main {
    * @param args command line
    */
   public static void main(String[] args) {
-    System.exit(0);
+    Terminal terminal =
+        new Terminal(
+            System.in,
+            new FileOutputStream(FileDescriptor.out),
+            new FileOutputStream(FileDescriptor.err));
+    System.exit(Program.run(terminal, args));
   }
 }

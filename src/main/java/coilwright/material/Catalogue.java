@@ -1,20 +1,49 @@
 package coilwright.material;
 
+import java.io.IOException;
+import java.io.InputStream;
+import java.io.UncheckedIOException;
+import java.nio.charset.StandardCharsets;
+import java.util.EnumMap;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
+import java.util.function.UnaryOperator;
 
-/** The wire grades and sizes that the program knows, read from the cited tables it ships. */
+/**
+ * The wire grades and sizes that the program knows, read from the cited tables it ships. A table is
+ * read when it is first needed and then kept; not for use by several threads at once.
+ */
 public final class Catalogue {
 
-  private Catalogue() {}
+  private final UnaryOperator<String> textOf;
+  private final Map<String, Table> tables = new HashMap<>();
+  private final Map<String, WireGrade> grades = new HashMap<>();
+  private final Map<WireSeries, List<WireSize>> sizes = new EnumMap<>(WireSeries.class);
+  private final GradeReader reader = new GradeReader(this::table);
+
+  /**
+   * A catalogue over any store of files.
+   *
+   * @param textOf the contents of the file with a name
+   */
+  Catalogue(UnaryOperator<String> textOf) {
+    this.textOf = textOf;
+  }
 
   /** The catalogue; tables are read when first asked for. */
   public static Catalogue load() {
-    return new Catalogue();
+    return new Catalogue(Catalogue::shipped);
   }
 
-  /** Ids of all grades, in the catalogue's order. */
+  /**
+   * Ids of all grades, in the catalogue's order.
+   *
+   * @return the ids
+   * @throws IllegalStateException naming file, line and column if the file of grades is bad
+   */
   public List<String> gradeIds() {
-    throw new IllegalStateException("being written");
+    return table("grades").rows().stream().map(row -> row.text("id")).toList();
   }
 
   /**
@@ -23,9 +52,14 @@ public final class Catalogue {
    * @param id one of {@link #gradeIds()}
    * @return the grade
    * @throws IllegalArgumentException if there is none
+   * @throws IllegalStateException naming file, line and column if a file of the grade is bad
    */
   public WireGrade grade(String id) {
-    throw new IllegalStateException("being written");
+    if (!gradeIds().contains(id)) {
+      throw new IllegalArgumentException(
+          "no wire grade \"" + id + "\"; there are " + String.join(", ", gradeIds()));
+    }
+    return grades.computeIfAbsent(id, this::read);
   }
 
   /**
@@ -33,8 +67,45 @@ public final class Catalogue {
    *
    * @param series the series
    * @return its sizes
+   * @throws IllegalStateException naming file, line and column if the file of the series is bad
    */
   public List<WireSize> sizes(WireSeries series) {
-    throw new IllegalStateException("being written");
+    return sizes.computeIfAbsent(series, key -> SizeReader.read(key, table("sizes-" + key.id())));
+  }
+
+  /**
+   * A table as the file holds it.
+   *
+   * @param name the file's name without ".csv"
+   * @return the table
+   */
+  Table table(String name) {
+    return tables.computeIfAbsent(name, key -> Table.of(key + ".csv", textOf.apply(key + ".csv")));
+  }
+
+  private WireGrade read(String id) {
+    List<TableRow> rows = table("grades").rowsOf("id", id);
+    if (rows.size() > 1) {
+      throw rows.get(1).fault("id", "found \"" + id + "\" a second time");
+    }
+    return reader.read(rows.get(0));
+  }
+
+  /**
+   * The contents of a file that ships with the program.
+   *
+   * @param file its name
+   * @return its text
+   * @throws IllegalStateException if it does not ship
+   */
+  static String shipped(String file) {
+    try (InputStream in = Catalogue.class.getResourceAsStream(file)) {
+      if (in == null) {
+        throw new IllegalStateException("catalogue file " + file + " is missing");
+      }
+      return new String(in.readAllBytes(), StandardCharsets.UTF_8);
+    } catch (IOException e) {
+      throw new UncheckedIOException("catalogue file " + file + " cannot be read", e);
+    }
   }
 }

@@ -43,6 +43,10 @@ public enum Source {
   SANDGREN_1990(
       "Sandgren 1990",
       "Sandgren, Nonlinear integer and discrete programming in mechanical design optimization, J. Mech. Des. 112, 1990"),
+  /** What wire mills, distributors and gauge makers print about their wire. */
+  TRADE_TABLES(
+      "trade tables",
+      "Tables of gauges and properties printed by wire mills and wire distributors"),
   /** Geometry or mechanics that follows from first principles. */
   FIRST_PRINCIPLES("first principles", "Geometry and statics; no publication needed"),
   /** What the trade does without a citable page. */

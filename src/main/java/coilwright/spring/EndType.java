@@ -52,6 +52,36 @@ public enum EndType {
   }
 
   /**
+   * Length with all coils touching: nt d where the ends are ground, (nt + 1) d where they are not.
+   *
+   * @param activeCoils n [-]
+   * @param wireDiameter d [mm]
+   * @return Ls [mm]
+   */
+  public double solidLength(double activeCoils, double wireDiameter) {
+    return (activeCoils + deadCoils + (ground ? 0 : 1)) * wireDiameter;
+  }
+
+  /**
+   * Pitch of the free spring: what the solid ends leave of the free length, shared by the coils
+   * between them.
+   *
+   * <p>Plain (L0 - d)/n, plain and ground L0/(n + 1), squared (L0 - 3d)/n, squared and ground (L0 -
+   * 2d)/n.
+   *
+   * @param freeLength L0 [mm]
+   * @param wireDiameter d [mm]
+   * @param activeCoils n [-]
+   * @return p [mm]
+   */
+  public double pitch(double freeLength, double wireDiameter, double activeCoils) {
+    if (this == PLAIN_GROUND) {
+      return freeLength / (activeCoils + 1);
+    }
+    return (freeLength - (deadCoils + (ground ? 0 : 1)) * wireDiameter) / activeCoils;
+  }
+
+  /**
    * The end type with an id.
    *
    * @param id as in problem files

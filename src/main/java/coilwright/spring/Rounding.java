@@ -1,6 +1,7 @@
 package coilwright.spring;
 
 import coilwright.unit.Require;
+import java.math.BigDecimal;
 
 /**
  * The steps to which a shop's drawing rounds a spring. A small spring, with a mean diameter below 5
@@ -49,13 +50,18 @@ public record Rounding(
   }
 
   /**
-   * The nearest multiple of a step.
+   * The nearest multiple of a step, reckoned in decimal so that 122 steps of 0.1 mm are 12.2 mm and
+   * not a neighbour of it.
    *
    * @param value the value [mm]
    * @param step the step [mm]; 0 leaves the value as it is
    * @return the rounded value [mm]
    */
   public static double toStep(double value, double step) {
-    return step == 0 ? value : Math.rint(value / step) * step;
+    if (step == 0) {
+      return value;
+    }
+    BigDecimal steps = BigDecimal.valueOf(Math.rint(value / step));
+    return BigDecimal.valueOf(step).multiply(steps).doubleValue();
   }
 }

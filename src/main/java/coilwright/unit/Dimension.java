@@ -62,8 +62,17 @@ public enum Dimension {
       new Unit(
           "lb/in^3",
           Exact.KG_PER_LB / (Exact.MM_PER_INCH * Exact.MM_PER_INCH * Exact.MM_PER_INCH) * 1e9)),
+  /** A mass; inside, kg. */
+  MASS(
+      "a mass",
+      new Unit("kg", 1),
+      new Unit("g", 1e-3),
+      new Unit("lb", Exact.KG_PER_LB),
+      new Unit("oz", Exact.KG_PER_LB / 16)),
   /** A share of something; inside, a plain number (0.45 for 45 %). */
-  SHARE("a share", new Unit("%", 0.01));
+  SHARE("a share", new Unit("%", 0.01)),
+  /** A plain number, such as a count of coils or a spring index. */
+  NUMBER("a plain number", new Unit("", 1));
 
   private final String phrase;
   private final List<Unit> units;

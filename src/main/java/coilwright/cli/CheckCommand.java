@@ -1,0 +1,54 @@
+package coilwright.cli;
+
+import coilwright.material.Catalogue;
+import coilwright.problem.Problem;
+import coilwright.problem.Purpose;
+import coilwright.report.Checked;
+import coilwright.report.CheckedJson;
+import coilwright.report.CheckedText;
+import coilwright.search.CompressionCheck;
+import java.io.IOException;
+import java.util.concurrent.Callable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Parameters;
+
+/** Judges the one spring that a problem file describes. */
+@Command(
+    name = "check",
+    description =
+        "Judges the spring in the file's design block against its loads, space and limits.",
+    mixinStandardHelpOptions = true,
+    versionProvider = Version.class,
+    footer = {
+      "",
+      "Exit status: 0 the spring holds, 2 wrong usage or file, 3 the spring fails a limit.",
+      "",
+      "Example:",
+      "  coilwright check problems/check-valve-offer.yaml --format json"
+    })
+final class CheckCommand implements Callable<Integer> {
+
+  @Parameters(paramLabel = "FILE", description = "Problem file; - for standard input.")
+  private String file;
+
+  @Mixin private FormatOptions format;
+  @Mixin private ResultOptions result;
+
+  private final Terminal terminal;
+
+  CheckCommand(Terminal terminal) {
+    this.terminal = terminal;
+  }
+
+  @Override
+  public Integer call() throws IOException {
+    ProblemFile input = new ProblemFile(file, terminal);
+    result.refuseBadTarget(input);
+    Catalogue catalogue = Catalogue.load();
+    Problem problem = input.read(Purpose.CHECK, catalogue);
+    Checked checked = new Checked(problem, CompressionCheck.of(problem, catalogue));
+    result.deliver(format.isJson() ? CheckedJson.of(checked) : CheckedText.of(checked), terminal);
+    return checked.check().holds() ? Status.FOUND : Status.NOTHING;
+  }
+}

@@ -1,0 +1,58 @@
+package coilwright.cli;
+
+import coilwright.material.Catalogue;
+import coilwright.report.Grades;
+import java.io.IOException;
+import java.util.List;
+import java.util.concurrent.Callable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Parameters;
+
+/** Prints the wire grades with their properties and sources. */
+@Command(
+    name = "materials",
+    description = "Prints the wire grades: standard, condition, strength, moduli, sources.",
+    mixinStandardHelpOptions = true,
+    versionProvider = Version.class,
+    footer = {"", "Example:", "  coilwright materials music-wire"})
+final class MaterialsCommand implements Callable<Integer> {
+
+  @Parameters(
+      paramLabel = "ID",
+      arity = "0..*",
+      description = "Grades to print; all where none is named.")
+  private List<String> wanted;
+
+  @Mixin private FormatOptions format;
+  @Mixin private ResultOptions result;
+
+  private final Terminal terminal;
+
+  MaterialsCommand(Terminal terminal) {
+    this.terminal = terminal;
+  }
+
+  @Override
+  public Integer call() throws IOException {
+    result.refuseBadTarget();
+    Catalogue catalogue = Catalogue.load();
+    List<String> ids = wanted == null ? catalogue.gradeIds() : known(catalogue);
+    result.deliver(
+        format.isJson() ? Grades.json(catalogue, ids) : Grades.text(catalogue, ids), terminal);
+    return Status.FOUND;
+  }
+
+  private List<String> known(Catalogue catalogue) {
+    for (String id : wanted) {
+      if (!catalogue.gradeIds().contains(id)) {
+        throw Refusal.usage(
+            "coilwright: no material \""
+                + id
+                + "\"; accepted: "
+                + String.join(", ", catalogue.gradeIds()));
+      }
+    }
+    return wanted;
+  }
+}

@@ -1,0 +1,33 @@
+package coilwright.cli;
+
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.ParameterException;
+import picocli.CommandLine.Spec;
+
+/** The program's root: names the commands. */
+@Command(
+    name = "coilwright",
+    description = {
+      "Helical springs from the loads they must carry: every standard wire and material that can do"
+          + " the job, ranked, and why the rest cannot."
+    },
+    subcommands = {
+      ShortlistCommand.class,
+      CheckCommand.class,
+      MaterialsCommand.class,
+      WiresCommand.class,
+      StarterCommand.class
+    },
+    mixinStandardHelpOptions = true,
+    versionProvider = Version.class,
+    footer = {"", "Example:", "  coilwright shortlist problems/check-valve.yaml"})
+final class RootCommand implements Runnable {
+
+  @Spec private CommandSpec spec;
+
+  @Override
+  public void run() {
+    throw new ParameterException(spec.commandLine(), "a command is missing");
+  }
+}

@@ -1,0 +1,73 @@
+package coilwright.limit;
+
+import coilwright.spring.State;
+import org.apache.commons.math3.analysis.solvers.PegasusSolver;
+
+/**
+ * Two coil counts of a family, of which one holds a limit and the other does not, with one bound
+ * between them.
+ *
+ * <p>Along a family nearly every number is nearly a power of the coil count, so the logarithm of
+ * value over bound is solved against the logarithm of the count: there it is nearly a straight
+ * line. A value that falls through zero, as travel left before solid does, is nearly straight as it
+ * is.
+ */
+final class Bracket<S extends State> {
+
+  private static final double ACCURACY = 1e-10;
+  private static final double WIDEST = 1e6;
+  private static final int MOST_EVALUATIONS = 200;
+
+  private final Limit<S> limit;
+  private final Trail<S> trail;
+  private final double from;
+  private final double to;
+  private final boolean straight;
+
+  Bracket(Limit<S> limit, Trail<S> trail, double from, double to) {
+    this.limit = limit;
+    this.trail = trail;
+    this.from = from;
+    this.to = to;
+    this.straight = isStraight(from) || isStraight(to);
+  }
+
+  private boolean isStraight(double coils) {
+    Finding finding = limit.judge(trail.at(coils));
+    return !(finding.bound() > 0) || finding.check().side() == Side.MIN && !(finding.value() > 0);
+  }
+
+  /** The coil count at which the limit begins or ceases to hold. */
+  double root() {
+    double low = scale(from);
+    double high = scale(to);
+    double atLow = excess(from);
+    double atHigh = excess(to);
+    if (!(atLow * atHigh < 0)) {
+      return Math.abs(atLow) < Math.abs(atHigh) ? from : to;
+    }
+    return coils(
+        new PegasusSolver(ACCURACY, ACCURACY, ACCURACY)
+            .solve(MOST_EVALUATIONS, x -> excess(coils(x)), low, high));
+  }
+
+  private double scale(double coils) {
+    return straight ? coils : StrictMath.log(coils);
+  }
+
+  private double coils(double scaled) {
+    double coils = straight ? scaled : StrictMath.exp(scaled);
+    return Math.min(to, Math.max(from, coils));
+  }
+
+  /** Zero just where {@link Finding#holds} turns, negative where it does not hold. */
+  private double excess(double coils) {
+    Finding finding = limit.judge(trail.at(coils));
+    if (straight || !finding.canFail()) {
+      return Math.min(finding.margin(), WIDEST) + Finding.TOLERANCE;
+    }
+    double ratio = Math.min(WIDEST, Math.max(1 / WIDEST, finding.value() / finding.bound()));
+    double log = StrictMath.log(ratio);
+    return (finding.check().side() == Side.MIN ? log : -log) + Finding.TOLERANCE;
+  }
+}

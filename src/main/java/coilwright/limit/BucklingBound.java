@@ -1,0 +1,100 @@
+package coilwright.limit;
+
+import coilwright.problem.LimitName;
+import coilwright.spring.Buckling;
+import coilwright.spring.CompressionSpring;
+import coilwright.spring.CompressionState;
+import coilwright.spring.Family;
+import coilwright.spring.Seating;
+import coilwright.unit.Dimension;
+import org.apache.commons.math3.optim.MaxEval;
+import org.apache.commons.math3.optim.nonlinear.scalar.GoalType;
+import org.apache.commons.math3.optim.univariate.BrentOptimizer;
+import org.apache.commons.math3.optim.univariate.SearchInterval;
+import org.apache.commons.math3.optim.univariate.UnivariateObjectiveFunction;
+
+/** Deflection against the deflection at which the spring would buckle. */
+final class BucklingBound implements Limit<CompressionState> {
+
+  private static final Check AT_LOAD =
+      new Check(
+          LimitName.BUCKLING,
+          Side.MAX,
+          Dimension.LENGTH,
+          "deflection at the most compressed load, against the critical deflection");
+  private static final Check AT_SOLID =
+      new Check(
+          LimitName.BUCKLING,
+          Side.MAX,
+          Dimension.LENGTH,
+          "deflection at solid, against the critical deflection");
+
+  private final boolean atSolid;
+
+  BucklingBound(boolean atSolid) {
+    this.atSolid = atSolid;
+  }
+
+  @Override
+  public LimitName name() {
+    return LimitName.BUCKLING;
+  }
+
+  @Override
+  public Finding judge(CompressionState state) {
+    Check check = atSolid ? AT_SOLID : AT_LOAD;
+    double critical = state.criticalDeflection();
+    if (critical == Double.POSITIVE_INFINITY) {
+      return Finding.cannotFail(check, Buckling.CITATION);
+    }
+    double deflection = (atSolid ? state.solid() : state.mostCompressed()).deflection();
+    return Finding.of(check, deflection, critical, Buckling.CITATION);
+  }
+
+  /**
+   * {@inheritDoc}
+   *
+   * <p>Up to some coil count the coil is wide enough never to buckle. Beyond it the deflection that
+   * the loads ask stays and the critical one falls; but the deflection to solid falls too, so that
+   * its ratio to the critical one first rises, then falls to zero.
+   */
+  @Override
+  public double[] turns(Family<CompressionState> family) {
+    AlongFamily along = new AlongFamily(family);
+    double wide = along.coilsAt(alwaysStable(along.any()));
+    double justBeyond = wide * (1 + 1e-9);
+    double solid = along.coilsSolidWhenFree();
+    if (!atSolid || !(solid > justBeyond)) {
+      return new double[] {wide, justBeyond};
+    }
+    return new double[] {wide, justBeyond, worst(along, justBeyond, solid), solid};
+  }
+
+  private static double alwaysStable(CompressionState state) {
+    return Buckling.alwaysStableMeanDiameter(
+        state.spring().freeLength(),
+        state.seating().factor(),
+        state.wire().shearModulus(),
+        state.wire().elasticModulus());
+  }
+
+  private static double worst(AlongFamily along, double from, double to) {
+    CompressionSpring spring = along.any().spring();
+    Seating seating = along.any().seating();
+    return new BrentOptimizer(1e-6, 1e-9)
+        .optimize(
+            new MaxEval(200),
+            GoalType.MAXIMIZE,
+            new SearchInterval(from, to),
+            new UnivariateObjectiveFunction(
+                coils ->
+                    along.deflectionToSolid(coils)
+                        / Buckling.criticalDeflection(
+                            along.meanDiameterAt(coils),
+                            spring.freeLength(),
+                            seating.factor(),
+                            spring.wire().shearModulus(),
+                            spring.wire().elasticModulus())))
+        .getPoint();
+  }
+}

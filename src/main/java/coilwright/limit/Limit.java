@@ -1,0 +1,44 @@
+package coilwright.limit;
+
+import coilwright.problem.LimitName;
+import coilwright.spring.Family;
+import coilwright.spring.State;
+
+/**
+ * One bound of a design limit, written once: checks, candidates, what ruled a wire out and the coil
+ * counts a limit leaves all come from {@link #judge}.
+ *
+ * @param <S> the state of the kind of spring it judges
+ */
+public interface Limit<S extends State> {
+
+  /** The limit's name. Two bounds of one limit share it. */
+  LimitName name();
+
+  /**
+   * Judges a spring.
+   *
+   * @param state the spring at its loads
+   * @return value, bound and whether it holds
+   */
+  Finding judge(S state);
+
+  /**
+   * Coil counts at which the margin may turn or jump along a family. Between two neighbours the
+   * margin must be monotone.
+   *
+   * @param family the family
+   * @return coil counts [-], in any order, inside the family's range or not
+   */
+  default double[] turns(Family<S> family) {
+    return new double[0];
+  }
+
+  /**
+   * Whether the limit looks only at what rounding does to a spring: every unrounded spring of a
+   * family holds it.
+   */
+  default boolean onlyAfterRounding() {
+    return false;
+  }
+}

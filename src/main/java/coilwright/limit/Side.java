@@ -1,0 +1,31 @@
+package coilwright.limit;
+
+/** Which way a bound cuts. */
+public enum Side {
+  /** The value must not be below the bound. */
+  MIN("min"),
+  /** The value must not be above the bound. */
+  MAX("max");
+
+  private final String id;
+
+  Side(String id) {
+    this.id = id;
+  }
+
+  /** The word used in output. */
+  public String id() {
+    return id;
+  }
+
+  /**
+   * How far a value is on the right side of a bound.
+   *
+   * @param value the value
+   * @param bound the bound, in the same unit
+   * @return positive inside, negative outside, in the same unit; NaN if either is
+   */
+  public double slack(double value, double bound) {
+    return this == MIN ? value - bound : bound - value;
+  }
+}

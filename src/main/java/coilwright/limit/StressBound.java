@@ -1,0 +1,78 @@
+package coilwright.limit;
+
+import coilwright.material.WireGrade;
+import coilwright.problem.LimitName;
+import coilwright.problem.StressLimit;
+import coilwright.spring.CompressionState;
+import coilwright.spring.Family;
+import coilwright.spring.LoadState;
+import coilwright.unit.Dimension;
+import java.util.OptionalDouble;
+import java.util.function.Function;
+
+/** Corrected shear stress at one place against a share of tensile strength. */
+final class StressBound implements Limit<CompressionState> {
+
+  private final Check check;
+  private final StressLimit limit;
+  private final Function<CompressionState, LoadState> where;
+  private final Function<WireGrade, OptionalDouble> ownShare;
+  private final Function<Family<CompressionState>, double[]> turns;
+
+  private StressBound(
+      LimitName name,
+      String author,
+      StressLimit limit,
+      Function<CompressionState, LoadState> where,
+      Function<WireGrade, OptionalDouble> ownShare,
+      Function<Family<CompressionState>, double[]> turns) {
+    this.check = new Check(name, Side.MAX, Dimension.STRESS, "corrected, " + author);
+    this.limit = limit;
+    this.where = where;
+    this.ownShare = ownShare;
+    this.turns = turns;
+  }
+
+  /** The bound at the most compressed load. */
+  static StressBound atLoad(StressLimit limit, String author) {
+    return new StressBound(
+        LimitName.STRESS_AT_LOAD,
+        author,
+        limit,
+        CompressionState::mostCompressed,
+        WireGrade::stressAtLoad,
+        StressTurns::atLoad);
+  }
+
+  /** The bound at solid. */
+  static StressBound atSolid(StressLimit limit, String author) {
+    return new StressBound(
+        LimitName.STRESS_AT_SOLID,
+        author,
+        limit,
+        CompressionState::solid,
+        WireGrade::stressAtSolid,
+        StressTurns::atSolid);
+  }
+
+  @Override
+  public LimitName name() {
+    return check.limit();
+  }
+
+  @Override
+  public Finding judge(CompressionState state) {
+    WireGrade grade = state.wire().grade();
+    Allowable allowable = Allowable.of(limit, grade, ownShare.apply(grade));
+    return Finding.of(
+        check,
+        where.apply(state).correctedShearStress(),
+        allowable.share() * state.wire().tensileStrength(),
+        allowable.source());
+  }
+
+  @Override
+  public double[] turns(Family<CompressionState> family) {
+    return turns.apply(family);
+  }
+}

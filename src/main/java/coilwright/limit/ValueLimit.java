@@ -1,0 +1,47 @@
+package coilwright.limit;
+
+import coilwright.problem.LimitName;
+import coilwright.source.Citation;
+import coilwright.spring.Family;
+import coilwright.spring.State;
+import java.util.function.Function;
+import java.util.function.ToDoubleFunction;
+
+/**
+ * A limit that holds one number of a spring against one bound.
+ *
+ * @param check what the bound asks
+ * @param value the number judged, in the dimension's inner unit
+ * @param bound the bound, in the same unit
+ * @param source where bound or law comes from
+ * @param turnsOf coil counts where the margin may turn
+ * @param <S> the state of the kind of spring it judges
+ */
+record ValueLimit<S extends State>(
+    Check check,
+    ToDoubleFunction<S> value,
+    ToDoubleFunction<S> bound,
+    Citation source,
+    Function<Family<S>, double[]> turnsOf)
+    implements Limit<S> {
+
+  /** A limit whose margin never turns. */
+  ValueLimit(Check check, ToDoubleFunction<S> value, ToDoubleFunction<S> bound, Citation source) {
+    this(check, value, bound, source, family -> new double[0]);
+  }
+
+  @Override
+  public LimitName name() {
+    return check.limit();
+  }
+
+  @Override
+  public Finding judge(S state) {
+    return Finding.of(check, value.applyAsDouble(state), bound.applyAsDouble(state), source);
+  }
+
+  @Override
+  public double[] turns(Family<S> family) {
+    return turnsOf.apply(family);
+  }
+}

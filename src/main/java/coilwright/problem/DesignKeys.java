@@ -1,0 +1,110 @@
+package coilwright.problem;
+
+import coilwright.material.WireSize;
+import coilwright.spring.EndType;
+import coilwright.spring.Hand;
+import java.util.List;
+
+/** The keys about the one spring that a check judges. */
+final class DesignKeys {
+
+  static final ProblemKey<Section> DESIGN =
+      ProblemKey.section(
+          "design", "in a file for shortlist", "the spring to judge; for check, instead of make");
+
+  static final ProblemKey<String> MATERIAL =
+      ProblemKey.of(
+          "design.material",
+          new TextReader("a grade id"),
+          "",
+          "id from coilwright materials or own_materials",
+          "music-wire");
+
+  static final ProblemKey<WireSize> WIRE_DIAMETER =
+      ProblemKey.of("design.wire_diameter", new WireSizeReader(), "", "wire diameter", "1.4 mm");
+
+  static final ProblemKey<Double> MEAN_DIAMETER =
+      ProblemKey.of(
+          "design.mean_diameter",
+          Values.length(),
+          "outside_diameter or inside_diameter is given",
+          "diameter at the middle of the wire",
+          "12.2 mm");
+
+  static final ProblemKey<Double> OUTSIDE_DIAMETER =
+      ProblemKey.of(
+          "design.outside_diameter",
+          Values.length(),
+          "mean_diameter or inside_diameter is given",
+          "diameter over the coils",
+          "13.6 mm");
+
+  static final ProblemKey<Double> INSIDE_DIAMETER =
+      ProblemKey.of(
+          "design.inside_diameter",
+          Values.length(),
+          "mean_diameter or outside_diameter is given",
+          "diameter inside the coils",
+          "10.8 mm");
+
+  static final ProblemKey<Double> ACTIVE_COILS =
+      ProblemKey.of(
+          "design.active_coils",
+          Values.number(Range.ABOVE_ZERO),
+          "total_coils is given",
+          "coils that deflect",
+          "8");
+
+  static final ProblemKey<Double> TOTAL_COILS =
+      ProblemKey.of(
+          "design.total_coils",
+          Values.number(Range.ABOVE_ZERO),
+          "active_coils is given",
+          "all coils, with the dead ones of the ends",
+          "10");
+
+  static final ProblemKey<Double> FREE_LENGTH =
+      ProblemKey.of("design.free_length", Values.length(), "", "length without load", "38.7 mm");
+
+  static final ProblemKey<EndType> ENDS =
+      ProblemKey.of(
+          "design.ends",
+          new WordReader<>(List.of(EndType.values()), EndType::id),
+          "",
+          "how the end coils are formed",
+          "squared-ground");
+
+  static final ProblemKey<Hand> HAND =
+      ProblemKey.of(
+          "design.hand",
+          new WordReader<>(List.of(Hand.values()), Hand::id),
+          "either",
+          "direction of winding",
+          "right");
+
+  static final ProblemKey<Boolean> SET_REMOVED =
+      ProblemKey.of(
+          "design.set_removed",
+          Values.notSet(),
+          "false",
+          "whether the spring was pressed solid once to raise its strength",
+          "false");
+
+  /** All of them. */
+  static final List<ProblemKey<?>> ROWS =
+      List.of(
+          DESIGN,
+          MATERIAL,
+          WIRE_DIAMETER,
+          MEAN_DIAMETER,
+          OUTSIDE_DIAMETER,
+          INSIDE_DIAMETER,
+          ACTIVE_COILS,
+          TOTAL_COILS,
+          FREE_LENGTH,
+          ENDS,
+          HAND,
+          SET_REMOVED);
+
+  private DesignKeys() {}
+}

@@ -1,0 +1,68 @@
+package coilwright.problem;
+
+import java.util.Optional;
+import java.util.OptionalDouble;
+
+/** Reads the space a spring must fit. */
+final class EnvelopeReader {
+
+  private EnvelopeReader() {}
+
+  /**
+   * Reads the envelope.
+   *
+   * @param root the file
+   * @return the envelope; without bounds where the file has none
+   */
+  static Envelope read(Section root) {
+    Optional<Section> given = root.read(EnvelopeKeys.ENVELOPE);
+    if (given.isEmpty()) {
+      OptionalDouble none = OptionalDouble.empty();
+      return new Envelope(none, none, none, none, none, none, none);
+    }
+    Section section = given.get();
+    Envelope envelope =
+        new Envelope(
+            section.number(EnvelopeKeys.BORE),
+            section.number(EnvelopeKeys.ROD),
+            section.number(EnvelopeKeys.CLEARANCE),
+            section.number(EnvelopeKeys.MAX_OUTSIDE_DIAMETER),
+            section.number(EnvelopeKeys.MIN_INSIDE_DIAMETER),
+            section.number(EnvelopeKeys.MAX_FREE_LENGTH),
+            section.number(EnvelopeKeys.MAX_SOLID_LENGTH));
+    inside(section, EnvelopeKeys.BORE, EnvelopeKeys.ROD, envelope.bore(), envelope.rod());
+    inside(
+        section,
+        EnvelopeKeys.MAX_OUTSIDE_DIAMETER,
+        EnvelopeKeys.MIN_INSIDE_DIAMETER,
+        envelope.maxOutsideDiameter(),
+        envelope.minInsideDiameter());
+    clearance(section);
+    return envelope;
+  }
+
+  private static void inside(
+      Section section,
+      ProblemKey<Double> outerKey,
+      ProblemKey<Double> innerKey,
+      OptionalDouble outer,
+      OptionalDouble inner) {
+    boolean both = outer.isPresent() && inner.isPresent();
+    if (both && !(outer.getAsDouble() > inner.getAsDouble())) {
+      section
+          .spot(outerKey)
+          .fault(
+              section.shown(outerKey),
+              "must be above " + innerKey.name() + ", " + section.shown(innerKey));
+    }
+  }
+
+  private static void clearance(Section section) {
+    boolean guided = section.has(EnvelopeKeys.BORE) || section.has(EnvelopeKeys.ROD);
+    if (guided && !section.has(EnvelopeKeys.CLEARANCE)) {
+      section
+          .spot(EnvelopeKeys.CLEARANCE)
+          .fault("missing", "needed with bore or rod; its default is " + Later.WORDS);
+    }
+  }
+}

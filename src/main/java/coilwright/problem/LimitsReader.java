@@ -1,0 +1,92 @@
+package coilwright.problem;
+
+import coilwright.spring.StressCorrection;
+import java.util.Optional;
+import java.util.OptionalDouble;
+
+/** Reads the limits, merged bound by bound with the defaults. */
+final class LimitsReader {
+
+  private static final Band SPRING_INDEX = band(5, 12);
+  private static final Band ACTIVE_COILS = band(3, 60);
+  private static final OptionalDouble PITCH_ANGLE = OptionalDouble.of(Math.toRadians(12));
+  private static final OptionalDouble CLASH_ALLOWANCE = OptionalDouble.of(0.15);
+  private static final OptionalDouble NONE = OptionalDouble.empty();
+
+  private LimitsReader() {}
+
+  /**
+   * Reads the limits.
+   *
+   * @param root the file
+   * @return the limits; the defaults where the file has none
+   */
+  static DesignLimits read(Section root) {
+    return root.read(LimitKeys.LIMITS).map(LimitsReader::limits).orElse(defaults());
+  }
+
+  private static DesignLimits defaults() {
+    return new DesignLimits(
+        SPRING_INDEX,
+        ACTIVE_COILS,
+        PITCH_ANGLE,
+        CLASH_ALLOWANCE,
+        StressCorrection.BERGSTRAESSER,
+        new StressLimit(true, NONE),
+        new StressLimit(true, NONE),
+        BucklingRule.AT_LOAD_UNLESS_GUIDED,
+        NONE);
+  }
+
+  private static DesignLimits limits(Section section) {
+    section.read(LimitKeys.STRESS_BASIS);
+    return new DesignLimits(
+        new BandReader(
+                LimitKeys.SPRING_INDEX, LimitKeys.SPRING_INDEX_MIN, LimitKeys.SPRING_INDEX_MAX)
+            .read(section, SPRING_INDEX),
+        new BandReader(
+                LimitKeys.ACTIVE_COILS, LimitKeys.ACTIVE_COILS_MIN, LimitKeys.ACTIVE_COILS_MAX)
+            .read(section, ACTIVE_COILS),
+        bound(section, LimitKeys.PITCH_ANGLE, LimitKeys.PITCH_ANGLE_MAX, PITCH_ANGLE),
+        BandReader.bound(section.read(LimitKeys.CLASH_ALLOWANCE), CLASH_ALLOWANCE),
+        section.read(LimitKeys.STRESS_CORRECTION).orElse(StressCorrection.BERGSTRAESSER),
+        stress(section, LimitKeys.STRESS_AT_LOAD, LimitKeys.STRESS_AT_LOAD_MAX),
+        stress(section, LimitKeys.STRESS_AT_SOLID, LimitKeys.STRESS_AT_SOLID_MAX),
+        section.read(LimitKeys.BUCKLING).orElse(BucklingRule.AT_LOAD_UNLESS_GUIDED),
+        bound(section, LimitKeys.SURGE_FREQUENCY, LimitKeys.SURGE_FREQUENCY_MIN, NONE));
+  }
+
+  private static OptionalDouble bound(
+      Section section,
+      ProblemKey<Setting<Section>> key,
+      ProblemKey<Setting<Double>> boundKey,
+      OptionalDouble usual) {
+    return section
+        .read(key)
+        .map(
+            setting ->
+                setting
+                    .value()
+                    .map(inner -> BandReader.bound(inner.read(boundKey), usual))
+                    .orElse(NONE))
+        .orElse(usual);
+  }
+
+  private static StressLimit stress(
+      Section section, ProblemKey<Setting<Section>> key, ProblemKey<Setting<Double>> maxKey) {
+    Optional<Setting<Section>> setting = section.read(key);
+    if (setting.isEmpty()) {
+      return new StressLimit(true, NONE);
+    }
+    if (setting.get().value().isEmpty()) {
+      return new StressLimit(false, NONE);
+    }
+    Optional<Setting<Double>> max = setting.get().value().get().read(maxKey);
+    boolean judged = max.isEmpty() || max.get().value().isPresent();
+    return new StressLimit(judged, BandReader.bound(max, NONE));
+  }
+
+  private static Band band(double min, double max) {
+    return new Band(OptionalDouble.of(min), OptionalDouble.of(max));
+  }
+}

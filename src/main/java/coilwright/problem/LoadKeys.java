@@ -1,0 +1,89 @@
+package coilwright.problem;
+
+import coilwright.unit.Dimension;
+import coilwright.unit.Quantity;
+import java.util.List;
+
+/** The keys about the straight line of force against length. */
+final class LoadKeys {
+
+  static final ProblemKey<List<Section>> LOADS =
+      ProblemKey.of(
+          "loads",
+          new SectionListReader("loads[]"),
+          "",
+          "facts about the load line: any two independent ones fix it");
+
+  static final ProblemKey<Double> LENGTH =
+      ProblemKey.of(
+          "loads[].length",
+          Values.length(),
+          "",
+          "length under the load; a file for check may leave out length or force",
+          "32 mm",
+          "22 mm");
+
+  static final ProblemKey<Double> FORCE =
+      ProblemKey.of(
+          "loads[].force",
+          Values.quantity(Dimension.FORCE, Range.ABOVE_ZERO),
+          "",
+          "force at that length",
+          "18 N",
+          "45 N");
+
+  static final ProblemKey<ToleranceAsked> TOLERANCE =
+      ProblemKey.of(
+          "loads[].tolerance",
+          new ToleranceReader(),
+          "nothing is asked",
+          "what the buyer accepts around the force",
+          "10 %",
+          "{plus: 3 N, minus: 2 N}");
+
+  static final ProblemKey<Quantity> PLUS =
+      ProblemKey.of(
+          "loads[].tolerance.plus",
+          new QuantityReader(Range.FROM_ZERO, Dimension.FORCE, Dimension.SHARE),
+          "",
+          "how far above the force",
+          "3 N");
+
+  static final ProblemKey<Quantity> MINUS =
+      ProblemKey.of(
+          "loads[].tolerance.minus",
+          new QuantityReader(Range.FROM_ZERO, Dimension.FORCE, Dimension.SHARE),
+          "",
+          "how far below the force",
+          "2 N");
+
+  static final ProblemKey<Double> RATE =
+      ProblemKey.of(
+          "rate",
+          Values.quantity(Dimension.RATE, Range.ABOVE_ZERO),
+          "follows from the loads",
+          "another fact about the load line; must agree with the others within 0.1 %",
+          "2.7 N/mm");
+
+  static final ProblemKey<Double> FREE_LENGTH =
+      ProblemKey.of(
+          "free_length",
+          Values.length(),
+          "follows from the loads",
+          "likewise: the length without load",
+          "38.67 mm");
+
+  static final ProblemKey<Integer> SPRINGS_IN_PARALLEL =
+      ProblemKey.of(
+          "springs_in_parallel",
+          Values.count(),
+          "1",
+          "equal springs side by side that share the loads and the rate",
+          "1");
+
+  /** All of them. */
+  static final List<ProblemKey<?>> ROWS =
+      List.of(LOADS, LENGTH, FORCE, TOLERANCE, PLUS, MINUS, RATE, FREE_LENGTH, SPRINGS_IN_PARALLEL);
+
+  private LoadKeys() {}
+}

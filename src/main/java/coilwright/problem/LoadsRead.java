@@ -1,0 +1,75 @@
+package coilwright.problem;
+
+import coilwright.spring.LoadLine;
+import coilwright.spring.LoadPoint;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+
+/**
+ * What a file says about the load line, as read.
+ *
+ * @param facts the facts, for the whole group of springs
+ * @param required what one spring must do, where the facts fix the line
+ */
+record LoadsRead(LoadFacts facts, Optional<Requirement> required) {
+
+  /**
+   * Reads the loads and the other facts and reports those that contradict each other.
+   *
+   * @param root the file
+   * @param purpose a shortlist needs the line
+   * @return what was read; incomplete where there are faults
+   */
+  static LoadsRead of(Section root, Purpose purpose) {
+    long before = root.spot().faults().count();
+    List<LoadEntry> loads =
+        root.require(LoadKeys.LOADS).orElse(List.of()).stream()
+            .map(section -> LoadEntry.read(section, purpose))
+            .toList();
+    LoadFacts facts =
+        new LoadFacts(
+            loads.stream().map(LoadEntry::asked).toList(),
+            root.number(LoadKeys.RATE),
+            root.number(LoadKeys.FREE_LENGTH),
+            root.read(LoadKeys.SPRINGS_IN_PARALLEL).orElse(1));
+    if (root.spot().faults().count() == before) {
+      LoadOrder.check(loads);
+    }
+    if (root.spot().faults().count() > before) {
+      return new LoadsRead(facts, Optional.empty());
+    }
+    return new LoadsRead(facts, fixed(root, loads, facts, purpose));
+  }
+
+  private static Optional<Requirement> fixed(
+      Section root, List<LoadEntry> loads, LoadFacts facts, Purpose purpose) {
+    Optional<FixedLine> fixed = FixedLine.by(loads, facts);
+    if (fixed.isPresent()) {
+      new Agreement(root, fixed.get()).check(loads, facts);
+      return Optional.of(perSpring(fixed.get(), facts));
+    }
+    Agreement.belowFreeLength(loads, facts.freeLength());
+    if (purpose == Purpose.SHORTLIST) {
+      root.spot(LoadKeys.LOADS)
+          .fault(
+              "one load does not fix the load line",
+              "must be two loads, or one and rate or free_length");
+    }
+    return Optional.empty();
+  }
+
+  private static Requirement perSpring(FixedLine fixed, LoadFacts facts) {
+    int n = facts.springsInParallel();
+    LoadLine line = new LoadLine(fixed.line().rate() / n, fixed.line().freeLength());
+    List<LoadPoint> loads =
+        facts.loads().stream()
+            .map(load -> new LoadPoint(load.length(), divided(load.force(), n)))
+            .toList();
+    return new Requirement(line, fixed.rule(), loads);
+  }
+
+  private static OptionalDouble divided(OptionalDouble force, int n) {
+    return force.isPresent() ? OptionalDouble.of(force.getAsDouble() / n) : force;
+  }
+}

@@ -1,0 +1,127 @@
+package coilwright.problem;
+
+import coilwright.material.Supply;
+import coilwright.material.WireSeries;
+import coilwright.material.WireSize;
+import coilwright.spring.EndType;
+import coilwright.spring.Hand;
+import coilwright.unit.Dimension;
+import java.util.List;
+
+/** The keys about what a shop may make the spring of, and how. */
+final class MakeKeys {
+
+  static final ProblemKey<Section> MAKE =
+      ProblemKey.section("make", "the defaults", "what may be made; for shortlist only");
+
+  static final ProblemKey<Supply> SUPPLY =
+      ProblemKey.of(
+          "make.supply",
+          new WordReader<>(List.of(Supply.values()), Supply::word),
+          "en for metric, us for inch",
+          "whose steel grades and size series",
+          "en");
+
+  static final ProblemKey<List<String>> MATERIALS =
+      ProblemKey.of(
+          "make.materials",
+          Values.list(new TextReader("a grade id or all")),
+          "the common grades of the supply whose data were seen",
+          "ids from coilwright materials or own_materials, or all",
+          "[music-wire]");
+
+  static final ProblemKey<List<String>> EXCLUDE_MATERIALS =
+      ProblemKey.of(
+          "make.exclude_materials",
+          Values.list(new TextReader("a grade id")),
+          "none excluded",
+          "ids never tried",
+          "[hard-drawn]");
+
+  static final ProblemKey<List<WireSeries>> WIRE_SERIES =
+      ProblemKey.of(
+          "make.wire_series",
+          Values.list(
+              new WordReader<>(
+                  List.of(WireSeries.values()),
+                  WireSeries::id,
+                  "steel-wire-gauge",
+                  "brown-sharpe")),
+          "the usual one of each grade",
+          "whose wire sizes are tried",
+          "[metric]");
+
+  static final ProblemKey<List<WireSize>> WIRE_SIZES =
+      ProblemKey.of(
+          "make.wire_sizes",
+          new ListReader<>(new WireSizeReader(), size -> Math.rint(size.diameter() * 1e7)),
+          "the sizes of the series",
+          "a list of sizes instead of series",
+          "[1.6 mm, 0.063 in]");
+
+  static final ProblemKey<List<EndType>> ENDS =
+      ProblemKey.of(
+          "make.ends",
+          Values.list(new WordReader<>(List.of(EndType.values()), EndType::id)),
+          "squared-ground and squared",
+          "how the end coils are formed",
+          "[squared-ground]");
+
+  static final ProblemKey<Hand> HAND =
+      ProblemKey.of(
+          "make.hand",
+          new WordReader<>(List.of(Hand.values()), Hand::id),
+          "either",
+          "direction of winding",
+          "either");
+
+  static final ProblemKey<Boolean> SET_REMOVED =
+      ProblemKey.of(
+          "make.set_removed",
+          Values.notSet(),
+          "false",
+          "whether the spring is pressed solid once to raise its strength",
+          "false");
+
+  static final ProblemKey<Double> COIL_STEP =
+      ProblemKey.of(
+          "make.coil_step",
+          Values.number(Range.ABOVE_ZERO),
+          "0.25",
+          "active coils are multiples of this",
+          "0.25");
+
+  static final ProblemKey<Double> DIAMETER_STEP =
+      ProblemKey.of(
+          "make.diameter_step",
+          Values.quantity(Dimension.LENGTH, Range.FROM_ZERO),
+          "0.01 mm (inch: 0.0005 in), a tenth below 5 mm mean diameter",
+          "the mean diameter is rounded to this; 0 mm: not rounded",
+          "0.01 mm");
+
+  static final ProblemKey<Double> LENGTH_STEP =
+      ProblemKey.of(
+          "make.length_step",
+          Values.quantity(Dimension.LENGTH, Range.FROM_ZERO),
+          "0.1 mm (inch: 0.005 in), a tenth below 5 mm mean diameter",
+          "the free length is rounded to this; 0 mm: not rounded",
+          "0.1 mm");
+
+  /** All of them. */
+  static final List<ProblemKey<?>> ROWS =
+      List.of(
+          MAKE,
+          SUPPLY,
+          MATERIALS,
+          EXCLUDE_MATERIALS,
+          WIRE_SERIES,
+          WIRE_SIZES,
+          ENDS,
+          HAND,
+          SET_REMOVED,
+          COIL_STEP,
+          DIAMETER_STEP,
+          LENGTH_STEP);
+
+  private MakeKeys() {}
+}

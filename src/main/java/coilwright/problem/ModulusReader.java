@@ -1,0 +1,35 @@
+package coilwright.problem;
+
+import coilwright.material.ModulusLaw;
+import coilwright.material.ModulusLaws;
+import java.util.Optional;
+
+/**
+ * Reads a modulus: a constant or a table of steps.
+ *
+ * @param steps reads the table
+ */
+record ModulusReader(StepsReader steps) implements ValueReader<LawGiven<ModulusLaw>> {
+
+  @Override
+  public Optional<LawGiven<ModulusLaw>> read(Node node, Spot spot) {
+    if (node instanceof Node.Sequence) {
+      return steps
+          .read(node, spot)
+          .map(
+              table ->
+                  new LawGiven<>(
+                      ModulusLaws.steps(table.diameters(), table.heights()), table.end()));
+    }
+    if (node instanceof Node.Mapping) {
+      spot.fault(node.shown(), "must be " + accepted());
+      return Optional.empty();
+    }
+    return Values.stress().read(node, spot).map(ModulusLaws::constant).map(LawGiven::everywhere);
+  }
+
+  @Override
+  public String accepted() {
+    return Values.stress().accepted() + ", or " + steps.accepted();
+  }
+}

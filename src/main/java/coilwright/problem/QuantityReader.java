@@ -1,0 +1,43 @@
+package coilwright.problem;
+
+import coilwright.unit.Dimension;
+import coilwright.unit.Parsed;
+import coilwright.unit.Quantity;
+import coilwright.unit.QuantityParser;
+import java.util.List;
+import java.util.Optional;
+
+/** Reads quantities: a number with its unit. */
+final class QuantityReader extends ScalarReader<Quantity> {
+
+  private final Range range;
+  private final List<Dimension> dimensions;
+
+  /**
+   * A reader of quantities of one of several kinds.
+   *
+   * @param range what makes sense, in inner units
+   * @param dimensions the kinds accepted
+   */
+  QuantityReader(Range range, Dimension... dimensions) {
+    this.range = range;
+    this.dimensions = List.of(dimensions);
+  }
+
+  @Override
+  Optional<Quantity> parse(String text, Spot spot) {
+    Parsed<Quantity> parsed = QuantityParser.parse(text, dimensions);
+    if (parsed.value().isEmpty()) {
+      return refuse(text, parsed.why(), parsed.nearest(), spot);
+    }
+    Quantity quantity = parsed.value().get();
+    Optional<String> remedy = range.refuses(quantity.inner(), Optional.of(quantity.unit()));
+    remedy.ifPresent(words -> spot.fault(ShownText.of(text), words));
+    return remedy.isPresent() ? Optional.empty() : parsed.value();
+  }
+
+  @Override
+  public String accepted() {
+    return QuantityParser.accepted(dimensions);
+  }
+}

@@ -1,0 +1,45 @@
+package coilwright.problem;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+
+/**
+ * Reads lists of blocks of keys.
+ *
+ * @param path the path of one block in the table of keys, such as "loads[]"
+ */
+record SectionListReader(String path) implements ValueReader<List<Section>> {
+
+  @Override
+  public Optional<List<Section>> read(Node node, Spot spot) {
+    if (node instanceof Node.Sequence list && !list.items().isEmpty()) {
+      List<Section> sections = new ArrayList<>();
+      for (int i = 0; i < list.items().size(); i++) {
+        Node item = list.items().get(i);
+        Section.open(item, spot.item(item.mark(), i)).ifPresent(sections::add);
+      }
+      return Optional.of(sections);
+    }
+    if (!(node instanceof Node.Refused)) {
+      spot.fault(
+          node instanceof Node.Sequence ? "an empty list" : node.shown(), "must be " + accepted());
+    }
+    return Optional.empty();
+  }
+
+  @Override
+  public String accepted() {
+    return "a list of blocks of keys: " + String.join(", ", KeyTable.names(path));
+  }
+
+  @Override
+  public String written() {
+    return "a list of blocks of keys";
+  }
+
+  @Override
+  public boolean omits(Node node) {
+    return node instanceof Node.Scalar && node.isEmpty();
+  }
+}

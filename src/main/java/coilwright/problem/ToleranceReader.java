@@ -1,0 +1,36 @@
+package coilwright.problem;
+
+import coilwright.unit.Dimension;
+import coilwright.unit.Quantity;
+import java.util.Optional;
+
+/** Reads a tolerance: the same on both sides of the force, or each side for itself. */
+final class ToleranceReader implements ValueReader<ToleranceAsked> {
+
+  private final QuantityReader both =
+      new QuantityReader(Range.ABOVE_ZERO, Dimension.FORCE, Dimension.SHARE);
+
+  @Override
+  public Optional<ToleranceAsked> read(Node node, Spot spot) {
+    return node instanceof Node.Mapping
+        ? Section.open(node, spot).flatMap(ToleranceReader::sides)
+        : both.read(node, spot).map(side -> new ToleranceAsked(side, side));
+  }
+
+  private static Optional<ToleranceAsked> sides(Section section) {
+    Optional<Quantity> plus = section.require(LoadKeys.PLUS);
+    Optional<Quantity> minus = section.require(LoadKeys.MINUS);
+    if (plus.isEmpty() || minus.isEmpty()) {
+      return Optional.empty();
+    }
+    if (plus.get().number() == 0 && minus.get().number() == 0) {
+      section.spot().fault("zero on both sides", "must be above zero on one side at least");
+    }
+    return Optional.of(new ToleranceAsked(plus.get(), minus.get()));
+  }
+
+  @Override
+  public String accepted() {
+    return both.accepted() + ", or {plus, minus} of such";
+  }
+}

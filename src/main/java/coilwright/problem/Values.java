@@ -1,0 +1,69 @@
+package coilwright.problem;
+
+import coilwright.unit.Dimension;
+import coilwright.unit.Quantity;
+import java.util.List;
+import java.util.function.Function;
+
+/** The readers that several keys share. */
+final class Values {
+
+  private Values() {}
+
+  /**
+   * A quantity.
+   *
+   * @param dimension its kind
+   * @param range what makes sense, in the inner unit
+   * @return reads the value in the inner unit
+   */
+  static ValueReader<Double> quantity(Dimension dimension, Range range) {
+    return new QuantityReader(range, dimension).map(Quantity::inner);
+  }
+
+  /** A length above zero, in mm. */
+  static ValueReader<Double> length() {
+    return quantity(Dimension.LENGTH, Range.ABOVE_ZERO);
+  }
+
+  /** A strength or a modulus above zero, in MPa. */
+  static ValueReader<Double> stress() {
+    return quantity(Dimension.STRESS, Range.ABOVE_ZERO);
+  }
+
+  /** A share of tensile strength: above zero, and not above the strength itself. */
+  static ValueReader<Double> shareOfStrength() {
+    return quantity(Dimension.SHARE, new Range(0, false, 1, true));
+  }
+
+  /**
+   * A plain number.
+   *
+   * @param range what makes sense
+   * @return reads it
+   */
+  static ValueReader<Double> number(Range range) {
+    return new NumberReader(range, false);
+  }
+
+  /** A whole number from one on. */
+  static ValueReader<Integer> count() {
+    return new NumberReader(Range.FROM_ONE, true).map(Double::intValue);
+  }
+
+  /** Whether the springs are set, of which only {@code false} is available. */
+  static ValueReader<Boolean> notSet() {
+    return new WordReader<>(List.of(false), String::valueOf, "true");
+  }
+
+  /**
+   * A list of words of which none may stand twice.
+   *
+   * @param <T> what the words stand for
+   * @param item reads one
+   * @return reads the list
+   */
+  static <T> ValueReader<List<T>> list(ValueReader<T> item) {
+    return new ListReader<>(item, Function.identity()::apply);
+  }
+}

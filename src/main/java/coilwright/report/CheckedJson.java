@@ -1,0 +1,78 @@
+package coilwright.report;
+
+import coilwright.limit.Finding;
+import coilwright.problem.Design;
+import coilwright.rank.Cost;
+import coilwright.search.Candidate;
+import coilwright.spring.CompressionState;
+import java.io.IOException;
+import java.util.List;
+
+/** A checked spring as JSON. */
+public final class CheckedJson {
+
+  private final Checked checked;
+
+  private CheckedJson(Checked checked) {
+    this.checked = checked;
+  }
+
+  /**
+   * Writes a check.
+   *
+   * @param checked what it shows
+   * @return the document
+   */
+  public static String of(Checked checked) {
+    return Json.document(new CheckedJson(checked)::writeTo);
+  }
+
+  private void writeTo(Json json) throws IOException {
+    json.count("format", ShortlistJson.FORMAT);
+    json.object(
+        "problem", new ProblemJson(checked.problem(), List.of(checked.check().grade().id())));
+    if (checked.problem().required().isPresent()) {
+      ShortlistJson.required(json, checked.problem().required().get());
+    }
+    json.flag("holds", checked.check().holds());
+    json.object("spring", this::spring);
+    json.strings("warnings", Warnings.of(checked));
+    json.strings("cautions", Cautions.LINES);
+  }
+
+  private void spring(Json json) throws IOException {
+    if (checked.check().spring().isPresent()) {
+      Candidate<CompressionState> spring = checked.check().spring().get();
+      new CandidateJson(spring, checked.problem()).writeTo(json);
+      json.array("cost_terms", list -> terms(list, Cost.of(spring.state())));
+    } else {
+      outOfRange(json, checked.check().outOfRange().orElseThrow());
+    }
+  }
+
+  private static void terms(Json json, Cost cost) throws IOException {
+    for (Cost.Term term : cost.terms()) {
+      json.braces(
+          body -> {
+            body.string("term", term.name());
+            body.number("value", term.value());
+          });
+    }
+  }
+
+  /**
+   * A grade without data for the wire has no strength, so nothing else can be said of the spring.
+   */
+  private void outOfRange(Json json, Finding finding) throws IOException {
+    Design design = checked.problem().design().orElseThrow();
+    json.string("material", design.material());
+    json.string("wire_size", design.wireSize().label());
+    json.string("ends", design.ends().id());
+    json.number("wire_diameter_mm", design.wireSize().diameter());
+    json.number("mean_diameter_mm", design.meanDiameter());
+    json.number("active_coils", design.activeCoils());
+    json.number("free_length_mm", design.freeLength());
+    json.array("checks", list -> list.braces(body -> CandidateJson.check(body, finding)));
+    json.string("limiting_check", finding.check().limit().text());
+  }
+}

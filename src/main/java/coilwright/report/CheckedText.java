@@ -1,0 +1,175 @@
+package coilwright.report;
+
+import coilwright.limit.Finding;
+import coilwright.limit.Side;
+import coilwright.rank.Cost;
+import coilwright.search.Candidate;
+import coilwright.spring.CompressionState;
+import coilwright.spring.LoadState;
+import coilwright.unit.Dimension;
+import java.util.ArrayList;
+import java.util.List;
+
+/** A checked spring as text: every quantity and every check. */
+public final class CheckedText {
+
+  private final Checked checked;
+  private final StringBuilder text = new StringBuilder();
+
+  private CheckedText(Checked checked) {
+    this.checked = checked;
+  }
+
+  /**
+   * Writes a check.
+   *
+   * @param checked what it shows
+   * @return the text
+   */
+  public static String of(Checked checked) {
+    CheckedText report = new CheckedText(checked);
+    report.head();
+    if (checked.check().spring().isPresent()) {
+      report.spring(checked.check().spring().get());
+    }
+    report.checks(report.findings());
+    checked.check().spring().ifPresent(spring -> report.cost(Cost.of(spring.state())));
+    report.foot();
+    return report.text.toString();
+  }
+
+  private List<Finding> findings() {
+    return checked
+        .check()
+        .spring()
+        .map(Candidate::findings)
+        .orElseGet(() -> List.of(checked.check().outOfRange().orElseThrow()));
+  }
+
+  private void head() {
+    line(Understood.title(checked.problem()));
+    line(verdict());
+    line("");
+    line("Understood");
+    text.append(Understood.of(checked.problem(), List.of(checked.check().grade().id())));
+    line("");
+  }
+
+  private String verdict() {
+    List<String> failing =
+        findings().stream()
+            .filter(finding -> !finding.holds())
+            .map(finding -> finding.check().limit().text())
+            .distinct()
+            .toList();
+    return failing.isEmpty()
+        ? "The spring holds every limit."
+        : "The spring fails: " + String.join(", ", failing) + ".";
+  }
+
+  private void spring(Candidate<CompressionState> candidate) {
+    CompressionState state = candidate.state();
+    line(
+        "The spring: "
+            + Wires.text(state.wire())
+            + ", "
+            + state.endForm()
+            + " ends, data "
+            + state.wire().evidence().word());
+    TextTable table = new TextTable("lrl");
+    for (Quantity<CompressionState> quantity : CompressionQuantities.SPRING) {
+      table.row(
+          quantity.label(),
+          quantity.text(state, OutputUnits.METRIC),
+          OutputUnits.METRIC.symbol(quantity.dimension()));
+    }
+    table.row(
+        "outside diameter at solid",
+        Numbers.fixed(state.spring().outsideDiameterAtSolid(), 3),
+        "mm");
+    table.row("critical deflection", critical(state), "mm");
+    text.append(table.text("  "));
+    line("");
+    loads(state);
+  }
+
+  private static String critical(CompressionState state) {
+    double critical = state.criticalDeflection();
+    return Double.isInfinite(critical) ? "never" : Numbers.fixed(critical, 2);
+  }
+
+  private void loads(CompressionState state) {
+    line("Its loads");
+    TextTable table = new TextTable("lrrrrr");
+    List<String> head = new ArrayList<>(List.of(""));
+    for (Quantity<LoadState> quantity : CompressionQuantities.LOAD) {
+      head.add(quantity.label() + " " + OutputUnits.METRIC.symbol(quantity.dimension()));
+    }
+    table.row(head.toArray(String[]::new));
+    for (int i = 0; i < state.loads().size(); i++) {
+      table.row(cells("load " + (i + 1), state.loads().get(i)));
+    }
+    table.row(cells("solid", state.solid()));
+    text.append(table.text("  "));
+    line("");
+  }
+
+  private static String[] cells(String name, LoadState load) {
+    List<String> cells = new ArrayList<>(List.of(name));
+    for (Quantity<LoadState> quantity : CompressionQuantities.LOAD) {
+      cells.add(quantity.text(load, OutputUnits.METRIC));
+    }
+    return cells.toArray(String[]::new);
+  }
+
+  private void checks(List<Finding> findings) {
+    line("Every check");
+    TextTable table = new TextTable("llrlrlrll");
+    table.row("", "limit", "value", "", "bound", "unit", "margin", "what is judged", "source");
+    for (Finding finding : findings) {
+      table.row(
+          finding.holds() ? "ok" : "FAILS",
+          finding.check().limit().text(),
+          number(finding, finding.value()),
+          !finding.canFail() ? "" : finding.check().side() == Side.MAX ? "<=" : ">=",
+          number(finding, finding.bound()),
+          finding.canFail() ? OutputUnits.METRIC.symbol(finding.check().dimension()) : "",
+          finding.hasMargin() ? Numbers.percent(finding.margin(), 1) : "-",
+          finding.check().definition(),
+          finding.source().text());
+    }
+    text.append(table.text("  "));
+    line("");
+  }
+
+  private static String number(Finding finding, double value) {
+    Dimension dimension = finding.check().dimension();
+    return Numbers.fixed(
+        OutputUnits.METRIC.convert(dimension, value), dimension == Dimension.STRESS ? 1 : 2);
+  }
+
+  private void cost(Cost cost) {
+    line("Cost proxy, in grams of hard-drawn wire (common practice, no source; not a price)");
+    TextTable table = new TextTable("lr");
+    for (Cost.Term term : cost.terms()) {
+      table.row(term.name(), Numbers.fixed(term.value(), 2));
+    }
+    table.row("total", Numbers.fixed(cost.total(), 2));
+    text.append(table.text("  "));
+    line("");
+  }
+
+  private void foot() {
+    List<String> warnings = Warnings.of(checked);
+    if (!warnings.isEmpty()) {
+      line("Warnings");
+      warnings.forEach(warning -> line("  " + warning));
+      line("");
+    }
+    Cautions.LINES.forEach(this::line);
+  }
+
+  private void line(String words) {
+    text.append(words).append('\n');
+  }
+}

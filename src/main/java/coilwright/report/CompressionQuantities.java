@@ -1,0 +1,112 @@
+package coilwright.report;
+
+import coilwright.rank.Cost;
+import coilwright.search.Candidate;
+import coilwright.spring.CompressionState;
+import coilwright.spring.LoadState;
+import coilwright.unit.Dimension;
+import java.util.List;
+import java.util.function.ToDoubleFunction;
+
+/** The numbers of a compression spring, each declared once for every output. */
+final class CompressionQuantities {
+
+  /** Dimensions and properties, in the order of the output. */
+  static final List<Quantity<CompressionState>> SPRING =
+      List.of(
+          length("wire_diameter", "wire diameter d", 3, s -> s.spring().wireDiameter()),
+          length("mean_diameter", "mean diameter D", 3, s -> s.spring().meanDiameter()),
+          length("outside_diameter", "outside diameter De", 3, s -> s.spring().outsideDiameter()),
+          length("inside_diameter", "inside diameter Di", 3, s -> s.spring().insideDiameter()),
+          number("spring_index", "spring index w", 2, s -> s.spring().springIndex()),
+          number("active_coils", "active coils n", 3, CompressionState::coils),
+          number("total_coils", "total coils nt", 3, s -> s.spring().totalCoils()),
+          length("free_length", "free length L0", 2, s -> s.spring().freeLength()),
+          length("solid_length", "solid length Ls", 2, CompressionState::solidLength),
+          length("pitch", "pitch p", 3, s -> s.spring().pitch()),
+          of("pitch_angle", "pitch angle", Dimension.ANGLE, 2, s -> s.spring().pitchAngle()),
+          of("rate", "rate R", Dimension.RATE, 4, CompressionState::rate),
+          of("mass", "mass", Dimension.MASS, 3, CompressionState::mass),
+          length("wire_length", "wire length", 1, CompressionState::wireLength),
+          number("cost_index", "cost proxy", 2, s -> Cost.of(s).total()),
+          of(
+              "surge_frequency",
+              "surge frequency",
+              Dimension.FREQUENCY,
+              0,
+              s -> s.spring().surgeFrequency()),
+          of(
+              "tensile_strength",
+              "tensile strength Rm",
+              Dimension.STRESS,
+              0,
+              s -> s.wire().tensileStrength()),
+          of("shear_modulus", "shear modulus G", Dimension.STRESS, 0, s -> s.wire().shearModulus()),
+          of(
+              "elastic_modulus",
+              "elastic modulus E",
+              Dimension.STRESS,
+              0,
+              s -> s.wire().elasticModulus()),
+          number(
+              "stress_correction", "stress correction K", 4, CompressionState::correctionFactor));
+
+  /** What is known at each load. */
+  static final List<Quantity<LoadState>> LOAD =
+      List.of(
+          new Quantity<>("length", "length", Dimension.LENGTH, 2, LoadState::length),
+          new Quantity<>("force", "force", Dimension.FORCE, 2, LoadState::force),
+          new Quantity<>("deflection", "deflection", Dimension.LENGTH, 2, LoadState::deflection),
+          new Quantity<>(
+              "shear_stress", "uncorrected stress", Dimension.STRESS, 1, LoadState::shearStress),
+          new Quantity<>(
+              "corrected_shear_stress",
+              "corrected stress",
+              Dimension.STRESS,
+              1,
+              LoadState::correctedShearStress));
+
+  private CompressionQuantities() {}
+
+  private static Quantity<CompressionState> of(
+      String stem,
+      String label,
+      Dimension dimension,
+      int decimals,
+      ToDoubleFunction<CompressionState> value) {
+    return new Quantity<>(stem, label, dimension, decimals, value);
+  }
+
+  private static Quantity<CompressionState> length(
+      String stem, String label, int decimals, ToDoubleFunction<CompressionState> value) {
+    return of(stem, label, Dimension.LENGTH, decimals, value);
+  }
+
+  private static Quantity<CompressionState> number(
+      String stem, String label, int decimals, ToDoubleFunction<CompressionState> value) {
+    return of(stem, label, Dimension.NUMBER, decimals, value);
+  }
+
+  /** One of {@link #SPRING} in metric text, by the stem of its key. */
+  static String text(String stem, CompressionState state) {
+    return SPRING.stream()
+        .filter(quantity -> quantity.stem().equals(stem))
+        .findFirst()
+        .orElseThrow()
+        .text(state, OutputUnits.METRIC);
+  }
+
+  /** The id under which a candidate is picked: material, series, size, ends, coils. */
+  static String id(Candidate<CompressionState> candidate) {
+    CompressionState state = candidate.state();
+    String series = state.wire().size().series().map(known -> known.id() + "/").orElse("");
+    return state.wire().grade().id()
+        + "/"
+        + series
+        + state.wire().size().label()
+        + "/"
+        + state.endForm()
+        + "/"
+        + Numbers.brief(state.coils(), 6);
+  }
+}

@@ -1,0 +1,36 @@
+package coilwright.report;
+
+import java.math.BigDecimal;
+import java.math.RoundingMode;
+
+/** Numbers as text writes them: a decimal point, no grouping, the same on every machine. */
+final class Numbers {
+
+  private Numbers() {}
+
+  /** With a fixed count of decimals; "inf" for infinity, "-" for no number. */
+  static String fixed(double value, int decimals) {
+    if (Double.isNaN(value)) {
+      return "-";
+    }
+    if (Double.isInfinite(value)) {
+      return value > 0 ? "inf" : "-inf";
+    }
+    return BigDecimal.valueOf(value).setScale(decimals, RoundingMode.HALF_UP).toPlainString();
+  }
+
+  /** With at most a count of decimals, trailing zeros dropped. */
+  static String brief(double value, int decimals) {
+    String fixed = fixed(value, decimals);
+    if (fixed.indexOf('.') < 0) {
+      return fixed;
+    }
+    String cut = fixed.replaceAll("0+$", "");
+    return cut.endsWith(".") ? cut.substring(0, cut.length() - 1) : cut;
+  }
+
+  /** A share in per cent: "21.3 %". */
+  static String percent(double share, int decimals) {
+    return fixed(100 * share, decimals) + " %";
+  }
+}

@@ -1,0 +1,64 @@
+package coilwright.report;
+
+import coilwright.limit.CoilSet;
+import coilwright.search.Conflict;
+import java.util.ArrayList;
+import java.util.List;
+
+/** Conflicts in plain words. */
+final class Reasons {
+
+  private Reasons() {}
+
+  /** "1.40 mm music wire: stress at load needs at least 9.2 coils, solid length allows 7.5". */
+  static String of(Conflict conflict) {
+    List<String> parts = new ArrayList<>();
+    for (Conflict.Part part : conflict.parts()) {
+      parts.add(part.limit().text() + " " + coils(part.coils()));
+    }
+    return wire(conflict) + ": " + String.join(", ", parts);
+  }
+
+  private static String wire(Conflict conflict) {
+    return Wires.text(conflict.wire()) + ", " + conflict.endForm() + " ends";
+  }
+
+  private static String coils(CoilSet set) {
+    if (set.isEmpty()) {
+      return "holds at no coil count";
+    }
+    if (set.intervals().size() == 1) {
+      return single(set.intervals().get(0));
+    }
+    return "holds only at "
+        + String.join(" or ", set.intervals().stream().map(Reasons::range).toList())
+        + " coils";
+  }
+
+  private static String single(CoilSet.Interval interval) {
+    if (interval.from() == 0 && interval.to() == Double.POSITIVE_INFINITY) {
+      return "allows any count";
+    }
+    if (interval.to() == Double.POSITIVE_INFINITY) {
+      return "needs at least " + count(interval.from()) + " coils";
+    }
+    if (interval.from() == 0) {
+      return "allows at most " + count(interval.to()) + " coils";
+    }
+    return "holds only at " + range(interval) + " coils";
+  }
+
+  private static String range(CoilSet.Interval interval) {
+    if (interval.from() == interval.to()) {
+      return count(interval.from());
+    }
+    if (interval.to() == Double.POSITIVE_INFINITY) {
+      return count(interval.from()) + " and more";
+    }
+    return count(interval.from()) + " to " + count(interval.to());
+  }
+
+  private static String count(double coils) {
+    return Numbers.brief(coils, coils < 100 ? 2 : 0);
+  }
+}

@@ -1,0 +1,38 @@
+package coilwright.report;
+
+import coilwright.problem.Problem;
+import coilwright.problem.RankBy;
+import coilwright.search.Answer;
+import coilwright.search.Candidate;
+import coilwright.search.WireChoice;
+import coilwright.spring.CompressionState;
+import java.util.List;
+
+/**
+ * What a shortlist shows.
+ *
+ * @param problem the problem
+ * @param choice the wires it offers
+ * @param answer what the search found
+ * @param rankedBy the order
+ * @param everyCount whether every feasible coil count is listed, or the best of each wire
+ * @param shown the candidates listed, best first
+ */
+public record Shortlist(
+    Problem problem,
+    WireChoice choice,
+    Answer<CompressionState> answer,
+    RankBy rankedBy,
+    boolean everyCount,
+    List<Candidate<CompressionState>> shown) {
+
+  /** Copies the list. */
+  public Shortlist {
+    shown = List.copyOf(shown);
+  }
+
+  /** Ids of the grades tried, in order. */
+  List<String> materials() {
+    return choice.wires().stream().map(wire -> wire.grade().id()).distinct().toList();
+  }
+}

@@ -1,0 +1,39 @@
+package coilwright.search;
+
+import coilwright.limit.CoilSet;
+import coilwright.material.Wire;
+import coilwright.problem.LimitName;
+import java.util.List;
+
+/**
+ * Why a wire has no candidate: limits that cannot hold together, each with the coil counts it
+ * leaves.
+ *
+ * @param wire the wire
+ * @param endForm how the ends would be formed
+ * @param parts the limits, in the order of their names
+ */
+public record Conflict(Wire wire, String endForm, List<Part> parts) {
+
+  /** Copies the list. */
+  public Conflict {
+    parts = List.copyOf(parts);
+  }
+
+  /**
+   * One limit of a conflict.
+   *
+   * @param limit its name
+   * @param coils the coil counts it leaves, unrounded
+   */
+  public record Part(LimitName limit, CoilSet coils) {}
+
+  /** How far apart the limits are, in coils; zero where it is not two counts that are apart. */
+  public double gap() {
+    if (parts.size() != 2) {
+      return 0;
+    }
+    double distance = parts.get(0).coils().distanceTo(parts.get(1).coils());
+    return distance < Double.POSITIVE_INFINITY ? distance : 0;
+  }
+}

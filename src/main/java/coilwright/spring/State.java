@@ -1,0 +1,25 @@
+package coilwright.spring;
+
+import coilwright.material.Wire;
+
+/** Every number of one spring at all its loads, whatever its kind. */
+public interface State {
+
+  /** The wire it is made of. */
+  Wire wire();
+
+  /** How its ends are formed, as it stands in ids and output: an end type or a hook. */
+  String endForm();
+
+  /** The coil count that varies along its family: active coils, or body coils [-]. */
+  double coils();
+
+  /** Whether its ends are ground. */
+  boolean ground();
+
+  /** Mass [kg]. */
+  double mass();
+
+  /** Developed wire length [mm]. */
+  double wireLength();
+}
