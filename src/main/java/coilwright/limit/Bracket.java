@@ -43,7 +43,7 @@ final class Bracket<S extends State> {
     double high = scale(to);
     double atLow = excess(from);
     double atHigh = excess(to);
-    if (!(atLow * atHigh < 0)) {
+    if (!(high - low > ACCURACY) || !(atLow * atHigh < 0)) {
       return Math.abs(atLow) < Math.abs(atHigh) ? from : to;
     }
     return coils(

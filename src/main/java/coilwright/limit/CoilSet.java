@@ -57,7 +57,9 @@ public record CoilSet(List<Interval> intervals) {
 
   /** Whether it holds every coil count. */
   public boolean isAll() {
-    return equals(ALL);
+    return intervals.size() == 1
+        && intervals.get(0).from() == 0
+        && intervals.get(0).to() == Double.POSITIVE_INFINITY;
   }
 
   /** The least coil count [-]; positive infinity for the empty set. */
@@ -77,7 +79,13 @@ public record CoilSet(List<Interval> intervals) {
    * @return their intersection
    */
   public CoilSet intersect(CoilSet other) {
-    List<Interval> shared = new ArrayList<>();
+    if (isAll() || isEmpty()) {
+      return isAll() ? other : this;
+    }
+    if (other.isAll() || other.isEmpty()) {
+      return other.isAll() ? this : other;
+    }
+    List<Interval> shared = new ArrayList<>(1);
     for (Interval mine : intervals) {
       for (Interval theirs : other.intervals) {
         double from = Math.max(mine.from(), theirs.from());
@@ -97,7 +105,7 @@ public record CoilSet(List<Interval> intervals) {
    * @return the wider set
    */
   public CoilSet widen(DoubleUnaryOperator play) {
-    List<Interval> wider = new ArrayList<>();
+    List<Interval> wider = new ArrayList<>(1);
     for (Interval interval : intervals) {
       double from = lower(interval.from(), play);
       double to = upper(interval.to(), play);

@@ -22,23 +22,51 @@ public final class Reach {
    * @return the set; an end that reaches the end of the family's range is open
    */
   public static <S extends State> CoilSet of(Limit<S> limit, Trail<S> trail) {
+    return within(limit, trail, trail.fewestCoils(), trail.mostCoils());
+  }
+
+  /**
+   * The coil counts of unrounded springs that hold a limit, without looking for a bound that does not
+   * matter: where the limit has a single bound and holds at the near end of a range, it holds
+   * throughout the range, and its bound is taken for open.
+   *
+   * @param limit the limit
+   * @param trail the family, with the states computed so far
+   * @param lower lower end of the range that matters [-]
+   * @param upper upper end of the range that matters [-], below the lower end or above it
+   * @param <S> the state of the kind of spring
+   * @return the set; {@link CoilSet#ALL} where its bound does not matter
+   */
+  public static <S extends State> CoilSet within(
+      Limit<S> limit, Trail<S> trail, double lower, double upper) {
     double[] cuts = cuts(limit, trail);
-    List<CoilSet.Interval> held = new ArrayList<>(1);
-    boolean before = holds(limit, trail, cuts[0]);
+    boolean[] held = new boolean[cuts.length];
+    int changes = 0;
+    for (int i = 0; i < cuts.length; i++) {
+      held[i] = holds(limit, trail, cuts[i]);
+      changes += i > 0 && held[i] != held[i - 1] ? 1 : 0;
+    }
+    if (changes == 1 && holds(limit, trail, held[0] ? upper : lower)) {
+      return CoilSet.ALL;
+    }
+    return changes == 0 ? held[0] ? CoilSet.ALL : CoilSet.EMPTY : union(limit, trail, cuts, held);
+  }
+
+  private static <S extends State> CoilSet union(
+      Limit<S> limit, Trail<S> trail, double[] cuts, boolean[] held) {
+    List<CoilSet.Interval> intervals = new ArrayList<>(1);
     double from = 0;
     for (int i = 1; i < cuts.length; i++) {
-      boolean after = holds(limit, trail, cuts[i]);
-      if (before && !after) {
-        held.add(new CoilSet.Interval(from, root(limit, trail, cuts[i - 1], cuts[i])));
-      } else if (!before && after) {
+      if (held[i - 1] && !held[i]) {
+        intervals.add(new CoilSet.Interval(from, root(limit, trail, cuts[i - 1], cuts[i])));
+      } else if (!held[i - 1] && held[i]) {
         from = root(limit, trail, cuts[i - 1], cuts[i]);
       }
-      before = after;
     }
-    if (before) {
-      held.add(new CoilSet.Interval(from, Double.POSITIVE_INFINITY));
+    if (held[cuts.length - 1]) {
+      intervals.add(new CoilSet.Interval(from, Double.POSITIVE_INFINITY));
     }
-    return new CoilSet(held);
+    return new CoilSet(intervals);
   }
 
   /** The ends of the family and the turns between them, rising. */

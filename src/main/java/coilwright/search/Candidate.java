@@ -46,7 +46,12 @@ public record Candidate<S extends State>(S state, List<Finding> findings) {
 
   /** Whether it holds every limit. */
   public boolean holds() {
-    return findings.stream().allMatch(Finding::holds);
+    for (Finding finding : findings) {
+      if (!finding.holds()) {
+        return false;
+      }
+    }
+    return true;
   }
 
   /** The smallest margin over the stress checks [-]; empty where no stress is judged. */

@@ -11,7 +11,9 @@ import java.util.List;
 import java.util.Map;
 
 /**
- * What each limit leaves of one family, by name: a name stands for all its bounds.
+ * What each limit leaves of one family, by name: a name stands for all its bounds, and a name that
+ * leaves everything is left out. A bound that two other limits outdo on the same side is not looked for:
+ * it can neither decide with the others nor once one of them is dropped.
  *
  * @param exact the coil counts of unrounded springs that hold the limit
  * @param practical the counts at which a rounded spring may hold it: never fewer
@@ -30,9 +32,14 @@ record Limits(Map<LimitName, CoilSet> exact, Map<LimitName, CoilSet> practical) 
   static <S extends State> Limits of(List<Limit<S>> limits, Trail<S> trail, CoilStep step) {
     Map<LimitName, CoilSet> exact = new EnumMap<>(LimitName.class);
     Map<LimitName, CoilSet> practical = new EnumMap<>(LimitName.class);
+    Window window = new Window(trail.fewestCoils(), trail.mostCoils());
     for (Limit<S> limit : limits) {
-      if (!limit.onlyAfterRounding()) {
-        CoilSet set = Reach.of(limit, trail);
+      CoilSet set =
+          limit.onlyAfterRounding()
+              ? CoilSet.ALL
+              : Reach.within(limit, trail, window.lower(), window.upper());
+      if (!set.isAll()) {
+        window.narrow(limit.name(), set);
         exact.merge(limit.name(), set, CoilSet::intersect);
         practical.merge(limit.name(), widened(limit, set, trail, step), CoilSet::intersect);
       }
@@ -42,15 +49,22 @@ record Limits(Map<LimitName, CoilSet> exact, Map<LimitName, CoilSet> practical) 
 
   /** What all names leave together. */
   static CoilSet together(Map<LimitName, CoilSet> sets) {
-    return sets.values().stream().reduce(CoilSet.ALL, CoilSet::intersect);
+    CoilSet shared = CoilSet.ALL;
+    for (CoilSet set : sets.values()) {
+      shared = shared.intersect(set);
+    }
+    return shared;
   }
 
   /** What all names but one leave together. */
   static CoilSet without(Map<LimitName, CoilSet> sets, LimitName left) {
-    return sets.entrySet().stream()
-        .filter(entry -> entry.getKey() != left)
-        .map(Map.Entry::getValue)
-        .reduce(CoilSet.ALL, CoilSet::intersect);
+    CoilSet shared = CoilSet.ALL;
+    for (Map.Entry<LimitName, CoilSet> entry : sets.entrySet()) {
+      if (entry.getKey() != left) {
+        shared = shared.intersect(entry.getValue());
+      }
+    }
+    return shared;
   }
 
   /**

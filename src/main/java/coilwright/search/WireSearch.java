@@ -1,19 +1,15 @@
 package coilwright.search;
 
 import coilwright.limit.CoilSet;
-import coilwright.limit.Finding;
 import coilwright.limit.Limit;
 import coilwright.limit.Trail;
 import coilwright.problem.LimitName;
 import coilwright.spring.Family;
 import coilwright.spring.State;
 import java.util.ArrayList;
-import java.util.EnumMap;
 import java.util.EnumSet;
 import java.util.List;
-import java.util.Map;
 import java.util.Optional;
-import java.util.Set;
 
 /**
  * Searches one wire: what every limit leaves of its family, the practical counts in what they leave
@@ -38,8 +34,7 @@ final class WireSearch<S extends State> {
     if (!candidates.isEmpty()) {
       return new Outcome<>(candidates, Optional.empty(), EnumSet.noneOf(LimitName.class));
     }
-    Conflict conflict = conflict();
-    return new Outcome<>(List.of(), Optional.of(conflict), ruledOutBy(conflict));
+    return new Rejection<>(this).outcome();
   }
 
   private List<Candidate<S>> candidates() {
@@ -50,102 +45,47 @@ final class WireSearch<S extends State> {
     return held;
   }
 
-  private CoilSet bounded(CoilSet set) {
+  /** The part of a set in which the family has springs. */
+  CoilSet bounded(CoilSet set) {
     return set.intersect(CoilSet.of(0, family.mostCoils()));
   }
 
-  private Optional<Candidate<S>> judged(double coils) {
+  /** The rounded spring of a coil count, held to every limit; empty where rounding leaves none. */
+  Optional<Candidate<S>> judged(double coils) {
     return family.rounded(coils).map(state -> Candidate.judge(state, limits));
   }
 
-  private Conflict conflict() {
-    List<Conflict.Part> parts = new Explanation(left.exact()).parts();
-    if (parts.isEmpty()) {
-      parts = new Explanation(afterRounding()).parts();
+  /** Whether the rounded spring of a coil count holds every limit but one. */
+  boolean holdsBut(LimitName dropped, double coils) {
+    Optional<S> state = family.rounded(coils);
+    if (state.isEmpty()) {
+      return false;
     }
-    return new Conflict(family.wire(), family.endForm(), parts);
-  }
-
-  /**
-   * What the limits leave where unrounded springs exist but no practical one: inside the range that
-   * they leave together only practical counts are left, and of these, to each limit, those at which
-   * the rounded spring holds it.
-   */
-  private Map<LimitName, CoilSet> afterRounding() {
-    CoilSet range = bounded(Limits.together(left.exact()));
-    CoilSet practical = step.around(range.least(), range.greatest());
-    Map<LimitName, CoilSet> sets = new EnumMap<>(left.exact());
-    sets.put(LimitName.COIL_STEP, practical);
-    for (double coils : step.in(range)) {
-      judged(coils)
-          .ifPresentOrElse(
-              candidate -> candidate.findings().forEach(finding -> takeOut(sets, finding, coils)),
-              () -> sets.merge(LimitName.COIL_STEP, without(coils), CoilSet::intersect));
-    }
-    return sets;
-  }
-
-  private static void takeOut(Map<LimitName, CoilSet> sets, Finding finding, double coils) {
-    if (!finding.holds()) {
-      LimitName name = finding.check().limit();
-      CoilSet before = sets.getOrDefault(name, CoilSet.ALL);
-      sets.put(name, before.intersect(without(coils)));
-    }
-  }
-
-  /** Every count but one. */
-  private static CoilSet without(double coils) {
-    return new CoilSet(
-        List.of(
-            new CoilSet.Interval(0, Math.nextDown(coils)),
-            new CoilSet.Interval(Math.nextUp(coils), Double.POSITIVE_INFINITY)));
-  }
-
-  /**
-   * The limits whose removal alone lets the wire through; where there is none, those in conflict.
-   */
-  private Set<LimitName> ruledOutBy(Conflict conflict) {
-    Set<LimitName> decisive = EnumSet.noneOf(LimitName.class);
-    for (LimitName name : left.exact().keySet()) {
-      if (name.removable() && holdsWithout(name)) {
-        decisive.add(name);
+    for (Limit<S> limit : limits) {
+      if (limit.name() != dropped && !limit.judge(state.get()).holds()) {
+        return false;
       }
     }
-    if (holdsBetweenSteps()) {
-      decisive.add(LimitName.COIL_STEP);
-    }
-    if (decisive.isEmpty()) {
-      conflict.parts().forEach(part -> decisive.add(part.limit()));
-    }
-    return decisive;
+    return true;
   }
 
-  private boolean holdsWithout(LimitName name) {
-    CoilSet others = bounded(Limits.without(left.practical(), name));
-    return step.in(others).stream().anyMatch(coils -> holdsAt(coils, name));
+  /** What each limit leaves. */
+  Limits left() {
+    return left;
   }
 
-  private boolean holdsAt(double coils, LimitName ignored) {
-    return judged(coils)
-        .filter(
-            candidate ->
-                candidate.findings().stream()
-                    .allMatch(finding -> finding.holds() || finding.check().limit() == ignored))
-        .isPresent();
+  /** The practical counts. */
+  CoilStep step() {
+    return step;
   }
 
-  /**
-   * Whether some count that is no multiple of the step would do: the ends and middles are tried.
-   */
-  private boolean holdsBetweenSteps() {
-    for (CoilSet.Interval range : bounded(Limits.together(left.exact())).intervals()) {
-      for (double share : new double[] {0.5, 0, 1, 0.25, 0.75}) {
-        double coils = range.from() + share * (range.to() - range.from());
-        if (coils > 0 && judged(coils).filter(Candidate::holds).isPresent()) {
-          return true;
-        }
-      }
-    }
-    return false;
+  /** The limits. */
+  List<Limit<S>> limits() {
+    return limits;
+  }
+
+  /** The family searched. */
+  Family<S> family() {
+    return family;
   }
 }
