@@ -26,8 +26,8 @@ public final class Reach {
   }
 
   /**
-   * The coil counts of unrounded springs that hold a limit, without looking for a bound that does not
-   * matter: where the limit has a single bound and holds at the near end of a range, it holds
+   * The coil counts of unrounded springs that hold a limit, without looking for a bound that does
+   * not matter: where the limit has a single bound and holds at the near end of a range, it holds
    * throughout the range, and its bound is taken for open.
    *
    * @param limit the limit

@@ -13,10 +13,14 @@ import coilwright.spring.CompressionState;
 import coilwright.unit.Dimension;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Optional;
 
 /** What would have to change for a wire without a candidate to have one. */
 final class Remedies {
+
+  private static final int MOST_TRIED = 100;
+
+  /** A coil count at a bound fails it by no more than the accuracy of the count. */
+  private static final double AT_THE_BOUND = 1e-6;
 
   private final CompressionFamily family;
   private final List<Limit<CompressionState>> limits;
@@ -30,71 +34,72 @@ final class Remedies {
     this.limits = CompressionSearch.limits(problem);
   }
 
-  /**
-   * One line for each way out: what the failing limit would have to allow, and at how many coils.
-   */
+  /** One line for each way out: a coil count, and every limit that would have to give way there. */
   static List<String> of(Problem problem, Conflict conflict) {
     Remedies remedies = new Remedies(problem, conflict);
     List<Conflict.Part> parts = conflict.parts();
     List<String> lines = new ArrayList<>();
     if (parts.size() == 1) {
-      remedies.add(lines, parts.get(0).limit(), remedies.closest(parts.get(0).limit()));
+      remedies.add(lines, remedies.closest(parts.get(0).limit()));
     } else if (parts.size() == 2) {
       Nearest nearest = Nearest.of(parts.get(0).coils(), parts.get(1).coils());
-      remedies.add(lines, parts.get(1).limit(), nearest.inFirst());
-      remedies.add(lines, parts.get(0).limit(), nearest.inSecond());
+      remedies.add(lines, nearest.inFirst());
+      remedies.add(lines, nearest.inSecond());
     }
     return lines;
   }
 
-  private void add(List<String> lines, LimitName name, double coils) {
-    if (coils >= family.fewestCoils() && coils <= family.mostCoils()) {
-      worst(name, coils).map(finding -> line(finding, coils)).ifPresent(lines::add);
+  /** A count at which a physical fact fails is no way out. */
+  private void add(List<String> lines, double coils) {
+    if (!(coils >= family.fewestCoils() && coils <= family.mostCoils())) {
+      return;
+    }
+    List<Finding> failing = failing(coils);
+    if (failing.stream().allMatch(finding -> finding.check().limit().removable())) {
+      List<String> needs = failing.stream().map(Remedies::need).toList();
+      lines.add("at " + Numbers.brief(coils, 2) + " coils: " + String.join(", ", needs));
     }
   }
 
-  /** The finding of a name that fails most at a coil count. */
-  private Optional<Finding> worst(LimitName name, double coils) {
+  private List<Finding> failing(double coils) {
     CompressionState state = family.at(coils);
     return limits.stream()
-        .filter(limit -> limit.name() == name)
         .map(limit -> limit.judge(state))
-        .filter(finding -> !finding.holds())
-        .min((a, b) -> Double.compare(a.margin(), b.margin()));
+        .filter(finding -> finding.margin() < -AT_THE_BOUND)
+        .toList();
+  }
+
+  /** "stress at load 975.1 MPa (at most 873 MPa)". */
+  private static String need(Finding finding) {
+    Dimension dimension = finding.check().dimension();
+    String most = finding.check().side() == Side.MAX ? "at most " : "at least ";
+    return finding.check().limit().text()
+        + " "
+        + number(dimension, finding.value())
+        + " ("
+        + most
+        + number(dimension, finding.bound())
+        + ")";
+  }
+
+  private static String number(Dimension dimension, double value) {
+    String unit = OutputUnits.METRIC.symbol(dimension);
+    String number = Numbers.brief(OutputUnits.METRIC.convert(dimension, value), 2);
+    return unit.isEmpty() ? number : number + " " + unit;
   }
 
   /** Where a limit that fails everywhere fails least, among whole coil counts. */
   private double closest(LimitName name) {
     double best = Double.NaN;
     double margin = Double.NEGATIVE_INFINITY;
-    for (double coils = 1; coils <= Math.min(100, family.mostCoils()); coils++) {
-      Optional<Finding> finding = worst(name, coils);
-      if (finding.isPresent() && finding.get().margin() > margin) {
-        margin = finding.get().margin();
-        best = coils;
+    for (double coils = 1; coils <= Math.min(MOST_TRIED, family.mostCoils()); coils++) {
+      for (Finding finding : failing(coils)) {
+        if (finding.check().limit() == name && finding.margin() > margin) {
+          margin = finding.margin();
+          best = coils;
+        }
       }
     }
     return best;
-  }
-
-  private static String line(Finding finding, double coils) {
-    Dimension dimension = finding.check().dimension();
-    String unit = OutputUnits.METRIC.symbol(dimension);
-    boolean most = finding.check().side() == Side.MAX;
-    return "it would do if "
-        + finding.check().limit().text()
-        + (most ? " allowed " : " needed only ")
-        + number(dimension, finding.value())
-        + (unit.isEmpty() ? "" : " " + unit)
-        + (most ? " (now at most " : " (now at least ")
-        + number(dimension, finding.bound())
-        + (unit.isEmpty() ? "" : " " + unit)
-        + "), at "
-        + Numbers.brief(coils, 2)
-        + " coils";
-  }
-
-  private static String number(Dimension dimension, double value) {
-    return Numbers.brief(OutputUnits.METRIC.convert(dimension, value), 2);
   }
 }

@@ -53,25 +53,14 @@ public final class ShortlistText {
   private void list() {
     int wires = shortlist.answer().wires();
     int fit = shortlist.answer().feasible().size();
-    line(
-        fit
-            + " of "
-            + wires
-            + (wires == 1 ? " wire tried can" : " wires tried can")
-            + " do it, in "
-            + shortlist.answer().candidates()
-            + " coil counts. "
-            + (shortlist.everyCount() ? "Every coil count" : "The best of each wire")
-            + ", "
-            + order()
-            + ":");
+    line(fit + " of " + wires + " wires tried can do it, at " + counts() + " in all. " + listed());
     line("");
-    TextTable table = new TextTable("rllrrrrrrrrrrl");
+    TextTable table = new TextTable("rlllrrrrrrrrrl");
     table.row(
         "#",
         "material",
         "wire",
-        "d",
+        "ends",
         "n",
         "D",
         "De",
@@ -82,14 +71,14 @@ public final class ShortlistText {
         "cost",
         "stress",
         "limited by");
-    table.row("", "", "ends", "mm", "", "mm", "mm", "mm", "mm", "", "g", "", "margin", "");
+    table.row("", "", "", "", "", "mm", "mm", "mm", "mm", "", "g", "", "margin", "");
     for (int i = 0; i < shortlist.shown().size(); i++) {
       row(table, i + 1, shortlist.shown().get(i));
     }
     text.append(table.text("  "));
-    int hidden = shown() - shortlist.shown().size();
+    int hidden = listable() - shortlist.shown().size();
     if (hidden > 0) {
-      line("  " + hidden + " more: --top " + shown() + " shows all of these");
+      line("  " + hidden + " more: --top " + listable() + " shows them");
     }
     line("");
     line(
@@ -98,7 +87,19 @@ public final class ShortlistText {
     line("");
   }
 
-  private int shown() {
+  private String counts() {
+    int counts = shortlist.answer().candidates();
+    return counts + (counts == 1 ? " coil count" : " coil counts");
+  }
+
+  private String listed() {
+    return (shortlist.everyCount() ? "Every coil count" : "The best of each wire")
+        + ", "
+        + order()
+        + ":";
+  }
+
+  private int listable() {
     return shortlist.everyCount()
         ? shortlist.answer().candidates()
         : shortlist.answer().feasible().size();
@@ -119,8 +120,8 @@ public final class ShortlistText {
     table.row(
         Integer.toString(rank),
         spring.wire().grade().id() + (memory ? " (memory)" : ""),
-        Wires.size(spring.wire()) + " " + spring.ends().id(),
-        Numbers.fixed(spring.wireDiameter(), 3),
+        Wires.sizeWithDiameter(spring.wire()),
+        spring.ends().id(),
         Numbers.brief(spring.activeCoils(), 3),
         Numbers.fixed(spring.meanDiameter(), 2),
         Numbers.fixed(spring.outsideDiameter(), 2),
@@ -140,11 +141,8 @@ public final class ShortlistText {
   }
 
   private void nothing() {
-    line(
-        "None of "
-            + shortlist.answer().wires()
-            + (shortlist.answer().wires() == 1 ? " wire" : " wires")
-            + " tried can do it.");
+    int wires = shortlist.answer().wires();
+    line("None of the " + wires + (wires == 1 ? " wire" : " wires") + " tried can do it.");
     line("");
     List<Conflict> nearest =
         shortlist.answer().conflicts().stream()
@@ -154,7 +152,7 @@ public final class ShortlistText {
     if (nearest.isEmpty()) {
       return;
     }
-    line("Nearest");
+    line("Nearest, and what would have to change");
     for (Conflict conflict : nearest) {
       line("  " + Reasons.of(conflict));
       for (String remedy : Remedies.of(shortlist.problem(), conflict)) {
@@ -169,16 +167,12 @@ public final class ShortlistText {
     if (counts.isEmpty()) {
       return;
     }
-    line(
-        "What rules the other wires out (dropping it alone would let them through, or it is in conflict)");
+    line("What rules wires out, by how many (each under every limit that alone keeps it out,");
+    line("or else under the limits that cannot hold together)");
     TextTable table = new TextTable("rl");
     counts.entrySet().stream()
         .sorted(Map.Entry.<LimitName, Integer>comparingByValue().reversed())
-        .forEach(
-            entry ->
-                table.row(
-                    Integer.toString(entry.getValue()),
-                    (entry.getValue() == 1 ? "wire   " : "wires  ") + entry.getKey().text()));
+        .forEach(entry -> table.row(Integer.toString(entry.getValue()), entry.getKey().text()));
     text.append(table.text("  "));
     line("");
   }

@@ -147,14 +147,7 @@ final class Understood {
                 + " %"
             : "clash allowance none");
     table.row("limits", String.join(", ", words));
-    table.row(
-        "stress",
-        "at load "
-            + share(limits.stressAtLoad())
-            + ", at solid "
-            + share(limits.stressAtSolid())
-            + ", corrected by "
-            + limits.stressCorrection().author());
+    table.row("stress", stress(limits));
     table.row("buckling", buckling(limits.buckling()));
     if (limits.minSurgeFrequency().isPresent()) {
       table.row(
@@ -172,6 +165,16 @@ final class Understood {
       return "from " + min;
     }
     return min.isEmpty() ? "up to " + max : min + " to " + max;
+  }
+
+  private static String stress(DesignLimits limits) {
+    String load = share(limits.stressAtLoad());
+    String solid = share(limits.stressAtSolid());
+    String shares =
+        load.equals(solid)
+            ? "at load and at solid " + load
+            : "at load " + load + ", at solid " + solid;
+    return shares + ", corrected by " + limits.stressCorrection().author();
   }
 
   private static String share(StressLimit limit) {

@@ -42,17 +42,24 @@ final class Warnings {
 
   private static void shared(
       List<String> warnings, Problem problem, List<Candidate<CompressionState>> springs) {
-    for (Candidate<CompressionState> spring : springs) {
-      if (spring.state().wire().evidence() == Evidence.MEMORY) {
-        warnings.add(
-            CompressionQuantities.id(spring)
-                + ": strength, moduli or size are from memory; confirm them against the standard");
-      }
-      if (buckles(problem, spring.state())) {
-        warnings.add(
-            CompressionQuantities.id(spring)
-                + ": would buckle without the bore or rod that guides it; friction changes its loads");
-      }
+    name(
+        warnings,
+        springs.stream()
+            .filter(spring -> spring.state().wire().evidence() == Evidence.MEMORY)
+            .toList(),
+        "strength, moduli or size from memory, to be confirmed against the standard");
+    name(
+        warnings,
+        springs.stream().filter(spring -> buckles(problem, spring.state())).toList(),
+        "would buckle without the bore or rod that guides it; rubbing there changes its loads");
+  }
+
+  /** One warning for all the springs it concerns. */
+  private static void name(
+      List<String> warnings, List<Candidate<CompressionState>> springs, String what) {
+    if (!springs.isEmpty()) {
+      List<String> ids = springs.stream().map(CompressionQuantities::id).toList();
+      warnings.add(what + ": " + String.join(", ", ids));
     }
   }
 

@@ -17,6 +17,12 @@ final class Wires {
         .orElse(label);
   }
 
+  /** The size with its diameter, where the size does not say it: "no. 24 = 1.397 mm". */
+  static String sizeWithDiameter(Wire wire) {
+    String size = size(wire);
+    return size.endsWith(" mm") ? size : size + " = " + Numbers.fixed(wire.diameter(), 3) + " mm";
+  }
+
   /** Size and material: "1.40 mm music-wire". */
   static String text(Wire wire) {
     return size(wire) + " " + wire.grade().id();

@@ -12,8 +12,8 @@ import java.util.Map;
 
 /**
  * What each limit leaves of one family, by name: a name stands for all its bounds, and a name that
- * leaves everything is left out. A bound that two other limits outdo on the same side is not looked for:
- * it can neither decide with the others nor once one of them is dropped.
+ * leaves everything is left out. A bound that two other limits outdo on the same side is not looked
+ * for: it can neither decide with the others nor once one of them is dropped.
  *
  * @param exact the coil counts of unrounded springs that hold the limit
  * @param practical the counts at which a rounded spring may hold it: never fewer

@@ -111,9 +111,7 @@ final class Rejection<S extends State> {
     return false;
   }
 
-  /**
-   * Whether some count that is no multiple of the step would do: ends and middles are tried.
-   */
+  /** Whether some count that is no multiple of the step would do: ends and middles are tried. */
   private boolean holdsBetweenSteps() {
     CoilSet ranges = search.bounded(Limits.together(left.exact()));
     for (CoilSet.Interval range : ranges.intervals()) {

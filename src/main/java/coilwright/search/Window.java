@@ -5,8 +5,8 @@ import coilwright.problem.LimitName;
 
 /**
  * The range of coil counts that still matters while limits are asked one after another: it ends on
- * either side at the second tightest bound of two different limits, since with the tightest one dropped
- * that one decides.
+ * either side at the second tightest bound of two different limits, since with the tightest one
+ * dropped that one decides.
  */
 final class Window {
 
