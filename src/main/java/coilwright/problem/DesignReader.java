@@ -89,15 +89,17 @@ record DesignReader(MaterialIds ids, Section section) {
   private Optional<ProblemKey<Double>> only(List<ProblemKey<Double>> keys) {
     List<ProblemKey<Double>> given = keys.stream().filter(section::has).toList();
     String names = String.join(", ", keys.stream().map(ProblemKey::name).toList());
-    if (given.isEmpty()) {
+    if (given.isEmpty() && keys.stream().allMatch(section::lacks)) {
       section.spot(keys.get(0)).fault("missing", "must be given, or another of " + names);
-      return Optional.empty();
+    }
+    if (given.isEmpty()) {
+      section.spot().faults().again();
     }
     if (given.size() > 1) {
       section
           .spot(given.get(1))
           .fault("given beside " + given.get(0).name(), "must be only one of " + names);
     }
-    return Optional.of(given.get(0));
+    return given.stream().findFirst();
   }
 }

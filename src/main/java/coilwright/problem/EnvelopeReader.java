@@ -59,7 +59,7 @@ final class EnvelopeReader {
 
   private static void clearance(Section section) {
     boolean guided = section.has(EnvelopeKeys.BORE) || section.has(EnvelopeKeys.ROD);
-    if (guided && !section.has(EnvelopeKeys.CLEARANCE)) {
+    if (guided && section.lacks(EnvelopeKeys.CLEARANCE)) {
       section
           .spot(EnvelopeKeys.CLEARANCE)
           .fault("missing", "needed with bore or rod; its default is " + Later.WORDS);

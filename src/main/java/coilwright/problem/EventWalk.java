@@ -94,17 +94,17 @@ final class EventWalk {
     return new Node.Sequence(mark, items);
   }
 
-  /** Refuses an anchor or a tag, which is otherwise ignored, and an alias: then returns true. */
+  /** Reports an anchor or a tag, and goes on; reports an alias, and returns true. */
   private boolean refusesAlias(Spot spot) {
-    switch (firstSign()) {
-      case '&' -> spot.fault("an anchor (&)", "must be left out");
-      case '!' -> spot.fault("a tag (!)", "must be left out");
-      case '*' -> spot.fault("an alias (*)", "must be written out");
-      default -> {
-        // an ordinary value
-      }
+    int sign = firstSign();
+    if (sign == '&') {
+      spot.fault("an anchor (&)", "must be left out");
+    } else if (sign == '!') {
+      spot.fault("a tag (!)", "must be left out");
+    } else if (sign == '*') {
+      spot.fault("an alias (*)", "must be written out");
     }
-    return firstSign() == '*';
+    return sign == '*';
   }
 
   /** The first sign of the current token; blank where the token takes no room. */

@@ -17,6 +17,7 @@ final class Faults {
 
   private final PriorityQueue<Placed> first = new PriorityQueue<>(IN_FILE_ORDER.reversed());
   private long count;
+  private long again;
 
   /**
    * Adds a fault.
@@ -35,11 +36,17 @@ final class Faults {
   void clear() {
     first.clear();
     count = 0;
+    again = 0;
   }
 
-  /** How many faults have been added. */
+  /** Notes that a fault that was added earlier was met again. */
+  void again() {
+    again++;
+  }
+
+  /** How many faults have been added or met again: what rises while something faulty is read. */
   long count() {
-    return count;
+    return count + again;
   }
 
   /** Whether so many faults have been found that hints are no longer worth their time. */

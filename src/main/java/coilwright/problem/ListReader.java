@@ -36,9 +36,7 @@ final class ListReader<T> implements ValueReader<List<T>> {
     if (node instanceof Node.Sequence list) {
       return items(list, spot);
     }
-    if (!(node instanceof Node.Refused)) {
-      spot.fault(node.shown(), "must be " + accepted());
-    }
+    spot.refuse(node, accepted());
     return Optional.empty();
   }
 

@@ -22,16 +22,16 @@ record LoadEntry(Section section, LoadAsked asked) {
     OptionalDouble length = section.number(LoadKeys.LENGTH);
     OptionalDouble force = section.number(LoadKeys.FORCE);
     Optional<ToleranceAsked> tolerance = section.read(LoadKeys.TOLERANCE);
-    boolean hasLength = section.has(LoadKeys.LENGTH);
-    boolean hasForce = section.has(LoadKeys.FORCE);
-    if (!hasLength && !hasForce) {
+    boolean lacksLength = section.lacks(LoadKeys.LENGTH);
+    boolean lacksForce = section.lacks(LoadKeys.FORCE);
+    if (lacksLength && lacksForce) {
       section.spot().fault("neither length nor force", "must have " + wanted(purpose));
-    } else if (purpose == Purpose.SHORTLIST && !(hasLength && hasForce)) {
+    } else if (purpose == Purpose.SHORTLIST && (lacksLength || lacksForce)) {
       section
-          .spot(hasLength ? LoadKeys.FORCE : LoadKeys.LENGTH)
+          .spot(lacksForce ? LoadKeys.FORCE : LoadKeys.LENGTH)
           .fault("missing", "must be given; leaving it to shortlist is " + Later.WORDS);
     }
-    if (section.has(LoadKeys.TOLERANCE) && !hasForce) {
+    if (section.has(LoadKeys.TOLERANCE) && lacksForce) {
       section.spot(LoadKeys.TOLERANCE).fault("no force to go with it", "must stand with a force");
     }
     return new LoadEntry(section, new LoadAsked(length, force, resolved(tolerance, force)));

@@ -9,10 +9,11 @@ import java.util.OptionalDouble;
 /**
  * What a file says about the load line, as read.
  *
+ * @param loads the loads with their places
  * @param facts the facts, for the whole group of springs
  * @param required what one spring must do, where the facts fix the line
  */
-record LoadsRead(LoadFacts facts, Optional<Requirement> required) {
+record LoadsRead(List<LoadEntry> loads, LoadFacts facts, Optional<Requirement> required) {
 
   /**
    * Reads the loads and the other facts and reports those that contradict each other.
@@ -37,26 +38,45 @@ record LoadsRead(LoadFacts facts, Optional<Requirement> required) {
       LoadOrder.check(loads);
     }
     if (root.spot().faults().count() > before) {
-      return new LoadsRead(facts, Optional.empty());
+      return new LoadsRead(loads, facts, Optional.empty());
     }
-    return new LoadsRead(facts, fixed(root, loads, facts, purpose));
+    return new LoadsRead(loads, facts, fixed(root, loads, facts, purpose));
   }
 
   private static Optional<Requirement> fixed(
       Section root, List<LoadEntry> loads, LoadFacts facts, Purpose purpose) {
+    long before = root.spot().faults().count();
     Optional<FixedLine> fixed = FixedLine.by(loads, facts);
     if (fixed.isPresent()) {
       new Agreement(root, fixed.get()).check(loads, facts);
       return Optional.of(perSpring(fixed.get(), facts));
     }
     Agreement.belowFreeLength(loads, facts.freeLength());
-    if (purpose == Purpose.SHORTLIST) {
+    if (purpose == Purpose.SHORTLIST && root.spot().faults().count() == before) {
       root.spot(LoadKeys.LOADS)
           .fault(
               "one load does not fix the load line",
               "must be two loads, or one and rate or free_length");
     }
     return Optional.empty();
+  }
+
+  /**
+   * Reports lengths for which no force is asked and at which the spring to check carries nothing.
+   *
+   * @param design the spring
+   */
+  void checkAgainst(Design design) {
+    double reported =
+        required
+            .map(asked -> asked.line().freeLength())
+            .orElse(facts.freeLength().orElse(Double.POSITIVE_INFINITY));
+    List<LoadEntry> lengths =
+        loads.stream()
+            .filter(load -> load.section().lacks(LoadKeys.FORCE))
+            .filter(load -> load.asked().length().orElse(reported) < reported)
+            .toList();
+    Agreement.belowFreeLength(lengths, OptionalDouble.of(design.freeLength()));
   }
 
   private static Requirement perSpring(FixedLine fixed, LoadFacts facts) {

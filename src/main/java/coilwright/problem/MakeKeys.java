@@ -27,7 +27,7 @@ final class MakeKeys {
           "make.materials",
           Values.list(new TextReader("a grade id or all")),
           "the common grades of the supply whose data were seen",
-          "ids from coilwright materials or own_materials, or all",
+          "grade ids, own ones too, or all",
           "[music-wire]");
 
   static final ProblemKey<List<String>> EXCLUDE_MATERIALS =
@@ -95,16 +95,16 @@ final class MakeKeys {
       ProblemKey.of(
           "make.diameter_step",
           Values.quantity(Dimension.LENGTH, Range.FROM_ZERO),
-          "0.01 mm (inch: 0.0005 in), a tenth below 5 mm mean diameter",
-          "the mean diameter is rounded to this; 0 mm: not rounded",
+          "0.01 mm (inch: 0.0005 in), a tenth for mean diameters below 5 mm",
+          "step of the mean diameter; 0 mm: none",
           "0.01 mm");
 
   static final ProblemKey<Double> LENGTH_STEP =
       ProblemKey.of(
           "make.length_step",
           Values.quantity(Dimension.LENGTH, Range.FROM_ZERO),
-          "0.1 mm (inch: 0.005 in), a tenth below 5 mm mean diameter",
-          "the free length is rounded to this; 0 mm: not rounded",
+          "0.1 mm (inch: 0.005 in), a tenth for mean diameters below 5 mm",
+          "step of the free length; 0 mm: none",
           "0.1 mm");
 
   /** All of them. */

@@ -80,7 +80,7 @@ record MakeReader(MaterialIds ids, UnitSystem units) {
     if (!materials.isEmpty() && excluded.containsAll(materials)) {
       section
           .spot(MakeKeys.EXCLUDE_MATERIALS)
-          .fault("every grade that is named", "must leave one of make.materials");
+          .fault("excludes every grade that is named", "must leave one of make.materials");
     }
   }
 }

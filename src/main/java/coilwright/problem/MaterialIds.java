@@ -1,7 +1,6 @@
 package coilwright.problem;
 
 import coilwright.material.Catalogue;
-import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
@@ -42,6 +41,9 @@ final class MaterialIds {
           "en-10270-3-1.4401",
           "en-10270-3-1.4568");
 
+  /** How many ids a message lists; enough for every grade of the catalogue. */
+  private static final int SHOWN = 40;
+
   private final Set<String> known;
 
   /**
@@ -64,6 +66,16 @@ final class MaterialIds {
   }
 
   /**
+   * Whether an id is known.
+   *
+   * @param id the id
+   * @return true if it is
+   */
+  boolean knows(String id) {
+    return known.contains(id);
+  }
+
+  /**
    * Reports an id that is not known.
    *
    * @param id as typed
@@ -81,8 +93,7 @@ final class MaterialIds {
   }
 
   private String accepted() {
-    List<String> ids = new ArrayList<>(known);
-    List<String> first = ids.subList(0, Math.min(ids.size(), 30));
-    return "must be one of " + String.join(", ", first) + (ids.size() > 30 ? ", ..." : "");
+    List<String> first = known.stream().limit(SHOWN).toList();
+    return "must be one of " + String.join(", ", first) + (known.size() > SHOWN ? ", ..." : "");
   }
 }

@@ -10,9 +10,10 @@ import java.util.Optional;
  *
  * @param section the grade's block of keys
  * @param like the grade that what is left out is taken from, where there is one
- * @param ownStrength whether the file gives the strength
+ * @param taken what is taken from that grade and ends with its diameters, such as "strength"; empty
+ *     where nothing is
  */
-record OwnDiameters(Section section, Optional<WireGrade> like, boolean ownStrength) {
+record OwnDiameters(Section section, Optional<WireGrade> like, String taken) {
 
   /**
    * Reads the diameters.
@@ -41,11 +42,10 @@ record OwnDiameters(Section section, Optional<WireGrade> like, boolean ownStreng
 
   private void within(
       Section block, Optional<Double> min, Optional<Double> max, DiameterRange usual) {
-    if (ownStrength || like.isEmpty()) {
+    if (taken.isEmpty() || like.isEmpty()) {
       return;
     }
-    String instead =
-        " mm of " + like.get().id() + ", whose strength is taken; or give tensile_strength";
+    String instead = " mm of " + like.get().id() + ", whose " + taken + " is taken";
     if (min.isPresent() && !usual.contains(Math.min(min.get(), usual.max()))) {
       block
           .spot(MaterialKeys.DIAMETERS_MIN)

@@ -35,6 +35,7 @@ record OwnGrade(Section section, Optional<WireGrade> like, boolean alone, UnitSy
    * @return the grade, or empty where it is faulty
    */
   Optional<WireGrade> read(String id) {
+    long before = section.spot().faults().count();
     Optional<LawGiven<StrengthLaw>> strength = given(MaterialKeys.TENSILE_STRENGTH);
     Optional<LawGiven<ModulusLaw>> shear = given(MaterialKeys.SHEAR.whole());
     Optional<LawGiven<ModulusLaw>> elastic = given(MaterialKeys.ELASTIC.whole());
@@ -43,9 +44,13 @@ record OwnGrade(Section section, Optional<WireGrade> like, boolean alone, UnitSy
     Optional<Double> atLoad = given(MaterialKeys.STRESS_AT_LOAD);
     Optional<Double> atSolid = given(MaterialKeys.STRESS_AT_SOLID);
     Optional<DiameterRange> diameters =
-        new OwnDiameters(section, like, strength.isPresent())
+        new OwnDiameters(section, like, taken(strength, shear, elastic))
             .read(List.of(end(strength), end(shear), end(elastic)));
-    if (section.spot().faults().count() > 0 || diameters.isEmpty()) {
+    if (section.spot().faults().count() == before) {
+      stiffness(
+          law(shear, WireGrade::shearModulus), law(elastic, WireGrade::elasticModulus), diameters);
+    }
+    if (section.spot().faults().count() > before || !alone && like.isEmpty()) {
       return Optional.empty();
     }
     return Optional.of(
@@ -57,9 +62,9 @@ record OwnGrade(Section section, Optional<WireGrade> like, boolean alone, UnitSy
             Supply.ANY,
             true,
             like.map(WireGrade::allowableClass).orElse(AllowableClass.NON_FERROUS),
-            strength.map(LawGiven::law).orElseGet(() -> like.get().strength()),
-            shear.map(LawGiven::law).orElseGet(() -> like.get().shearModulus()),
-            elastic.map(LawGiven::law).orElseGet(() -> like.get().elasticModulus()),
+            law(strength, WireGrade::strength).get(),
+            law(shear, WireGrade::shearModulus).get(),
+            law(elastic, WireGrade::elasticModulus).get(),
             diameters.get(),
             density.orElseGet(() -> like.get().density()),
             like.map(WireGrade::maxServiceTemperature).orElse(OptionalDouble.empty()),
@@ -72,6 +77,43 @@ record OwnGrade(Section section, Optional<WireGrade> like, boolean alone, UnitSy
 
   private <T> Optional<T> given(ProblemKey<T> key) {
     return alone ? section.require(key) : section.read(key);
+  }
+
+  private <L> Optional<L> law(Optional<LawGiven<L>> given, Function<WireGrade, L> ofLike) {
+    return given.map(LawGiven::law).or(() -> like.map(ofLike));
+  }
+
+  /** Stretching a bar takes more than twisting it: E must be above G wherever both are known. */
+  private void stiffness(
+      Optional<ModulusLaw> shear, Optional<ModulusLaw> elastic, Optional<DiameterRange> diameters) {
+    if (shear.isEmpty() || elastic.isEmpty() || diameters.isEmpty()) {
+      return;
+    }
+    double largest = Math.min(diameters.get().max(), Double.MAX_VALUE);
+    for (double d : new double[] {Math.max(diameters.get().min(), Double.MIN_NORMAL), largest}) {
+      double g = shear.get().at(d);
+      if (!(elastic.get().at(d) > g)) {
+        section
+            .spot(MaterialKeys.ELASTIC.whole())
+            .fault(
+                Range.number(elastic.get().at(d)) + " MPa",
+                "must be above the shear modulus, " + Range.number(g) + " MPa");
+        return;
+      }
+    }
+  }
+
+  /** Moduli end with the diameters only where the other grade is an own one, with a table. */
+  private String taken(
+      Optional<LawGiven<StrengthLaw>> strength,
+      Optional<LawGiven<ModulusLaw>> shear,
+      Optional<LawGiven<ModulusLaw>> elastic) {
+    if (strength.isEmpty()) {
+      return "strength";
+    }
+    boolean own =
+        like.isPresent() && like.get().standard().equals(Source.PROBLEM_FILE.shortTitle());
+    return own && (shear.isEmpty() || elastic.isEmpty()) ? "modulus" : "";
   }
 
   private static double end(Optional<? extends LawGiven<?>> law) {

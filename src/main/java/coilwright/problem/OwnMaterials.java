@@ -4,9 +4,11 @@ import coilwright.material.Catalogue;
 import coilwright.material.WireGrade;
 import java.util.ArrayList;
 import java.util.HashMap;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 
 /** Reads the grades that a file defines, in file order: each may be like one before it. */
 final class OwnMaterials {
@@ -15,6 +17,7 @@ final class OwnMaterials {
   private final MaterialIds ids;
   private final UnitSystem units;
   private final Map<String, WireGrade> own = new HashMap<>();
+  private final Set<String> defined = new HashSet<>();
 
   /**
    * A reader.
@@ -37,7 +40,11 @@ final class OwnMaterials {
    */
   List<WireGrade> read(Section root) {
     List<WireGrade> grades = new ArrayList<>();
-    for (Section section : root.read(MaterialKeys.OWN_MATERIALS).orElse(List.of())) {
+    List<Section> sections = root.read(MaterialKeys.OWN_MATERIALS).orElse(List.of());
+    sections.stream()
+        .filter(section -> section.has(MaterialKeys.ID))
+        .forEach(section -> defined.add(section.shown(MaterialKeys.ID)));
+    for (Section section : sections) {
       grade(section).ifPresent(grades::add);
     }
     return grades;
@@ -47,7 +54,7 @@ final class OwnMaterials {
     long before = section.spot().faults().count();
     Optional<String> id = section.require(MaterialKeys.ID);
     Optional<String> likeId = section.read(MaterialKeys.LIKE);
-    likeId.ifPresent(other -> ids.check(other, section.spot(MaterialKeys.LIKE)));
+    likeId.ifPresent(other -> checkLike(other, section.spot(MaterialKeys.LIKE)));
     if (id.isPresent() && !ids.add(id.get())) {
       section
           .spot(MaterialKeys.ID)
@@ -62,6 +69,15 @@ final class OwnMaterials {
     }
     grade.ifPresent(read -> own.put(read.id(), read));
     return grade;
+  }
+
+  private void checkLike(String id, Spot spot) {
+    if (defined.contains(id) && !ids.knows(id)) {
+      spot.fault(
+          ShownText.of(id) + ", an own grade that is not defined yet", "must be one defined above");
+    } else {
+      ids.check(id, spot);
+    }
   }
 
   private Optional<WireGrade> known(String id) {

@@ -61,6 +61,7 @@ public final class ProblemReader {
     Make make = new MakeReader(ids, units).read(root);
     Optional<Design> design =
         root.read(DesignKeys.DESIGN).flatMap(section -> new DesignReader(ids, section).read());
+    design.ifPresent(loads::checkAgainst);
     DesignLimits limits = LimitsReader.read(root);
     Optional<Section> rank = root.read(RankKeys.RANK);
     RankBy by = rank.flatMap(section -> section.read(RankKeys.BY)).orElse(RankBy.MASS);

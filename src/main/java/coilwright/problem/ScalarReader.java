@@ -14,9 +14,7 @@ abstract class ScalarReader<T> implements ValueReader<T> {
     if (node instanceof Node.Scalar scalar && !scalar.isEmpty()) {
       return parse(scalar.text(), spot);
     }
-    if (!(node instanceof Node.Refused)) {
-      spot.fault(node.shown(), "must be " + accepted());
-    }
+    spot.refuse(node, accepted());
     return Optional.empty();
   }
 

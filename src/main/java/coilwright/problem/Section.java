@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.Set;
 
 /** A block of keys whose names have been checked; its values are read key by key. */
 final class Section {
@@ -13,8 +14,11 @@ final class Section {
   private final Spot spot;
   private final Map<String, Node.Entry> entries = new HashMap<>();
 
+  private final Set<String> meant;
+
   private Section(Spot spot, Node.Mapping mapping) {
     this.spot = spot;
+    this.meant = UnknownKeys.report(mapping, spot);
     mapping.entries().forEach(entry -> entries.put(entry.key(), entry));
   }
 
@@ -27,12 +31,9 @@ final class Section {
    */
   static Optional<Section> open(Node node, Spot spot) {
     if (node instanceof Node.Mapping mapping) {
-      UnknownKeys.report(mapping, spot);
       return Optional.of(new Section(spot, mapping));
     }
-    if (!(node instanceof Node.Refused)) {
-      spot.fault(node.shown(), "must be " + SectionReader.accepted(spot.pattern()));
-    }
+    spot.refuse(node, SectionReader.accepted(spot.pattern()));
     return Optional.empty();
   }
 
@@ -50,6 +51,17 @@ final class Section {
   boolean has(ProblemKey<?> key) {
     Node.Entry entry = entries.get(key.name());
     return entry != null && !key.reader().omits(entry.value());
+  }
+
+  /**
+   * Whether a key is missing: neither given nor, as far as can be told, given misspelt, which has
+   * been reported then.
+   *
+   * @param key the key
+   * @return true if it is
+   */
+  boolean lacks(ProblemKey<?> key) {
+    return !has(key) && !meant.contains(key.name());
   }
 
   /**
@@ -73,8 +85,10 @@ final class Section {
    * @return the value; empty where it is missing or faulty, which is then reported
    */
   <T> Optional<T> require(ProblemKey<T> key) {
-    if (!has(key)) {
+    if (lacks(key)) {
       spot(key).fault("missing", "must be " + key.reader().accepted());
+    } else if (!has(key)) {
+      spot.faults().again();
     }
     return read(key);
   }

@@ -21,9 +21,10 @@ record SectionListReader(String path) implements ValueReader<List<Section>> {
       }
       return Optional.of(sections);
     }
-    if (!(node instanceof Node.Refused)) {
-      spot.fault(
-          node instanceof Node.Sequence ? "an empty list" : node.shown(), "must be " + accepted());
+    if (node instanceof Node.Sequence) {
+      spot.fault("an empty list", "must be " + accepted());
+    } else {
+      spot.refuse(node, accepted());
     }
     return Optional.empty();
   }

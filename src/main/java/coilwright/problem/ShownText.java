@@ -1,9 +1,12 @@
 package coilwright.problem;
 
+import java.util.regex.Pattern;
+
 /** A user's text as messages repeat it: without control characters, and not longer than helps. */
 final class ShownText {
 
   private static final int LONGEST = 60;
+  private static final Pattern CONTROLS = Pattern.compile("\\p{Cntrl}+");
 
   private ShownText() {}
 
@@ -18,7 +21,7 @@ final class ShownText {
     if (cut < text.length() && Character.isHighSurrogate(text.charAt(cut - 1))) {
       cut--;
     }
-    String shown = text.substring(0, cut).replaceAll("\\p{Cntrl}+", " ");
+    String shown = CONTROLS.matcher(text.substring(0, cut)).replaceAll(" ");
     return cut < text.length() ? shown + "..." : shown;
   }
 }

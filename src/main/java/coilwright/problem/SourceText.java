@@ -28,8 +28,7 @@ final class SourceText {
    */
   static Optional<String> of(byte[] bytes, Faults faults) {
     if (bytes.length > LARGEST) {
-      file(Mark.FILE, faults)
-          .fault(bytes.length + " bytes", "must be at most " + LARGEST + " bytes (1 MiB)");
+      file(Mark.FILE, faults).fault("larger than 1 MiB", "must be at most " + LARGEST + " bytes");
       return Optional.empty();
     }
     CharsetDecoder decoder =

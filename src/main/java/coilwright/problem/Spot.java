@@ -3,6 +3,7 @@ package coilwright.problem;
 import coilwright.unit.Spelling;
 import java.util.Collection;
 import java.util.Optional;
+import java.util.regex.Pattern;
 
 /**
  * The place of a value: its path, where it stands in the file, and where faults about it go.
@@ -10,8 +11,32 @@ import java.util.Optional;
  * @param mark where its key stands, or the value itself in a list
  * @param path such as "loads[1].length"; empty for the file as a whole
  * @param faults the collector
+ * @param alternative what every "must be" about this value ends with; may be empty
  */
-record Spot(Mark mark, String path, Faults faults) {
+record Spot(Mark mark, String path, Faults faults, String alternative) {
+
+  private static final Pattern INDEX = Pattern.compile("\\[[0-9]+\\]");
+
+  /**
+   * A place without an alternative.
+   *
+   * @param mark where its key stands, or the value itself in a list
+   * @param path its path
+   * @param faults the collector
+   */
+  Spot(Mark mark, String path, Faults faults) {
+    this(mark, path, faults, "");
+  }
+
+  /**
+   * The same place, where a word may stand instead of the value.
+   *
+   * @param word the word
+   * @return the place, whose messages name the word too
+   */
+  Spot or(String word) {
+    return new Spot(mark, path, faults, ", or " + word);
+  }
 
   /**
    * The place of one of its keys.
@@ -38,7 +63,7 @@ record Spot(Mark mark, String path, Faults faults) {
 
   /** The path with its indices left out, as the table of keys has it: "loads[].length". */
   String pattern() {
-    return path.replaceAll("\\[[0-9]+\\]", "[]");
+    return INDEX.matcher(path).replaceAll("[]");
   }
 
   /**
@@ -59,7 +84,22 @@ record Spot(Mark mark, String path, Faults faults) {
    * @param nearest the nearest known word
    */
   void fault(String found, String remedy, Optional<String> nearest) {
-    faults.add(mark, new Fault(mark.line(), path, found, remedy, nearest));
+    String accepted = remedy.startsWith("must be ") ? remedy + alternative : remedy;
+    faults.add(mark, new Fault(mark.line(), path, found, accepted, nearest));
+  }
+
+  /**
+   * Reports a node of the wrong kind, unless it has been reported already.
+   *
+   * @param node what stands here
+   * @param accepted what is accepted
+   */
+  void refuse(Node node, String accepted) {
+    if (node instanceof Node.Refused) {
+      faults.again();
+    } else {
+      fault(node.shown(), "must be " + accepted);
+    }
   }
 
   /**

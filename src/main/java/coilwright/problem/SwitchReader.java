@@ -18,7 +18,7 @@ record SwitchReader<T>(ValueReader<T> inner) implements ValueReader<Setting<T>> 
     if (node instanceof Node.Scalar scalar && scalar.text().equals(NONE)) {
       return Optional.of(new Setting<>(Optional.empty()));
     }
-    return inner.read(node, spot).map(value -> new Setting<>(Optional.of(value)));
+    return inner.read(node, spot.or(NONE)).map(value -> new Setting<>(Optional.of(value)));
   }
 
   @Override

@@ -1,10 +1,15 @@
 package coilwright.problem;
 
+import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 
 /** Reports the keys of a block that are not known there. */
 final class UnknownKeys {
+
+  /** Shorter keys than this say too little to point at another place [signs]. */
+  private static final int SHORTEST = 3;
 
   private UnknownKeys() {}
 
@@ -13,26 +18,36 @@ final class UnknownKeys {
    *
    * @param mapping the block
    * @param spot its place
+   * @return the known keys that misspelt ones were probably meant to be
    */
-  static void report(Node.Mapping mapping, Spot spot) {
+  static Set<String> report(Node.Mapping mapping, Spot spot) {
     String parent = spot.pattern();
     List<String> known = KeyTable.names(parent);
+    Set<String> meant = new HashSet<>();
     for (Node.Entry entry : mapping.entries()) {
       if (!known.contains(entry.key())) {
-        report(entry.key(), parent, known, spot.key(entry.mark(), entry.key()));
+        report(entry.key(), parent, known, spot.key(entry.mark(), entry.key()))
+            .ifPresent(meant::add);
       }
     }
+    return meant;
   }
 
-  private static void report(String key, String parent, List<String> known, Spot spot) {
+  private static Optional<String> report(String key, String parent, List<String> known, Spot spot) {
     if (Later.has(parent.isEmpty() ? key : parent + "." + key)) {
       spot.fault(Later.WORDS, "must be left out");
-      return;
+      return Optional.empty();
     }
     Optional<String> nearest = spot.nearest(key, known);
     spot.fault(
         "unknown key",
         "accepted here: " + String.join(", ", known),
-        nearest.isPresent() ? nearest : KeyTable.pathOf(key));
+        nearest.isPresent() ? nearest : elsewhere(key));
+    return nearest;
+  }
+
+  private static Optional<String> elsewhere(String key) {
+    return (key.length() < SHORTEST ? Optional.<String>empty() : KeyTable.pathOf(key))
+        .map(path -> path.equals(key) ? key + " at the top of the file" : path);
   }
 }

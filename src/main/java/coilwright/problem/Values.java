@@ -3,7 +3,6 @@ package coilwright.problem;
 import coilwright.unit.Dimension;
 import coilwright.unit.Quantity;
 import java.util.List;
-import java.util.function.Function;
 
 /** The readers that several keys share. */
 final class Values {
@@ -64,6 +63,6 @@ final class Values {
    * @return reads the list
    */
   static <T> ValueReader<List<T>> list(ValueReader<T> item) {
-    return new ListReader<>(item, Function.identity()::apply);
+    return new ListReader<>(item, value -> value);
   }
 }

@@ -8,6 +8,9 @@ import java.util.regex.Pattern;
  */
 public final class DecimalNumber {
 
+  /** No number that anyone means is longer [signs]. */
+  private static final int LONGEST = 100;
+
   private static final Pattern DECIMAL =
       Pattern.compile("[+-]?(?:0|[1-9][0-9]*+)?(?:\\.[0-9]++)?(?:[eE][+-]?[0-9]++)?");
   private static final Pattern LEADING_ZERO = Pattern.compile("[+-]?0[0-9].*", Pattern.DOTALL);
@@ -23,6 +26,9 @@ public final class DecimalNumber {
    * @return the number, finite; or why it is refused
    */
   public static Parsed<Double> parse(String text) {
+    if (text.length() > LONGEST) {
+      return Parsed.refused("too long a number");
+    }
     if (DECIMAL.matcher(text).matches() && DIGIT.matcher(mantissa(text)).find()) {
       return inRange(text);
     }

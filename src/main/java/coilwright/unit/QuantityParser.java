@@ -73,10 +73,17 @@ public final class QuantityParser {
   private static Parsed<Quantity> unitRefused(String symbol, List<Dimension> dimensions) {
     for (Dimension other : Dimension.values()) {
       if (other.unit(symbol).isPresent()) {
-        return Parsed.refused(other.phrase());
+        return Parsed.misspelt(other.phrase(), longer(symbol, dimensions));
       }
     }
     return Parsed.misspelt("with an unknown unit", Spelling.nearest(symbol, symbols(dimensions)));
+  }
+
+  /** A unit that goes on where another kind's ends: lb is a mass, and lbf the force. */
+  private static Optional<String> longer(String symbol, List<Dimension> dimensions) {
+    return symbols(dimensions).stream()
+        .filter(known -> symbol.length() > 1 && known.startsWith(symbol))
+        .findFirst();
   }
 
   private static List<String> symbols(List<Dimension> dimensions) {

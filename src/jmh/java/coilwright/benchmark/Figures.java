@@ -1,0 +1,112 @@
+package coilwright.benchmark;
+
+import java.io.IOException;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.Collection;
+import java.util.Locale;
+import java.util.Map;
+import java.util.TreeMap;
+import org.openjdk.jmh.results.RunResult;
+import org.openjdk.jmh.runner.Runner;
+import org.openjdk.jmh.runner.RunnerException;
+import org.openjdk.jmh.runner.options.OptionsBuilder;
+
+/** Measures everything in one run and writes the figures to results/benchmarks.md. */
+public final class Figures {
+
+  private static final String WHOLE_PROBLEM = "src/jmh/resources/benchmark/typical.yaml";
+
+  private Figures() {}
+
+  /**
+   * Measures and writes.
+   *
+   * @param args not used
+   * @throws RunnerException if a benchmark fails
+   * @throws IOException if the figures cannot be written
+   * @throws InterruptedException if stopped
+   */
+  public static void main(String[] args) throws RunnerException, IOException, InterruptedException {
+    Collection<RunResult> results =
+        new Runner(new OptionsBuilder().include(SearchBenchmark.class.getName()).build()).run();
+    WholeRuns whole = WholeRuns.measure(WHOLE_PROBLEM);
+    Files.write(
+        Path.of("results", "benchmarks.md"),
+        text(milliseconds(results), whole).getBytes(StandardCharsets.UTF_8));
+  }
+
+  private static Map<String, Double> milliseconds(Collection<RunResult> results) {
+    Map<String, Double> times = new TreeMap<>();
+    for (RunResult result : results) {
+      String method = result.getPrimaryResult().getLabel();
+      times.put(
+          result.getParams().getParam("problem") + " " + method,
+          result.getPrimaryResult().getScore());
+    }
+    return times;
+  }
+
+  private static String text(Map<String, Double> times, WholeRuns whole) {
+    StringBuilder text = new StringBuilder();
+    text.append("# Benchmarks\n\n");
+    text.append("Command: `mvn -B -ntp -P benchmark verify -DskipTests`\n\n");
+    text.append("Machine: ").append(machine()).append("\n\n");
+    text.append("## Warm search of the whole catalogue, one core, heap 256 MB\n\n");
+    text.append("A spring computed at its loads is one state; root finding is included.\n\n");
+    text.append("| problem | wires | fit | candidates | search ms | scan ms | search/scan |");
+    text.append(" states search | states scan | share |\n");
+    text.append("|---|---|---|---|---|---|---|---|---|---|\n");
+    for (String problem : new String[] {"typical", "loose", "infeasible"}) {
+      text.append(row(problem, times));
+    }
+    text.append("\n## Whole runs in turns, 21 pairs, heap 256 MB\n\n");
+    text.append("| | median ms |\n|---|---|\n");
+    text.append(line("bare Java hello world", whole.hello()));
+    text.append(line("`shortlist` on the typical problem", whole.shortlist()));
+    text.append("\nMedian ratio of neighbouring runs: ");
+    return text.append(number("%.1f", whole.ratio())).append("\n").toString();
+  }
+
+  private static String row(String problem, Map<String, Double> times) {
+    Workload workload = Workload.of(problem);
+    var answer = workload.search();
+    double search = times.get(problem + " search");
+    double scan = times.get(problem + " scan");
+    long searched = workload.statesOfSearch();
+    long scanned = workload.statesOfScan();
+    return "| "
+        + String.join(
+            " | ",
+            problem,
+            Integer.toString(workload.wires()),
+            Integer.toString(answer.feasible().size()),
+            Integer.toString(answer.candidates()),
+            number("%.2f", search),
+            number("%.2f", scan),
+            number("%.2f", search / scan),
+            Long.toString(searched),
+            Long.toString(scanned),
+            number("%.3f", (double) searched / scanned))
+        + " |\n";
+  }
+
+  private static String line(String name, double[] seconds) {
+    return "| " + name + " | " + number("%.0f", 1000 * WholeRuns.median(seconds)) + " |\n";
+  }
+
+  private static String machine() {
+    return System.getProperty("os.name")
+        + " "
+        + System.getProperty("os.arch")
+        + ", "
+        + Runtime.getRuntime().availableProcessors()
+        + " processors, Java "
+        + System.getProperty("java.vm.version");
+  }
+
+  private static String number(String pattern, double value) {
+    return String.format(Locale.ROOT, pattern, value);
+  }
+}

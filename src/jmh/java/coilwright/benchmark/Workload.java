@@ -1,0 +1,115 @@
+package coilwright.benchmark;
+
+import coilwright.limit.CoilSet;
+import coilwright.limit.Limit;
+import coilwright.material.Catalogue;
+import coilwright.problem.Problem;
+import coilwright.problem.ProblemReader;
+import coilwright.problem.Purpose;
+import coilwright.problem.Reading;
+import coilwright.search.Answer;
+import coilwright.search.Candidate;
+import coilwright.search.CoilStep;
+import coilwright.search.CompressionSearch;
+import coilwright.search.Search;
+import coilwright.search.WireChoice;
+import coilwright.spring.CompressionState;
+import coilwright.spring.Family;
+import java.io.IOException;
+import java.io.InputStream;
+import java.io.UncheckedIOException;
+import java.util.List;
+import java.util.concurrent.atomic.AtomicLong;
+
+/** A problem over the whole catalogue, ready to be searched and to be scanned. */
+final class Workload {
+
+  private final Problem problem;
+  private final List<? extends Family<CompressionState>> families;
+  private final List<Limit<CompressionState>> limits;
+  private final CoilStep step;
+
+  private Workload(Problem problem, Catalogue catalogue) {
+    this.problem = problem;
+    this.families = CompressionSearch.families(problem, WireChoice.of(problem, catalogue).wires());
+    this.limits = CompressionSearch.limits(problem);
+    this.step = new CoilStep(problem.make().coilStep());
+  }
+
+  /** The problem with a name among the resources. */
+  static Workload of(String name) {
+    Catalogue catalogue = Catalogue.load();
+    Reading reading = ProblemReader.read(bytes(name), Purpose.SHORTLIST, catalogue);
+    return new Workload(reading.problem().orElseThrow(), catalogue);
+  }
+
+  private static byte[] bytes(String name) {
+    try (InputStream in = Workload.class.getResourceAsStream("/benchmark/" + name + ".yaml")) {
+      return in.readAllBytes();
+    } catch (IOException e) {
+      throw new UncheckedIOException(e);
+    }
+  }
+
+  /** How many wires it offers. */
+  int wires() {
+    return families.size();
+  }
+
+  /** The search of the program. */
+  Answer<CompressionState> search() {
+    return search(families);
+  }
+
+  private Answer<CompressionState> search(List<? extends Family<CompressionState>> over) {
+    return Search.run(over, limits, step, 0);
+  }
+
+  /** Every practical count within the limits on active coils, judged; how many hold. */
+  int scan() {
+    return scan(families);
+  }
+
+  private int scan(List<? extends Family<CompressionState>> over) {
+    double fewest = problem.limits().activeCoils().min().orElse(0);
+    double most = problem.limits().activeCoils().max().orElse(Double.POSITIVE_INFINITY);
+    int held = 0;
+    for (Family<CompressionState> family : over) {
+      double last = Math.min(most, family.mostCoils());
+      if (fewest > last) {
+        continue;
+      }
+      for (double coils : step.in(CoilSet.of(fewest, last))) {
+        held +=
+            family
+                    .rounded(coils)
+                    .map(state -> Candidate.judge(state, limits))
+                    .filter(Candidate::holds)
+                    .isPresent()
+                ? 1
+                : 0;
+      }
+    }
+    return held;
+  }
+
+  /** Springs computed by one search. */
+  long statesOfSearch() {
+    AtomicLong count = new AtomicLong();
+    search(counted(count));
+    return count.get();
+  }
+
+  /** Springs computed by one scan. */
+  long statesOfScan() {
+    AtomicLong count = new AtomicLong();
+    scan(counted(count));
+    return count.get();
+  }
+
+  private List<CountingFamily<CompressionState>> counted(AtomicLong count) {
+    return families.stream()
+        .map(family -> new CountingFamily<CompressionState>(family, count))
+        .toList();
+  }
+}

@@ -1,0 +1,92 @@
+package coilwright.problem;
+
+import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.within;
+
+import coilwright.spring.LoadPoint;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
+
+/** Which facts fix the load line, and which load line that is. */
+class LoadLineFactsTest {
+
+  @ParameterizedTest
+  @CsvSource(
+      delimiter = '|',
+      value = {
+        "[{length: 32 mm, force: 18 N}, {length: 22 mm, force: 45 N}]||two loads at lengths",
+        "[{length: 22 mm, force: 45 N}, {length: 32 mm, force: 18 N}]||two loads at lengths",
+        "[{length: 32 mm, force: 18 N}]|rate: 2.7 N/mm|a load and the rate",
+        "[{length: 32 mm, force: 18 N}]|free_length: 38.666666666666667 mm|a load and the free length",
+        "[{length: 32 mm, force: 18 N}, {length: 22 mm, force: 45 N}]|rate: 2.7 N/mm|two loads at lengths",
+        "[{length: 32 mm, force: 18 N}, {length: 22 mm, force: 45 N}]|free_length: 38.7 mm|two loads at lengths",
+        "[{length: 32 mm, force: 18 N}, {length: 22 mm, force: 45 N}]|rate: 2.6975 N/mm|two loads at lengths",
+        "[{length: 32 mm, force: 18 N}, {length: 22 mm, force: 45 N}]|rate: 2.7025 N/mm|two loads at lengths",
+        "[{length: 32 mm, force: 18 N}, {length: 27 mm, force: 31.52 N}, {length: 22 mm, force: 45 N}]||two loads at lengths",
+      })
+  void fixesTheLine(String loads, String fact, String rule) {
+    String text = "spring: compression\nloads: " + loads + "\n" + (fact == null ? "" : fact + "\n");
+    Requirement required = Files.problem(text).required().orElseThrow();
+    assertThat(required.rule()).isEqualTo(rule);
+    assertThat(required.line().rate()).isCloseTo(2.7, within(1e-12));
+    assertThat(required.line().freeLength()).isCloseTo(38 + 2.0 / 3, within(1e-12));
+  }
+
+  @Test
+  void justBeyondATenthOfAPercentDisagrees() {
+    assertThat(Files.shortlist(Files.LOADS + "rate: 2.6972 N/mm\n").faults()).hasSize(1);
+    assertThat(Files.shortlist(Files.LOADS + "rate: 2.7028 N/mm\n").faults()).hasSize(1);
+  }
+
+  @Test
+  void unitsMayMix() {
+    String text =
+        """
+        spring: compression
+        loads: [{length: 1 in, force: 4 lbf}]
+        rate: 10 lbf/in
+        """;
+    Requirement required = Files.problem(text).required().orElseThrow();
+    assertThat(required.line().rate()).isCloseTo(1.7512683524647637, within(1e-15));
+    assertThat(required.line().freeLength()).isCloseTo(1.4 * 25.4, within(1e-12));
+  }
+
+  @Test
+  void aCheckNeedsNoLine() {
+    Problem problem = check("[{length: 22 mm}]", "");
+    assertThat(problem.required()).isEmpty();
+    assertThat(problem.facts().loads())
+        .containsExactly(
+            new LoadAsked(OptionalDouble.of(22), OptionalDouble.empty(), Optional.empty()));
+    assertThat(check("[{force: 20 N, tolerance: 5 %}]", "").facts().loads())
+        .containsExactly(
+            new LoadAsked(
+                OptionalDouble.empty(), OptionalDouble.of(20), Optional.of(new Tolerance(1, 1))));
+    assertThat(check("[{length: 22 mm, force: 45 N}]", "").required()).isEmpty();
+    assertThat(check("[{length: 22 mm}, {force: 20 N}]", "free_length: 38 mm").required())
+        .isEmpty();
+  }
+
+  @Test
+  void aCheckThatFixesTheLineKeepsTheLoadsAsAsked() {
+    Problem problem =
+        check(
+            "[{length: 22 mm}, {force: 20 N}]",
+            "rate: 2 N/mm\nfree_length: 38 mm\nsprings_in_parallel: 2");
+    Requirement required = problem.required().orElseThrow();
+    assertThat(required.rule()).isEqualTo("the rate and the free length");
+    assertThat(required.line().rate()).isEqualTo(1);
+    assertThat(required.loads())
+        .containsExactly(
+            new LoadPoint(OptionalDouble.of(22), OptionalDouble.empty()),
+            new LoadPoint(OptionalDouble.empty(), OptionalDouble.of(10)));
+  }
+
+  private static Problem check(String loads, String facts) {
+    String design = Files.DESIGN.substring(Files.DESIGN.indexOf("design"));
+    return Files.checked("spring: compression\nloads: " + loads + "\n" + facts + "\n" + design);
+  }
+}
