@@ -29,7 +29,7 @@ import picocli.CommandLine.Parameters;
     })
 final class CheckCommand implements Callable<Integer> {
 
-  @Parameters(paramLabel = "FILE", description = "Problem file; - for standard input.")
+  @Parameters(paramLabel = "FILE", description = "The problem file, or - for standard input.")
   private String file;
 
   @Mixin private FormatOptions format;
@@ -47,8 +47,10 @@ final class CheckCommand implements Callable<Integer> {
     result.refuseBadTarget(input);
     Catalogue catalogue = Catalogue.load();
     Problem problem = input.read(Purpose.CHECK, catalogue);
+    format.refuseUnitsToCome(problem.units());
     Checked checked = new Checked(problem, CompressionCheck.of(problem, catalogue));
-    result.deliver(format.isJson() ? CheckedJson.of(checked) : CheckedText.of(checked), terminal);
+    result.deliver(
+        format.of(() -> CheckedText.of(checked), () -> CheckedJson.of(checked)), terminal);
     return checked.check().holds() ? Status.FOUND : Status.NOTHING;
   }
 }

@@ -1,9 +1,9 @@
 package coilwright.cli;
 
 import coilwright.problem.UnitSystem;
-import picocli.CommandLine.ITypeConverter;
+import java.util.List;
+import java.util.function.Supplier;
 import picocli.CommandLine.Option;
-import picocli.CommandLine.TypeConversionException;
 
 /** How a result is written. */
 final class FormatOptions {
@@ -14,7 +14,7 @@ final class FormatOptions {
       defaultValue = "text",
       converter = FormatConverter.class,
       description = "text (the default) or json.")
-  private Format format;
+  private String format;
 
   @Option(
       names = "--units",
@@ -23,40 +23,39 @@ final class FormatOptions {
       description = "Units of text, over the file's units.")
   private UnitSystem units;
 
-  /** The formats. */
-  enum Format {
-    TEXT,
-    JSON
+  /**
+   * Refuses text in units that text cannot show yet.
+   *
+   * @param asked the units the problem file asks for
+   */
+  void refuseUnitsToCome(UnitSystem asked) {
+    if (units == null && asked == UnitSystem.INCH && format.equals("text")) {
+      throw Refusal.usage(
+          "coilwright: text in inch units is not available yet; add --units metric or --format json");
+    }
   }
 
-  boolean isJson() {
-    return format == Format.JSON;
+  /**
+   * The result in the format asked for, safe to print.
+   *
+   * @param text writes it as text
+   * @param json writes it as JSON
+   */
+  String of(Supplier<String> text, Supplier<String> json) {
+    return format.equals("json") ? PlainText.json(json.get()) : PlainText.of(text.get());
   }
 
   /** Reads {@code --format}. */
-  static final class FormatConverter implements ITypeConverter<Format> {
-    @Override
-    public Format convert(String word) {
-      return switch (word) {
-        case "text" -> Format.TEXT;
-        case "json" -> Format.JSON;
-        case "csv" ->
-            throw new TypeConversionException("csv is not available yet; accepted: text, json");
-        default -> throw new TypeConversionException("\"" + word + "\"; accepted: text, json");
-      };
+  static final class FormatConverter extends WordConverter<String> {
+    FormatConverter() {
+      super(List.of("text", "json"), word -> word, "csv");
     }
   }
 
   /** Reads {@code --units}. */
-  static final class UnitsConverter implements ITypeConverter<UnitSystem> {
-    @Override
-    public UnitSystem convert(String word) {
-      return switch (word) {
-        case "metric" -> UnitSystem.METRIC;
-        case "inch" ->
-            throw new TypeConversionException("inch is not available yet; accepted: metric");
-        default -> throw new TypeConversionException("\"" + word + "\"; accepted: metric");
-      };
+  static final class UnitsConverter extends WordConverter<UnitSystem> {
+    UnitsConverter() {
+      super(List.of(UnitSystem.METRIC), UnitSystem::id, UnitSystem.INCH.id());
     }
   }
 }

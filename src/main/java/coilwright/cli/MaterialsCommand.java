@@ -2,6 +2,7 @@ package coilwright.cli;
 
 import coilwright.material.Catalogue;
 import coilwright.report.Grades;
+import coilwright.unit.Spelling;
 import java.io.IOException;
 import java.util.List;
 import java.util.concurrent.Callable;
@@ -37,22 +38,23 @@ final class MaterialsCommand implements Callable<Integer> {
   public Integer call() throws IOException {
     result.refuseBadTarget();
     Catalogue catalogue = Catalogue.load();
-    List<String> ids = wanted == null ? catalogue.gradeIds() : known(catalogue);
+    List<String> ids = wanted == null ? catalogue.gradeIds() : known(catalogue.gradeIds());
     result.deliver(
-        format.isJson() ? Grades.json(catalogue, ids) : Grades.text(catalogue, ids), terminal);
+        format.of(() -> Grades.text(catalogue, ids), () -> Grades.json(catalogue, ids)), terminal);
     return Status.FOUND;
   }
 
-  private List<String> known(Catalogue catalogue) {
+  private List<String> known(List<String> all) {
     for (String id : wanted) {
-      if (!catalogue.gradeIds().contains(id)) {
+      if (!all.contains(id)) {
         throw Refusal.usage(
-            "coilwright: no material \""
-                + id
+            "coilwright materials: ID: \""
+                + PlainText.line(id)
                 + "\"; accepted: "
-                + String.join(", ", catalogue.gradeIds()));
+                + String.join(", ", all)
+                + WordConverter.didYouMean(Spelling.nearest(id, all)));
       }
     }
-    return wanted;
+    return wanted.stream().distinct().toList();
   }
 }

@@ -8,12 +8,11 @@ import picocli.CommandLine;
 /** The command line as a function: arguments in, status out. */
 public final class Program {
 
-  private static final String BROKEN_PIPE = "Broken pipe";
-
   private Program() {}
 
   /**
-   * Runs one command line.
+   * Runs one command line. Nothing is thrown, whatever happens: a failure is a message and a
+   * status.
    *
    * @param terminal where it reads and writes
    * @param args the arguments
@@ -22,10 +21,17 @@ public final class Program {
   public static int run(Terminal terminal, String... args) {
     StringWriter out = new StringWriter();
     StringWriter err = new StringWriter();
-    CommandLine commandLine = commandLine(terminal, out, err);
-    int status = commandLine.execute(args);
-    terminal.complain(err.toString());
-    return out.toString().isEmpty() ? status : emit(terminal, out.toString(), status);
+    try {
+      int status = commandLine(terminal, out, err).execute(args);
+      terminal.complain(err.toString());
+      terminal.print(out.toString().replace("\r\n", "\n"));
+      return status;
+    } catch (IOException e) {
+      terminal.complain(unwritten(e));
+    } catch (RuntimeException | Error e) {
+      terminal.complain(internal(e));
+    }
+    return Status.FAILED;
   }
 
   private static CommandLine commandLine(Terminal terminal, StringWriter out, StringWriter err) {
@@ -34,16 +40,25 @@ public final class Program {
         .setErr(new PrintWriter(err))
         .setColorScheme(CommandLine.Help.defaultColorScheme(CommandLine.Help.Ansi.OFF))
         .setUsageHelpAutoWidth(false)
-        .setCaseInsensitiveEnumValuesAllowed(false)
+        .setUsageHelpWidth(80)
+        .setExpandAtFiles(false)
         .setAbbreviatedOptionsAllowed(false)
         .setParameterExceptionHandler(Program::wrongUsage)
         .setExecutionExceptionHandler(Program::failed);
   }
 
   private static int wrongUsage(CommandLine.ParameterException problem, String[] args) {
-    PrintWriter err = problem.getCommandLine().getErr();
-    err.print("coilwright: " + problem.getMessage() + "\n");
-    err.print("Try: " + problem.getCommandLine().getCommandSpec().qualifiedName() + " --help\n");
+    String command = problem.getCommandLine().getCommandSpec().qualifiedName();
+    problem
+        .getCommandLine()
+        .getErr()
+        .print(
+            command
+                + ": "
+                + PlainText.line(WrongUsage.words(problem))
+                + "\nTry: "
+                + command
+                + " --help\n");
     return Status.REFUSED;
   }
 
@@ -54,38 +69,21 @@ public final class Program {
       err.print(refusal.getMessage() + "\n");
       return refusal.status();
     }
-    if (isClosedPipe(problem)) {
-      return Status.FOUND;
-    }
-    if (problem instanceof IOException) {
-      err.print("coilwright: cannot write standard output: " + problem.getMessage() + "\n");
-      return Status.FAILED;
-    }
-    err.print(
-        "coilwright: internal failure: "
-            + problem.getClass().getSimpleName()
-            + ": "
-            + problem.getMessage()
-            + "\nPlease report it together with the problem file.\n");
+    err.print(problem instanceof IOException e ? unwritten(e) : internal(problem));
     return Status.FAILED;
   }
 
-  /** What picocli itself prints: help and version. */
-  private static int emit(Terminal terminal, String text, int status) {
-    try {
-      terminal.print(text);
-      return status;
-    } catch (IOException e) {
-      if (isClosedPipe(e)) {
-        return status;
-      }
-      terminal.complain("coilwright: cannot write standard output: " + e.getMessage() + "\n");
-      return Status.FAILED;
-    }
+  private static String unwritten(IOException problem) {
+    return "coilwright: standard output cannot be written ("
+        + Refusal.reason(problem)
+        + "); make room there, or give --out another place\n";
   }
 
-  /** A reader that has seen enough and left is no failure. */
-  static boolean isClosedPipe(Exception problem) {
-    return problem instanceof IOException && BROKEN_PIPE.equals(problem.getMessage());
+  private static String internal(Throwable problem) {
+    return "coilwright: internal failure ("
+        + problem.getClass().getSimpleName()
+        + ": "
+        + problem.getMessage()
+        + "); please report it, with the problem file\n";
   }
 }

@@ -1,19 +1,12 @@
 package coilwright.cli;
 
 import coilwright.problem.RankBy;
-import picocli.CommandLine.ITypeConverter;
-import picocli.CommandLine.TypeConversionException;
+import java.util.List;
 
 /** Reads {@code --rank}. */
-final class RankConverter implements ITypeConverter<RankBy> {
+final class RankConverter extends WordConverter<RankBy> {
 
-  @Override
-  public RankBy convert(String word) {
-    for (RankBy by : RankBy.values()) {
-      if (by.id().equals(word)) {
-        return by;
-      }
-    }
-    throw new TypeConversionException("\"" + word + "\"; accepted: mass, margin, cost, robust");
+  RankConverter() {
+    super(List.of(RankBy.values()), RankBy::id);
   }
 }

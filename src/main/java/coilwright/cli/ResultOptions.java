@@ -1,7 +1,6 @@
 package coilwright.cli;
 
 import java.io.IOException;
-import java.nio.file.Path;
 import picocli.CommandLine.Option;
 
 /** Where a result goes. */
@@ -18,29 +17,48 @@ final class ResultOptions {
 
   /** Refuses a target that could not or must not be written, before any work is done. */
   void refuseBadTarget() {
-    if (out != null) {
-      WholeFile.at(target(), force).refuseIfBad();
+    if (out == null) {
+      return;
     }
+    if (out.isEmpty() || out.equals("-")) {
+      throw Refusal.usage(
+          "--out: \"" + out + "\" is no file name; leave --out out to write to standard output");
+    }
+    if (out.endsWith("/")) {
+      throw Refusal.usage(PlainText.line(out) + ": is a folder, no plain file; add a file name");
+    }
+    target().refuseIfBad();
   }
 
-  /** The same, and refuses to overwrite the problem file. */
+  /**
+   * The same, and refuses to overwrite the problem file.
+   *
+   * @param problem the problem file
+   */
   void refuseBadTarget(ProblemFile problem) {
-    if (out != null && problem.isAt(target())) {
-      throw Refusal.usage(out + ": is the problem file itself; give --out another name");
+    if (out != null && problem.isAt(ProblemFile.pathOf(out))) {
+      throw Refusal.usage(
+          PlainText.line(out) + ": is the problem file itself; give --out another name");
     }
     refuseBadTarget();
   }
 
-  /** Writes a result. */
+  /**
+   * Writes a result.
+   *
+   * @param text the result, free of control characters but the line feed
+   * @param terminal whose standard output is meant where no file is named
+   * @throws IOException if standard output cannot be written
+   */
   void deliver(String text, Terminal terminal) throws IOException {
     if (out == null) {
       terminal.print(text);
     } else {
-      WholeFile.at(target(), force).write(text);
+      target().write(text);
     }
   }
 
-  private Path target() {
-    return ProblemFile.pathOf(out);
+  private WholeFile target() {
+    return new WholeFile(ProblemFile.pathOf(out), force);
   }
 }

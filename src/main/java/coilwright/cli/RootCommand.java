@@ -28,6 +28,8 @@ final class RootCommand implements Runnable {
 
   @Override
   public void run() {
-    throw new ParameterException(spec.commandLine(), "a command is missing");
+    throw new ParameterException(
+        spec.commandLine(),
+        "a command is missing; accepted: " + String.join(", ", spec.subcommands().keySet()));
   }
 }

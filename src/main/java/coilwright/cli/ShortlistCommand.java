@@ -36,7 +36,7 @@ import picocli.CommandLine.Parameters;
     })
 final class ShortlistCommand implements Callable<Integer> {
 
-  @Parameters(paramLabel = "FILE", description = "Problem file; - for standard input.")
+  @Parameters(paramLabel = "FILE", description = "The problem file, or - for standard input.")
   private String file;
 
   @Mixin private FormatOptions format;
@@ -53,7 +53,7 @@ final class ShortlistCommand implements Callable<Integer> {
       names = "--top",
       paramLabel = "N",
       converter = CountConverter.class,
-      description = "How many lines, over the file's rank.top.")
+      description = "How many springs at most, over the file's rank.top.")
   private Integer top;
 
   @Option(
@@ -73,9 +73,11 @@ final class ShortlistCommand implements Callable<Integer> {
     ProblemFile input = new ProblemFile(file, terminal);
     result.refuseBadTarget(input);
     Catalogue catalogue = Catalogue.load();
-    Shortlist shortlist = shortlist(input.read(Purpose.SHORTLIST, catalogue), catalogue);
-    String text = format.isJson() ? ShortlistJson.of(shortlist) : ShortlistText.of(shortlist);
-    result.deliver(text, terminal);
+    Problem problem = input.read(Purpose.SHORTLIST, catalogue);
+    format.refuseUnitsToCome(problem.units());
+    Shortlist shortlist = shortlist(problem, catalogue);
+    result.deliver(
+        format.of(() -> ShortlistText.of(shortlist), () -> ShortlistJson.of(shortlist)), terminal);
     return shortlist.answer().feasible().isEmpty() ? Status.NOTHING : Status.FOUND;
   }
 

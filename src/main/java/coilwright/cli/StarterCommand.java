@@ -16,7 +16,11 @@ import picocli.CommandLine.Parameters;
     footer = {"", "Example:", "  coilwright starter compression --out valve.yaml"})
 final class StarterCommand implements Callable<Integer> {
 
-  @Parameters(paramLabel = "KIND", description = "Kind of spring: compression.")
+  /** Read so that others are refused; there is only one yet. */
+  @Parameters(
+      paramLabel = "KIND",
+      converter = KindConverter.class,
+      description = "The kind of spring: compression.")
   private String kind;
 
   @Mixin private ResultOptions result;
@@ -30,17 +34,7 @@ final class StarterCommand implements Callable<Integer> {
   @Override
   public Integer call() throws IOException {
     result.refuseBadTarget();
-    result.deliver(text(), terminal);
+    result.deliver(Starter.compression(), terminal);
     return Status.FOUND;
-  }
-
-  private String text() {
-    return switch (kind) {
-      case "compression" -> Starter.compression();
-      case "extension", "torsion" ->
-          throw Refusal.usage(
-              "coilwright: " + kind + " is not available yet; accepted: compression");
-      default -> throw Refusal.usage("coilwright: no kind \"" + kind + "\"; accepted: compression");
-    };
   }
 }

@@ -6,11 +6,10 @@ import coilwright.report.Sizes;
 import java.io.IOException;
 import java.util.List;
 import java.util.concurrent.Callable;
-import java.util.stream.Collectors;
-import java.util.stream.Stream;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Parameters;
+import picocli.CommandLine.TypeConversionException;
 
 /** Prints the wire sizes by series. */
 @Command(
@@ -40,25 +39,18 @@ final class WiresCommand implements Callable<Integer> {
   public Integer call() throws IOException {
     result.refuseBadTarget();
     Catalogue catalogue = Catalogue.load();
-    List<WireSeries> series =
-        wanted == null
-            ? List.of(WireSeries.values())
-            : wanted.stream().map(WiresCommand::known).toList();
+    List<WireSeries> series = wanted == null ? List.of(WireSeries.values()) : known();
     result.deliver(
-        format.isJson() ? Sizes.json(catalogue, series) : Sizes.text(catalogue, series), terminal);
+        format.of(() -> Sizes.text(catalogue, series), () -> Sizes.json(catalogue, series)),
+        terminal);
     return Status.FOUND;
   }
 
-  private static WireSeries known(String id) {
-    return WireSeries.of(id)
-        .orElseThrow(
-            () ->
-                Refusal.usage(
-                    "coilwright: no wire series \""
-                        + id
-                        + "\"; accepted: "
-                        + Stream.of(WireSeries.values())
-                            .map(WireSeries::id)
-                            .collect(Collectors.joining(", "))));
+  private List<WireSeries> known() {
+    try {
+      return wanted.stream().map(new SeriesConverter()::convert).distinct().toList();
+    } catch (TypeConversionException e) {
+      throw Refusal.usage("coilwright wires: SERIES: " + PlainText.line(e.getMessage()));
+    }
   }
 }

@@ -162,7 +162,7 @@ public final class CheckedText {
   private void foot() {
     List<String> warnings = Warnings.of(checked);
     if (!warnings.isEmpty()) {
-      line("Warnings");
+      line("Take note");
       warnings.forEach(warning -> line("  " + warning));
       line("");
     }

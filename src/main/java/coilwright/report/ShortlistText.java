@@ -180,7 +180,7 @@ public final class ShortlistText {
   private void foot() {
     List<String> warnings = Warnings.of(shortlist);
     if (!warnings.isEmpty()) {
-      line("Warnings");
+      line("Take note");
       warnings.forEach(warning -> line("  " + warning));
       line("");
     }

@@ -200,7 +200,7 @@ final class Understood {
 
   /** The title, cleared of control characters; a plain one where the file has none. */
   static String title(Problem problem) {
-    String title = problem.title().replaceAll("\\p{Cntrl}", " ").strip();
+    String title = problem.title().replaceAll("\\p{Cc}", " ").strip();
     return title.isEmpty() ? "Compression spring" : title;
   }
 }
