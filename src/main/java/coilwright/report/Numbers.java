@@ -25,8 +25,11 @@ final class Numbers {
     if (fixed.indexOf('.') < 0) {
       return fixed;
     }
-    String cut = fixed.replaceAll("0+$", "");
-    return cut.endsWith(".") ? cut.substring(0, cut.length() - 1) : cut;
+    int end = fixed.length();
+    while (fixed.charAt(end - 1) == '0') {
+      end--;
+    }
+    return fixed.substring(0, fixed.charAt(end - 1) == '.' ? end - 1 : end);
   }
 
   /** A share in per cent: "21.3 %". */

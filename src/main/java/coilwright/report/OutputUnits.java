@@ -1,46 +1,50 @@
 package coilwright.report;
 
-import coilwright.problem.UnitSystem;
 import coilwright.unit.Dimension;
 import coilwright.unit.Unit;
+import java.util.EnumMap;
+import java.util.Map;
+import java.util.function.Function;
 
 /** The unit in which each kind of quantity is written, and how a key names it. */
 enum OutputUnits {
   /** Millimetre, newton, gram: all JSON, and metric text. */
-  METRIC {
-    @Override
-    String symbol(Dimension dimension) {
-      return switch (dimension) {
-        case LENGTH -> "mm";
-        case FORCE -> "N";
-        case RATE -> "N/mm";
-        case STRESS -> "MPa";
-        case ANGLE -> "deg";
-        case FREQUENCY -> "Hz";
-        case DENSITY -> "kg/m^3";
-        case MASS -> "g";
-        case SHARE -> "%";
-        case NUMBER -> "";
-      };
+  METRIC(OutputUnits::metric);
+
+  private final Map<Dimension, Unit> units = new EnumMap<>(Dimension.class);
+
+  OutputUnits(Function<Dimension, String> symbols) {
+    for (Dimension dimension : Dimension.values()) {
+      units.put(dimension, dimension.unit(symbols.apply(dimension)).orElseThrow());
     }
-  };
+  }
 
-  abstract String symbol(Dimension dimension);
+  private static String metric(Dimension dimension) {
+    return switch (dimension) {
+      case LENGTH -> "mm";
+      case FORCE -> "N";
+      case RATE -> "N/mm";
+      case STRESS -> "MPa";
+      case ANGLE -> "deg";
+      case FREQUENCY -> "Hz";
+      case DENSITY -> "kg/m^3";
+      case MASS -> "g";
+      case SHARE -> "%";
+      case NUMBER -> "";
+    };
+  }
 
-  /** The units of a system. */
-  static OutputUnits of(UnitSystem units) {
-    return METRIC;
+  /** How the unit of a dimension is written; empty for plain numbers. */
+  String symbol(Dimension dimension) {
+    return units.get(dimension).symbol();
   }
 
   /** From the dimension's inner unit to the one written. */
   double convert(Dimension dimension, double value) {
-    Unit unit = dimension.unit(symbol(dimension)).orElseThrow();
-    return unit.fromInner(value);
+    return units.get(dimension).fromInner(value);
   }
 
-  /**
-   * What a key ends in: "_n_per_mm"; empty for plain numbers and shares, which keys write plainly.
-   */
+  /** What a key ends in: "_n_per_mm"; empty for plain numbers and shares. */
   static String suffix(Dimension dimension) {
     return switch (dimension) {
       case LENGTH -> "_mm";

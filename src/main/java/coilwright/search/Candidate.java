@@ -56,10 +56,13 @@ public record Candidate<S extends State>(S state, List<Finding> findings) {
 
   /** The smallest margin over the stress checks [-]; empty where no stress is judged. */
   public OptionalDouble leastMargin() {
-    return findings.stream()
-        .filter(finding -> STRESSES.contains(finding.check().limit()) && finding.hasMargin())
-        .mapToDouble(Finding::margin)
-        .min();
+    double least = Double.POSITIVE_INFINITY;
+    for (Finding finding : findings) {
+      if (STRESSES.contains(finding.check().limit()) && finding.hasMargin()) {
+        least = Math.min(least, finding.margin());
+      }
+    }
+    return least < Double.POSITIVE_INFINITY ? OptionalDouble.of(least) : OptionalDouble.empty();
   }
 
   /** The check with the smallest margin; empty where none has a margin. */
