@@ -145,10 +145,11 @@ class JarIT {
   }
 
   private void copyProblems() throws IOException {
-    Path problems = Files.createDirectory(folder.resolve("problems"));
-    try (var files = Files.newDirectoryStream(EXAMPLE.getParent(), "*.yaml")) {
-      for (Path file : files) {
-        Files.copy(file, problems.resolve(file.getFileName()));
+    Path from = EXAMPLE.getParent();
+    Path problems = folder.resolve("problems");
+    try (var files = Files.walk(from)) {
+      for (Path file : files.toList()) {
+        Files.copy(file, problems.resolve(from.relativize(file).toString()));
       }
     }
   }

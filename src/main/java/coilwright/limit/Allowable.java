@@ -13,7 +13,7 @@ import java.util.OptionalDouble;
  * @param share of Rm [-]
  * @param source where the share comes from
  */
-record Allowable(double share, Citation source) {
+public record Allowable(double share, Citation source) {
 
   /** Static compression, before set removal, on the corrected stress. */
   static final Citation HANDBOOK =
@@ -23,6 +23,28 @@ record Allowable(double share, Citation source) {
   private static final Citation OWN = Citation.seen(Source.PROBLEM_FILE, "own_materials");
 
   /**
+   * The bound on the stress at the most compressed load.
+   *
+   * @param limit what the file says
+   * @param grade the grade
+   * @return the bound
+   */
+  public static Allowable atLoad(StressLimit limit, WireGrade grade) {
+    return of(limit, grade, grade.stressAtLoad());
+  }
+
+  /**
+   * The bound on the stress at solid.
+   *
+   * @param limit what the file says
+   * @param grade the grade
+   * @return the bound
+   */
+  public static Allowable atSolid(StressLimit limit, WireGrade grade) {
+    return of(limit, grade, grade.stressAtSolid());
+  }
+
+  /**
    * The bound that applies: the file's, else the grade's own, else the handbook's.
    *
    * @param limit what the file says
@@ -30,7 +52,7 @@ record Allowable(double share, Citation source) {
    * @param own the grade's own share for this check, where it has one
    * @return the bound
    */
-  static Allowable of(StressLimit limit, WireGrade grade, OptionalDouble own) {
+  private static Allowable of(StressLimit limit, WireGrade grade, OptionalDouble own) {
     if (limit.share().isPresent()) {
       return new Allowable(limit.share().getAsDouble(), FILE);
     }

@@ -11,6 +11,7 @@ import coilwright.source.Source;
 import coilwright.spring.Coil;
 import coilwright.spring.CompressionState;
 import coilwright.spring.EndType;
+import coilwright.spring.Family;
 import coilwright.spring.LoadPoint;
 import coilwright.spring.Surge;
 import coilwright.unit.Dimension;
@@ -67,11 +68,26 @@ public final class CompressionLimits {
         "mean diameter over wire diameter",
         state -> state.spring().springIndex());
     band(LimitName.ACTIVE_COILS, asked.activeCoils(), "active coils", CompressionState::coils);
-    fixed(
-        new Check(LimitName.PITCH_ANGLE, Side.MAX, Dimension.ANGLE, "free state"),
-        state -> state.spring().pitchAngle(),
-        asked.maxPitchAngle(),
-        PRACTICE);
+    asked.maxPitchAngle().ifPresent(this::pitchAngle);
+  }
+
+  private void pitchAngle(double greatest) {
+    limits.add(
+        new ValueLimit<>(
+            new Check(LimitName.PITCH_ANGLE, Side.MAX, Dimension.ANGLE, "free state"),
+            state -> state.spring().pitchAngle(),
+            state -> greatest,
+            PRACTICE,
+            CompressionLimits::steepest));
+  }
+
+  /**
+   * The pitch angle falls along a family, but for plain and ground ends it rises up to half a coil:
+   * it goes with the cube root of n over n + 1.
+   */
+  private static double[] steepest(Family<CompressionState> family) {
+    boolean rises = family.endForm().equals(EndType.PLAIN_GROUND.id());
+    return rises ? new double[] {0.5} : new double[0];
   }
 
   private void band(

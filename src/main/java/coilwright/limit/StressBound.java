@@ -7,7 +7,7 @@ import coilwright.spring.CompressionState;
 import coilwright.spring.Family;
 import coilwright.spring.LoadState;
 import coilwright.unit.Dimension;
-import java.util.OptionalDouble;
+import java.util.function.BiFunction;
 import java.util.function.Function;
 
 /** Corrected shear stress at one place against a share of tensile strength. */
@@ -16,7 +16,7 @@ final class StressBound implements Limit<CompressionState> {
   private final Check check;
   private final StressLimit limit;
   private final Function<CompressionState, LoadState> where;
-  private final Function<WireGrade, OptionalDouble> ownShare;
+  private final BiFunction<StressLimit, WireGrade, Allowable> allowableOf;
   private final Function<Family<CompressionState>, double[]> turns;
 
   private StressBound(
@@ -24,12 +24,12 @@ final class StressBound implements Limit<CompressionState> {
       String author,
       StressLimit limit,
       Function<CompressionState, LoadState> where,
-      Function<WireGrade, OptionalDouble> ownShare,
+      BiFunction<StressLimit, WireGrade, Allowable> allowable,
       Function<Family<CompressionState>, double[]> turns) {
     this.check = new Check(name, Side.MAX, Dimension.STRESS, "corrected, " + author);
     this.limit = limit;
     this.where = where;
-    this.ownShare = ownShare;
+    this.allowableOf = allowable;
     this.turns = turns;
   }
 
@@ -40,7 +40,7 @@ final class StressBound implements Limit<CompressionState> {
         author,
         limit,
         CompressionState::mostCompressed,
-        WireGrade::stressAtLoad,
+        Allowable::atLoad,
         StressTurns::atLoad);
   }
 
@@ -51,7 +51,7 @@ final class StressBound implements Limit<CompressionState> {
         author,
         limit,
         CompressionState::solid,
-        WireGrade::stressAtSolid,
+        Allowable::atSolid,
         StressTurns::atSolid);
   }
 
@@ -62,8 +62,7 @@ final class StressBound implements Limit<CompressionState> {
 
   @Override
   public Finding judge(CompressionState state) {
-    WireGrade grade = state.wire().grade();
-    Allowable allowable = Allowable.of(limit, grade, ownShare.apply(grade));
+    Allowable allowable = allowableOf.apply(limit, state.wire().grade());
     return Finding.of(
         check,
         where.apply(state).correctedShearStress(),

@@ -103,7 +103,7 @@ record TableRow(TableHeader header, int line, List<String> columns, List<String>
     Citation citation = citation();
     String page = header.entries().get("seen");
     boolean elsewhere = citation.evidence() == Evidence.SEEN && page != null;
-    return elsewhere ? citation.text() + ", seen " + page : citation.text();
+    return elsewhere ? citation.place() + ", seen " + page : citation.place();
   }
 
   /** The exception for a cell of this row. */

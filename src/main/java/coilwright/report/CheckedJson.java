@@ -36,7 +36,7 @@ public final class CheckedJson {
     }
     json.flag("holds", checked.check().holds());
     json.object("spring", this::spring);
-    json.strings("warnings", Warnings.of(checked));
+    json.strings("warnings", Warnings.of(checked).stream().map(Warning::full).toList());
     json.strings("cautions", Cautions.LINES);
   }
 

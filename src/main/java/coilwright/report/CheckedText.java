@@ -51,7 +51,7 @@ public final class CheckedText {
     line(verdict());
     line("");
     line("Understood");
-    text.append(Understood.of(checked.problem(), List.of(checked.check().grade().id())));
+    text.append(Understood.of(checked.problem(), List.of(checked.check().grade())));
     line("");
   }
 
@@ -87,15 +87,15 @@ public final class CheckedText {
         "outside diameter at solid",
         Numbers.fixed(state.spring().outsideDiameterAtSolid(), 3),
         "mm");
-    table.row("critical deflection", critical(state), "mm");
+    double critical = state.criticalDeflection();
+    if (Double.isInfinite(critical)) {
+      table.row("critical deflection", "none", "cannot buckle");
+    } else {
+      table.row("critical deflection", Numbers.fixed(critical, 2), "mm");
+    }
     text.append(table.text("  "));
     line("");
     loads(state);
-  }
-
-  private static String critical(CompressionState state) {
-    double critical = state.criticalDeflection();
-    return Double.isInfinite(critical) ? "never" : Numbers.fixed(critical, 2);
   }
 
   private void loads(CompressionState state) {
@@ -124,8 +124,10 @@ public final class CheckedText {
 
   private void checks(List<Finding> findings) {
     line("Every check");
-    TextTable table = new TextTable("llrlrlrll");
-    table.row("", "limit", "value", "", "bound", "unit", "margin", "what is judged", "source");
+    List<String> sources =
+        findings.stream().map(finding -> finding.source().text()).distinct().toList();
+    TextTable table = new TextTable("llrlrlrrl");
+    table.row("", "limit", "value", "", "bound", "unit", "margin", "source", "what is judged");
     for (Finding finding : findings) {
       table.row(
           finding.holds() ? "ok" : "FAILS",
@@ -134,11 +136,14 @@ public final class CheckedText {
           !finding.canFail() ? "" : finding.check().side() == Side.MAX ? "<=" : ">=",
           number(finding, finding.bound()),
           finding.canFail() ? OutputUnits.METRIC.symbol(finding.check().dimension()) : "",
-          finding.hasMargin() ? Numbers.percent(finding.margin(), 1) : "-",
-          finding.check().definition(),
-          finding.source().text());
+          finding.hasMargin() ? Numbers.margin(finding.margin()) : "-",
+          "[" + (sources.indexOf(finding.source().text()) + 1) + "]",
+          finding.check().definition());
     }
     text.append(table.text("  "));
+    for (int i = 0; i < sources.size(); i++) {
+      line("  [" + (i + 1) + "] " + sources.get(i));
+    }
     line("");
   }
 
@@ -149,6 +154,11 @@ public final class CheckedText {
   }
 
   private void cost(Cost cost) {
+    int parallel = checked.problem().facts().springsInParallel();
+    if (parallel > 1) {
+      line("Every figure is for one of the " + parallel + " springs.");
+      line("");
+    }
     line("Cost proxy, in grams of hard-drawn wire (common practice, no source; not a price)");
     TextTable table = new TextTable("lr");
     for (Cost.Term term : cost.terms()) {
@@ -160,10 +170,10 @@ public final class CheckedText {
   }
 
   private void foot() {
-    List<String> warnings = Warnings.of(checked);
+    List<Warning> warnings = Warnings.of(checked);
     if (!warnings.isEmpty()) {
       line("Take note");
-      warnings.forEach(warning -> line("  " + warning));
+      warnings.forEach(warning -> line("  " + warning.text()));
       line("");
     }
     Cautions.LINES.forEach(this::line);

@@ -19,8 +19,8 @@ final class CompressionQuantities {
           length("outside_diameter", "outside diameter De", 3, s -> s.spring().outsideDiameter()),
           length("inside_diameter", "inside diameter Di", 3, s -> s.spring().insideDiameter()),
           number("spring_index", "spring index w", 2, s -> s.spring().springIndex()),
-          number("active_coils", "active coils n", 3, CompressionState::coils),
-          number("total_coils", "total coils nt", 3, s -> s.spring().totalCoils()),
+          number("active_coils", "active coils n", 2, CompressionState::coils),
+          number("total_coils", "total coils nt", 2, s -> s.spring().totalCoils()),
           length("free_length", "free length L0", 2, s -> s.spring().freeLength()),
           length("solid_length", "solid length Ls", 2, CompressionState::solidLength),
           length("pitch", "pitch p", 3, s -> s.spring().pitch()),
@@ -87,13 +87,14 @@ final class CompressionQuantities {
     return of(stem, label, Dimension.NUMBER, decimals, value);
   }
 
-  /** One of {@link #SPRING} in metric text, by the stem of its key. */
-  static String text(String stem, CompressionState state) {
-    return SPRING.stream()
-        .filter(quantity -> quantity.stem().equals(stem))
-        .findFirst()
-        .orElseThrow()
-        .text(state, OutputUnits.METRIC);
+  /** One of {@link #SPRING}, by the stem of its key. */
+  static Quantity<CompressionState> of(String stem) {
+    for (Quantity<CompressionState> quantity : SPRING) {
+      if (quantity.stem().equals(stem)) {
+        return quantity;
+      }
+    }
+    throw new IllegalArgumentException("no quantity " + stem);
   }
 
   /** The id under which a candidate is picked: material, series, size, ends, coils. */

@@ -67,8 +67,9 @@ public final class Grades {
     facts.row("class", grade.allowableClass().words());
     facts.row(
         "diameters",
-        Numbers.fixed(grade.diameters().min(), 3)
-            + " to "
+        (grade.diameters().min() > 0
+                ? Numbers.fixed(grade.diameters().min(), 3) + " to "
+                : "up to ")
             + Numbers.fixed(grade.diameters().max(), 3)
             + " mm; series "
             + String.join(", ", grade.usualSeries().stream().map(WireSeries::id).toList()));

@@ -36,4 +36,9 @@ final class Numbers {
   static String percent(double share, int decimals) {
     return fixed(100 * share, decimals) + " %";
   }
+
+  /** A margin in per cent; one that is there but too small to show says so. */
+  static String margin(double share) {
+    return share > 0 && share < 0.0005 ? "< 0.1 %" : percent(share, 1);
+  }
 }

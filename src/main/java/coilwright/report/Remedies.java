@@ -57,7 +57,7 @@ final class Remedies {
     List<Finding> failing = failing(coils);
     if (failing.stream().allMatch(finding -> finding.check().limit().removable())) {
       List<String> needs = failing.stream().map(Remedies::need).toList();
-      lines.add("at " + Numbers.brief(coils, 2) + " coils: " + String.join(", ", needs));
+      lines.add("at " + Numbers.brief(coils, 2) + " coils: " + String.join("; ", needs));
     }
   }
 
@@ -69,22 +69,30 @@ final class Remedies {
         .toList();
   }
 
-  /** "stress at load 975.1 MPa (at most 873 MPa)". */
+  /** "stress at load 975 MPa, allowed 873 MPa". */
   private static String need(Finding finding) {
     Dimension dimension = finding.check().dimension();
-    String most = finding.check().side() == Side.MAX ? "at most " : "at least ";
-    return finding.check().limit().text()
+    return judged(finding.check().limit())
         + " "
         + number(dimension, finding.value())
-        + " ("
-        + most
-        + number(dimension, finding.bound())
-        + ")";
+        + (finding.check().side() == Side.MAX ? ", allowed " : ", needed ")
+        + number(dimension, finding.bound());
+  }
+
+  /** The number that a limit judges, where its name alone would mislead. */
+  private static String judged(LimitName name) {
+    return switch (name) {
+      case BORE -> "outside diameter in the bore";
+      case ROD -> "inside diameter over the rod";
+      case BUCKLING -> "deflection, against buckling,";
+      default -> name.text();
+    };
   }
 
   private static String number(Dimension dimension, double value) {
     String unit = OutputUnits.METRIC.symbol(dimension);
-    String number = Numbers.brief(OutputUnits.METRIC.convert(dimension, value), 2);
+    int decimals = dimension == Dimension.STRESS ? 0 : 2;
+    String number = Numbers.brief(OutputUnits.METRIC.convert(dimension, value), decimals);
     return unit.isEmpty() ? number : number + " " + unit;
   }
 

@@ -1,5 +1,7 @@
 package coilwright.report;
 
+import coilwright.material.Wire;
+import coilwright.material.WireGrade;
 import coilwright.problem.Problem;
 import coilwright.problem.RankBy;
 import coilwright.search.Answer;
@@ -31,8 +33,13 @@ public record Shortlist(
     shown = List.copyOf(shown);
   }
 
+  /** The grades tried, in order. */
+  List<WireGrade> grades() {
+    return choice.wires().stream().map(Wire::grade).distinct().toList();
+  }
+
   /** Ids of the grades tried, in order. */
   List<String> materials() {
-    return choice.wires().stream().map(wire -> wire.grade().id()).distinct().toList();
+    return grades().stream().map(WireGrade::id).toList();
   }
 }

@@ -37,7 +37,7 @@ public final class ShortlistJson {
     json.array("candidates", this::candidates);
     json.array("rejected", this::rejected);
     json.array("conflicts", this::conflicts);
-    json.strings("warnings", Warnings.of(shortlist));
+    json.strings("warnings", Warnings.of(shortlist).stream().map(Warning::full).toList());
     json.strings("cautions", Cautions.LINES);
   }
 

@@ -1,23 +1,45 @@
 package coilwright.report;
 
 import coilwright.limit.Finding;
+import coilwright.material.Wire;
 import coilwright.problem.LimitName;
 import coilwright.search.Candidate;
 import coilwright.search.Conflict;
 import coilwright.source.Evidence;
-import coilwright.spring.CompressionSpring;
 import coilwright.spring.CompressionState;
+import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.OptionalDouble;
 
 /** A shortlist as text. */
 public final class ShortlistText {
 
   private static final int NEAREST = 5;
 
+  private static final List<Column> COLUMNS =
+      List.of(
+          column("n", "active_coils"),
+          column("nt", "total_coils"),
+          column("D", "mean_diameter"),
+          column("De", "outside_diameter"),
+          column("L0", "free_length"),
+          column("Ls", "solid_length"),
+          column("index", "spring_index"),
+          column("mass", "mass"),
+          column("cost", "cost_index"));
+
   private final Shortlist shortlist;
   private final StringBuilder text = new StringBuilder();
+
+  /** A number of the spring under a short head. */
+  private record Column(String head, Quantity<CompressionState> quantity) {}
+
+  private static Column column(String head, String stem) {
+    return new Column(head, CompressionQuantities.of(stem));
+  }
 
   private ShortlistText(Shortlist shortlist) {
     this.shortlist = shortlist;
@@ -46,7 +68,7 @@ public final class ShortlistText {
     line(Understood.title(shortlist.problem()));
     line("");
     line("Understood");
-    text.append(Understood.of(shortlist.problem(), shortlist.materials()));
+    text.append(Understood.of(shortlist.problem(), shortlist.grades()));
     line("");
   }
 
@@ -55,23 +77,8 @@ public final class ShortlistText {
     int fit = shortlist.answer().feasible().size();
     line(fit + " of " + wires + " wires tried can do it, at " + counts() + " in all. " + listed());
     line("");
-    TextTable table = new TextTable("rlllrrrrrrrrrl");
-    table.row(
-        "#",
-        "material",
-        "wire",
-        "ends",
-        "n",
-        "D",
-        "De",
-        "L0",
-        "Ls",
-        "index",
-        "mass",
-        "cost",
-        "stress",
-        "limited by");
-    table.row("", "", "", "", "", "mm", "mm", "mm", "mm", "", "g", "", "margin", "");
+    TextTable table = new TextTable("rlll" + "r".repeat(COLUMNS.size()) + "rl");
+    heads(table);
     for (int i = 0; i < shortlist.shown().size(); i++) {
       row(table, i + 1, shortlist.shown().get(i));
     }
@@ -82,9 +89,28 @@ public final class ShortlistText {
     }
     line("");
     line(
-        "  n active coils, D mean and De outside diameter, L0 free and Ls solid length; cost is a");
-    line("  proxy in grams of hard-drawn wire; margins are shares of the bound.");
+        "  n active and nt total coils, D mean and De outside diameter, L0 free and Ls solid length;");
+    line(
+        "  cost is a proxy in grams of hard-drawn wire, its indices from memory; margins are shares");
+    line("  of the bound." + each());
     line("");
+  }
+
+  private void heads(TextTable table) {
+    List<String> names = new ArrayList<>(List.of("#", "material", "wire", "ends"));
+    List<String> units = new ArrayList<>(List.of("", "", "", ""));
+    for (Column column : COLUMNS) {
+      names.add(column.head());
+      units.add(OutputUnits.METRIC.symbol(column.quantity().dimension()));
+    }
+    names.addAll(List.of("stress", "limited by"));
+    units.addAll(List.of("margin", ""));
+    table.row(names.toArray(String[]::new)).row(units.toArray(String[]::new));
+  }
+
+  private String each() {
+    int parallel = shortlist.problem().facts().springsInParallel();
+    return parallel > 1 ? " Every figure is for one of the " + parallel + " springs." : "";
   }
 
   private String counts() {
@@ -114,41 +140,32 @@ public final class ShortlistText {
     };
   }
 
-  private void row(TextTable table, int rank, Candidate<CompressionState> candidate) {
-    CompressionSpring spring = candidate.state().spring();
-    boolean memory = spring.wire().evidence() == Evidence.MEMORY;
-    table.row(
-        Integer.toString(rank),
-        spring.wire().grade().id() + (memory ? " (memory)" : ""),
-        Wires.sizeWithDiameter(spring.wire()),
-        spring.ends().id(),
-        Numbers.brief(spring.activeCoils(), 3),
-        Numbers.fixed(spring.meanDiameter(), 2),
-        Numbers.fixed(spring.outsideDiameter(), 2),
-        Numbers.fixed(spring.freeLength(), 1),
-        Numbers.fixed(spring.solidLength(), 2),
-        Numbers.fixed(spring.springIndex(), 2),
-        CompressionQuantities.text("mass", candidate.state()),
-        CompressionQuantities.text("cost_index", candidate.state()),
-        candidate.leastMargin().isPresent()
-            ? Numbers.percent(candidate.leastMargin().getAsDouble(), 1)
-            : "-",
-        candidate.limiting().map(ShortlistText::limiting).orElse("-"));
+  private static void row(TextTable table, int rank, Candidate<CompressionState> candidate) {
+    Wire wire = candidate.state().wire();
+    String memory = wire.evidence() == Evidence.MEMORY ? " (memory)" : "";
+    List<String> cells = new ArrayList<>();
+    cells.add(Integer.toString(rank));
+    cells.add(wire.grade().id() + memory);
+    cells.add(Wires.sizeWithDiameter(wire));
+    cells.add(candidate.state().endForm());
+    for (Column column : COLUMNS) {
+      cells.add(column.quantity().text(candidate.state(), OutputUnits.METRIC));
+    }
+    OptionalDouble margin = candidate.leastMargin();
+    cells.add(margin.isPresent() ? Numbers.margin(margin.getAsDouble()) : "-");
+    cells.add(candidate.limiting().map(ShortlistText::limiting).orElse("-"));
+    table.row(cells.toArray(String[]::new));
   }
 
   private static String limiting(Finding finding) {
-    return finding.check().limit().text() + " " + Numbers.percent(finding.margin(), 1);
+    return finding.check().limit().text() + " " + Numbers.margin(finding.margin());
   }
 
   private void nothing() {
     int wires = shortlist.answer().wires();
     line("None of the " + wires + (wires == 1 ? " wire" : " wires") + " tried can do it.");
     line("");
-    List<Conflict> nearest =
-        shortlist.answer().conflicts().stream()
-            .sorted(Comparator.comparingDouble(Nearness::of))
-            .limit(NEAREST)
-            .toList();
+    List<Conflict> nearest = nearest();
     if (nearest.isEmpty()) {
       return;
     }
@@ -160,6 +177,15 @@ public final class ShortlistText {
       }
     }
     line("");
+  }
+
+  /** The nearest wire of each material, nearest first. */
+  private List<Conflict> nearest() {
+    Map<String, Conflict> byMaterial = new LinkedHashMap<>();
+    shortlist.answer().conflicts().stream()
+        .sorted(Comparator.comparingDouble(Nearness::of))
+        .forEach(conflict -> byMaterial.putIfAbsent(conflict.wire().grade().id(), conflict));
+    return byMaterial.values().stream().limit(NEAREST).toList();
   }
 
   private void ruledOut() {
@@ -178,10 +204,10 @@ public final class ShortlistText {
   }
 
   private void foot() {
-    List<String> warnings = Warnings.of(shortlist);
+    List<Warning> warnings = Warnings.of(shortlist);
     if (!warnings.isEmpty()) {
       line("Take note");
-      warnings.forEach(warning -> line("  " + warning));
+      warnings.forEach(warning -> line("  " + warning.text()));
       line("");
     }
     Cautions.LINES.forEach(this::line);

@@ -7,6 +7,7 @@ import coilwright.source.Evidence;
 import coilwright.spring.CompressionState;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.function.Predicate;
 
 /** What a reader of a result should know before relying on it. */
 final class Warnings {
@@ -14,52 +15,64 @@ final class Warnings {
   private Warnings() {}
 
   /** The warnings of a shortlist. */
-  static List<String> of(Shortlist shortlist) {
-    List<String> warnings = new ArrayList<>();
-    shortlist
-        .choice()
-        .fromMemory()
-        .forEach(
-            (id, sizes) ->
-                warnings.add(
-                    id
-                        + ": "
-                        + sizes
-                        + (sizes == 1 ? " size rests" : " sizes rest")
-                        + " on data from memory and "
-                        + (sizes == 1 ? "was" : "were")
-                        + " left out; name the grade under make.materials to try them"));
-    shared(warnings, shortlist.problem(), shortlist.shown());
+  static List<Warning> of(Shortlist shortlist) {
+    List<Warning> warnings = new ArrayList<>();
+    shortlist.choice().fromMemory().forEach((id, sizes) -> warnings.add(leftOut(id, sizes)));
+    warnings.addAll(shared(shortlist.problem(), shortlist.shown(), true));
     return warnings;
   }
 
   /** The warnings of one checked spring. */
-  static List<String> of(Checked checked) {
-    List<String> warnings = new ArrayList<>();
-    shared(warnings, checked.problem(), checked.check().spring().stream().toList());
+  static List<Warning> of(Checked checked) {
+    return shared(checked.problem(), checked.check().spring().stream().toList(), false);
+  }
+
+  private static Warning leftOut(String id, int sizes) {
+    String many =
+        sizes == 1
+            ? " size rests on data from memory and was"
+            : " sizes rest on data from memory and were";
+    return new Warning(
+        id + ": " + sizes + many + " left out; name the grade under make.materials to try them",
+        List.of(),
+        List.of());
+  }
+
+  private static List<Warning> shared(
+      Problem problem, List<Candidate<CompressionState>> springs, boolean ranked) {
+    List<Warning> warnings = new ArrayList<>();
+    warn(
+        warnings,
+        "strength, moduli or size from memory, to be confirmed against the standard",
+        springs,
+        ranked,
+        state -> state.wire().evidence() == Evidence.MEMORY);
+    warn(
+        warnings,
+        "would buckle without the bore or rod that guides it, and rubs there",
+        springs,
+        ranked,
+        state -> buckles(problem, state));
     return warnings;
   }
 
-  private static void shared(
-      List<String> warnings, Problem problem, List<Candidate<CompressionState>> springs) {
-    name(
-        warnings,
-        springs.stream()
-            .filter(spring -> spring.state().wire().evidence() == Evidence.MEMORY)
-            .toList(),
-        "strength, moduli or size from memory, to be confirmed against the standard");
-    name(
-        warnings,
-        springs.stream().filter(spring -> buckles(problem, spring.state())).toList(),
-        "would buckle without the bore or rod that guides it; rubbing there changes its loads");
-  }
-
   /** One warning for all the springs it concerns. */
-  private static void name(
-      List<String> warnings, List<Candidate<CompressionState>> springs, String what) {
-    if (!springs.isEmpty()) {
-      List<String> ids = springs.stream().map(CompressionQuantities::id).toList();
-      warnings.add(what + ": " + String.join(", ", ids));
+  private static void warn(
+      List<Warning> warnings,
+      String what,
+      List<Candidate<CompressionState>> springs,
+      boolean ranked,
+      Predicate<CompressionState> concerns) {
+    List<String> ids = new ArrayList<>();
+    List<Integer> rows = new ArrayList<>();
+    for (int i = 0; i < springs.size(); i++) {
+      if (concerns.test(springs.get(i).state())) {
+        ids.add(CompressionQuantities.id(springs.get(i)));
+        rows.add(i + 1);
+      }
+    }
+    if (!ids.isEmpty()) {
+      warnings.add(new Warning(what, ids, ranked ? rows : List.of()));
     }
   }
 

@@ -9,6 +9,7 @@ import coilwright.spring.State;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
+import java.util.function.DoubleUnaryOperator;
 
 /**
  * What each limit leaves of one family, by name: a name stands for all its bounds, and a name that
@@ -21,6 +22,7 @@ import java.util.Map;
 record Limits(Map<LimitName, CoilSet> exact, Map<LimitName, CoilSet> practical) {
 
   private static final double NEARLY = 10;
+  private static final double AROUND = 1.3;
 
   /**
    * Asks every limit.
@@ -68,22 +70,52 @@ record Limits(Map<LimitName, CoilSet> exact, Map<LimitName, CoilSet> practical) 
   }
 
   /**
-   * Widens a set by what rounding can move, at least one coil step. A limit that every unrounded
-   * spring fails, but some by less than rounding can move, is left to the judging of the rounded
-   * springs.
+   * Widens a set by what rounding can move, at least one coil step. A limit whose margin turns
+   * nearer to zero than rounding can move it, or that every unrounded spring fails by less than
+   * that, is left to the judging of the rounded springs.
    */
   private static <S extends State> CoilSet widened(
       Limit<S> limit, CoilSet set, Trail<S> trail, CoilStep step) {
-    if (!set.isEmpty()) {
-      return set.widen(coils -> step.size() + trail.play(inRange(coils, trail)));
+    if (grazes(limit, trail) || set.isEmpty() && nearlyHolds(limit, trail)) {
+      return CoilSet.ALL;
     }
-    for (S known : trail.states()) {
-      double blur = NEARLY * trail.roundingShare(known.coils());
-      if (limit.judge(known).margin() >= -blur) {
-        return CoilSet.ALL;
+    return set.widen(coils -> step.size() + play(coils, trail));
+  }
+
+  private static <S extends State> boolean grazes(Limit<S> limit, Trail<S> trail) {
+    for (double coils : limit.turns(trail)) {
+      if (inRange(coils, trail) == coils
+          && Math.abs(limit.judge(trail.at(coils)).margin()) <= blur(coils, trail)) {
+        return true;
       }
     }
-    return CoilSet.EMPTY;
+    return false;
+  }
+
+  private static <S extends State> boolean nearlyHolds(Limit<S> limit, Trail<S> trail) {
+    for (S known : trail.states()) {
+      if (limit.judge(known).margin() >= -blur(known.coils(), trail)) {
+        return true;
+      }
+    }
+    return false;
+  }
+
+  private static double blur(double coils, Trail<?> trail) {
+    return NEARLY * around(coils, trail, trail::roundingShare);
+  }
+
+  /** Twice what the family says, for a straight-line estimate falls short where margins bend. */
+  private static double play(double coils, Trail<?> trail) {
+    return 2 * around(coils, trail, trail::play);
+  }
+
+  /** The greatest of an estimate near a count: the steps of rounding may change there. */
+  private static double around(double coils, Trail<?> trail, DoubleUnaryOperator estimate) {
+    double below = estimate.applyAsDouble(inRange(coils / AROUND, trail));
+    double above = estimate.applyAsDouble(inRange(coils * AROUND, trail));
+    double here = estimate.applyAsDouble(inRange(coils, trail));
+    return Math.max(here, Math.max(below, above));
   }
 
   private static double inRange(double coils, Trail<?> trail) {

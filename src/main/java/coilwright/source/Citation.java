@@ -32,8 +32,13 @@ public record Citation(Source source, String locator, Evidence evidence) {
     return new Citation(source, locator, Evidence.SEEN);
   }
 
-  /** The citation in one line: short title, then locator. */
-  public String text() {
+  /** The place in one line: short title, then locator. */
+  public String place() {
     return locator.isEmpty() ? source.shortTitle() : source.shortTitle() + ", " + locator;
+  }
+
+  /** The place, marked where it is from memory. */
+  public String text() {
+    return evidence == Evidence.MEMORY ? place() + " (from memory)" : place();
   }
 }

@@ -54,7 +54,7 @@ public final class Coil {
    * Mean diameter of a coil pressed to solid with its ends held from turning, sqrt(D^2 + (p^2 -
    * d^2)/pi^2).
    *
-   * @param meanDiameter D when free [mm], not below the wire diameter
+   * @param meanDiameter D when free [mm], above the wire diameter
    * @param pitch p when free [mm]
    * @param wireDiameter d [mm]
    * @return D at solid [mm]

@@ -45,7 +45,7 @@ class ShortlistTest {
   void textInInchUnitsIsRefusedUntilItCanBeShown() {
     String inch = "units: inch\n" + Run.VALVE;
     piped(inch).refused("inch units is not available yet; add --units metric or --format json");
-    assertThat(piped(inch, "--units", "metric").found(Status.FOUND).out()).contains(" N at ");
+    assertThat(piped(inch, "--units", "metric").found(Status.FOUND).out()).contains("load line");
     assertThat(piped(inch, "--format", "json").found(Status.FOUND).json().path("format").asInt())
         .isEqualTo(1);
   }

@@ -1,14 +1,15 @@
 package coilwright.material;
 
-import static coilwright.material.Published.Column.DENSITY;
-import static coilwright.material.Published.Column.DIAMETER;
-import static coilwright.material.Published.Column.ELASTIC_MODULUS;
-import static coilwright.material.Published.Column.GRADE;
-import static coilwright.material.Published.Column.MODULUS;
-import static coilwright.material.Published.Column.SHEAR_MODULUS;
-import static coilwright.material.Published.Column.VALUE;
+import static coilwright.published.Published.Column.DENSITY;
+import static coilwright.published.Published.Column.DIAMETER;
+import static coilwright.published.Published.Column.ELASTIC_MODULUS;
+import static coilwright.published.Published.Column.GRADE;
+import static coilwright.published.Published.Column.MODULUS;
+import static coilwright.published.Published.Column.SHEAR_MODULUS;
+import static coilwright.published.Published.Column.VALUE;
 import static org.assertj.core.api.Assertions.assertThat;
 
+import coilwright.published.Published;
 import coilwright.unit.Dimension;
 import java.util.stream.Stream;
 import org.assertj.core.data.Percentage;

@@ -1,10 +1,11 @@
 package coilwright.material;
 
-import static coilwright.material.Published.Column.DIAMETER;
-import static coilwright.material.Published.Column.LABEL;
+import static coilwright.published.Published.Column.DIAMETER;
+import static coilwright.published.Published.Column.LABEL;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
+import coilwright.published.Published;
 import java.util.List;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;

@@ -1,19 +1,20 @@
 package coilwright.material;
 
-import static coilwright.material.Published.Column.A;
-import static coilwright.material.Published.Column.B;
-import static coilwright.material.Published.Column.C;
-import static coilwright.material.Published.Column.DIAMETER;
-import static coilwright.material.Published.Column.DIAMETER_MAX;
-import static coilwright.material.Published.Column.DIAMETER_MIN;
-import static coilwright.material.Published.Column.E;
-import static coilwright.material.Published.Column.F;
-import static coilwright.material.Published.Column.GRADE;
-import static coilwright.material.Published.Column.M;
-import static coilwright.material.Published.Column.MAXIMUM;
-import static coilwright.material.Published.Column.STRENGTH;
+import static coilwright.published.Published.Column.A;
+import static coilwright.published.Published.Column.B;
+import static coilwright.published.Published.Column.C;
+import static coilwright.published.Published.Column.DIAMETER;
+import static coilwright.published.Published.Column.DIAMETER_MAX;
+import static coilwright.published.Published.Column.DIAMETER_MIN;
+import static coilwright.published.Published.Column.E;
+import static coilwright.published.Published.Column.F;
+import static coilwright.published.Published.Column.GRADE;
+import static coilwright.published.Published.Column.M;
+import static coilwright.published.Published.Column.MAXIMUM;
+import static coilwright.published.Published.Column.STRENGTH;
 import static org.assertj.core.api.Assertions.assertThat;
 
+import coilwright.published.Published;
 import coilwright.unit.Dimension;
 import java.util.function.DoubleUnaryOperator;
 import java.util.stream.Stream;
