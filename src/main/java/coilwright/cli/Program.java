@@ -19,10 +19,15 @@ public final class Program {
    * @return the exit status: 0 found, 1 failed, 2 refused, 3 nothing found
    */
   public static int run(Terminal terminal, String... args) {
+    return run(terminal, HeadStart.none(), args);
+  }
+
+  /** The same with a head start that may be under way. */
+  static int run(Terminal terminal, HeadStart headStart, String... args) {
     StringWriter out = new StringWriter();
     StringWriter err = new StringWriter();
     try {
-      int status = commandLine(terminal, out, err).execute(args);
+      int status = commandLine(new Commands(terminal, headStart), out, err, args).execute(args);
       terminal.complain(err.toString());
       terminal.print(out.toString().replace("\r\n", "\n"));
       return status;
@@ -34,9 +39,11 @@ public final class Program {
     return Status.FAILED;
   }
 
-  private static CommandLine commandLine(Terminal terminal, StringWriter out, StringWriter err) {
-    return new CommandLine(new RootCommand(), new CommandFactory(terminal))
-        .setOut(new PrintWriter(out))
+  private static CommandLine commandLine(
+      Commands commands, StringWriter out, StringWriter err, String... args) {
+    CommandLine root = new CommandLine(new RootCommand());
+    commands.addTo(root, args);
+    return root.setOut(new PrintWriter(out))
         .setErr(new PrintWriter(err))
         .setColorScheme(CommandLine.Help.defaultColorScheme(CommandLine.Help.Ansi.OFF))
         .setUsageHelpAutoWidth(false)

@@ -12,13 +12,6 @@ import picocli.CommandLine.Spec;
       "Helical springs from the loads they must carry: every standard wire and material that can do"
           + " the job, ranked, and why the rest cannot."
     },
-    subcommands = {
-      ShortlistCommand.class,
-      CheckCommand.class,
-      MaterialsCommand.class,
-      WiresCommand.class,
-      StarterCommand.class
-    },
     mixinStandardHelpOptions = true,
     versionProvider = Version.class,
     footer = {"", "Example:", "  coilwright shortlist problems/check-valve.yaml"})

@@ -9,13 +9,12 @@ import org.apache.commons.math3.analysis.solvers.PegasusSolver;
  *
  * <p>Along a family nearly every number is nearly a power of the coil count, so the logarithm of
  * value over bound is solved against the logarithm of the count: there it is nearly a straight
- * line. A value that falls through zero, as travel left before solid does, is nearly straight as it
- * is.
+ * line. A limit that is {@link Limit#straight} is solved as it is.
  */
 final class Bracket<S extends State> {
 
   private static final double ACCURACY = 1e-10;
-  private static final double WIDEST = 1e6;
+  private static final double WIDEST = 30;
   private static final int MOST_EVALUATIONS = 200;
 
   private final Limit<S> limit;
@@ -29,12 +28,7 @@ final class Bracket<S extends State> {
     this.trail = trail;
     this.from = from;
     this.to = to;
-    this.straight = isStraight(from) || isStraight(to);
-  }
-
-  private boolean isStraight(double coils) {
-    Finding finding = limit.judge(trail.at(coils));
-    return !(finding.bound() > 0) || finding.check().side() == Side.MIN && !(finding.value() > 0);
+    this.straight = limit.straight();
   }
 
   /** The coil count at which the limit begins or ceases to hold. */
@@ -48,7 +42,11 @@ final class Bracket<S extends State> {
     }
     return coils(
         new PegasusSolver(ACCURACY, ACCURACY, ACCURACY)
-            .solve(MOST_EVALUATIONS, x -> excess(coils(x)), low, high));
+            .solve(
+                MOST_EVALUATIONS,
+                x -> x == low ? atLow : x == high ? atHigh : excess(coils(x)),
+                low,
+                high));
   }
 
   private double scale(double coils) {
@@ -63,7 +61,7 @@ final class Bracket<S extends State> {
   /** Zero just where {@link Finding#holds} turns, negative where it does not hold. */
   private double excess(double coils) {
     Finding finding = limit.judge(trail.at(coils));
-    if (straight || !finding.canFail()) {
+    if (straight || !finding.canFail() || !(finding.bound() > 0)) {
       return Math.min(finding.margin(), WIDEST) + Finding.TOLERANCE;
     }
     double ratio = Math.min(WIDEST, Math.max(1 / WIDEST, finding.value() / finding.bound()));

@@ -16,8 +16,10 @@ import coilwright.spring.LoadPoint;
 import coilwright.spring.Surge;
 import coilwright.unit.Dimension;
 import java.util.ArrayList;
+import java.util.EnumSet;
 import java.util.List;
 import java.util.OptionalDouble;
+import java.util.Set;
 import java.util.function.ToDoubleFunction;
 
 /** The limits that a problem sets for compression springs, in the order of their names. */
@@ -27,6 +29,10 @@ public final class CompressionLimits {
   private static final Citation PRACTICE = Citation.seen(Source.COMMON_PRACTICE, "");
   private static final Citation CLASH =
       Citation.seen(Source.SHIGLEY, "fractional overrun to closure, at least 0.15");
+
+  /** Limits on lengths of coils that touch, and on their count. */
+  private static final Set<LimitName> STRAIGHT =
+      EnumSet.of(LimitName.ACTIVE_COILS, LimitName.SOLID_LENGTH, LimitName.CLASH_ALLOWANCE);
 
   private final List<Limit<CompressionState>> limits = new ArrayList<>();
 
@@ -78,6 +84,7 @@ public final class CompressionLimits {
             state -> state.spring().pitchAngle(),
             state -> greatest,
             PRACTICE,
+            false,
             CompressionLimits::steepest));
   }
 
@@ -104,7 +111,8 @@ public final class CompressionLimits {
       Citation source) {
     if (bound.isPresent()) {
       double limit = bound.getAsDouble();
-      limits.add(new ValueLimit<>(check, value, state -> limit, source));
+      limits.add(
+          new ValueLimit<>(check, value, state -> limit, source, STRAIGHT.contains(check.limit())));
     }
   }
 
@@ -182,12 +190,13 @@ public final class CompressionLimits {
         new ValueLimit<>(
             new Check(
                 LimitName.BEYOND_SOLID,
-                Side.MIN,
+                Side.MAX,
                 Dimension.LENGTH,
-                "length at the most compressed load, against the solid length"),
-            state -> state.mostCompressed().length(),
+                "solid length, against the length at the most compressed load"),
             CompressionState::solidLength,
-            EndType.CITATION));
+            state -> state.mostCompressed().length(),
+            EndType.CITATION,
+            true));
     limits.add(
         new ValueLimit<>(
             new Check(
@@ -197,7 +206,8 @@ public final class CompressionLimits {
                 "pitch, free state, against the wire diameter"),
             state -> state.spring().pitch(),
             state -> state.spring().wireDiameter(),
-            EndType.CITATION));
+            EndType.CITATION,
+            false));
   }
 
   private void stability(Problem problem) {

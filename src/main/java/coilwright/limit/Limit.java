@@ -35,6 +35,15 @@ public interface Limit<S extends State> {
   }
 
   /**
+   * Whether the margin goes with the coil count in a straight line, as lengths of coils that touch
+   * do. Else it is taken to go with a power of it, as diameters and stresses do. It tells where to
+   * look for a bound first, never on which side the limit holds.
+   */
+  default boolean straight() {
+    return false;
+  }
+
+  /**
    * Whether the limit looks only at what rounding does to a spring: every unrounded spring of a
    * family holds it.
    */

@@ -70,6 +70,12 @@ final class StressBound implements Limit<CompressionState> {
         allowable.source());
   }
 
+  /** At solid the force goes with the deflection left, which falls straight to none. */
+  @Override
+  public boolean straight() {
+    return name() == LimitName.STRESS_AT_SOLID;
+  }
+
   @Override
   public double[] turns(Family<CompressionState> family) {
     return turns.apply(family);

@@ -8,12 +8,14 @@ import java.util.function.Function;
 import java.util.function.ToDoubleFunction;
 
 /**
- * A limit that holds one number of a spring against one bound.
+ * A limit that holds one number of a spring against one bound, whose margin turns at known counts
+ * or not at all.
  *
  * @param check what the bound asks
  * @param value the number judged, in the dimension's inner unit
  * @param bound the bound, in the same unit
  * @param source where bound or law comes from
+ * @param straight whether the margin goes with the coil count in a straight line
  * @param turnsOf coil counts where the margin may turn
  * @param <S> the state of the kind of spring it judges
  */
@@ -22,12 +24,18 @@ record ValueLimit<S extends State>(
     ToDoubleFunction<S> value,
     ToDoubleFunction<S> bound,
     Citation source,
+    boolean straight,
     Function<Family<S>, double[]> turnsOf)
     implements Limit<S> {
 
   /** A limit whose margin never turns. */
-  ValueLimit(Check check, ToDoubleFunction<S> value, ToDoubleFunction<S> bound, Citation source) {
-    this(check, value, bound, source, family -> new double[0]);
+  ValueLimit(
+      Check check,
+      ToDoubleFunction<S> value,
+      ToDoubleFunction<S> bound,
+      Citation source,
+      boolean straight) {
+    this(check, value, bound, source, straight, family -> new double[0]);
   }
 
   @Override

@@ -5,6 +5,7 @@ import coilwright.unit.Require;
 import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.function.DoublePredicate;
 
 /**
  * The practical coil counts: the positive multiples of a step, reckoned in decimal.
@@ -29,12 +30,29 @@ public record CoilStep(double size) {
   public List<Double> in(CoilSet set) {
     List<Double> counts = new ArrayList<>();
     for (CoilSet.Interval interval : set.intervals()) {
-      long last = (long) Math.floor(interval.to() / size + TOLERANCE);
-      for (long k = first(interval.from()); k <= last; k++) {
+      for (long k = first(interval); k <= last(interval); k++) {
         counts.add(times(k));
       }
     }
     return counts;
+  }
+
+  /**
+   * Whether any practical count in a set will do; they are tried in rising order until one does.
+   *
+   * @param set the set, bounded above
+   * @param will whether a count will do
+   * @return true if one does
+   */
+  boolean any(CoilSet set, DoublePredicate will) {
+    for (CoilSet.Interval interval : set.intervals()) {
+      for (long k = first(interval); k <= last(interval); k++) {
+        if (will.test(times(k))) {
+          return true;
+        }
+      }
+    }
+    return false;
   }
 
   /**
@@ -54,8 +72,12 @@ public record CoilStep(double size) {
     return new CoilSet(counts);
   }
 
-  private long first(double from) {
-    return Math.max(1, (long) Math.ceil(from / size - TOLERANCE));
+  private long first(CoilSet.Interval interval) {
+    return Math.max(1, (long) Math.ceil(interval.from() / size - TOLERANCE));
+  }
+
+  private long last(CoilSet.Interval interval) {
+    return (long) Math.floor(interval.to() / size + TOLERANCE);
   }
 
   private double times(long k) {

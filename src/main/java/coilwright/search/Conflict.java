@@ -3,7 +3,9 @@ package coilwright.search;
 import coilwright.limit.CoilSet;
 import coilwright.material.Wire;
 import coilwright.problem.LimitName;
+import java.util.EnumSet;
 import java.util.List;
+import java.util.Set;
 
 /**
  * Why a wire has no candidate: limits that cannot hold together, each with the coil counts it
@@ -27,6 +29,13 @@ public record Conflict(Wire wire, String endForm, List<Part> parts) {
    * @param coils the coil counts it leaves, unrounded
    */
   public record Part(LimitName limit, CoilSet coils) {}
+
+  /** The names of its limits. */
+  public Set<LimitName> limits() {
+    Set<LimitName> names = EnumSet.noneOf(LimitName.class);
+    parts.forEach(part -> names.add(part.limit()));
+    return names;
+  }
 
   /** How far apart the limits are, in coils; zero where it is not two counts that are apart. */
   public double gap() {

@@ -110,12 +110,13 @@ record Limits(Map<LimitName, CoilSet> exact, Map<LimitName, CoilSet> practical) 
     return 2 * around(coils, trail, trail::play);
   }
 
-  /** The greatest of an estimate near a count: the steps of rounding may change there. */
+  /**
+   * The greater of an estimate on either side of a count: the steps of rounding may change there.
+   */
   private static double around(double coils, Trail<?> trail, DoubleUnaryOperator estimate) {
-    double below = estimate.applyAsDouble(inRange(coils / AROUND, trail));
-    double above = estimate.applyAsDouble(inRange(coils * AROUND, trail));
-    double here = estimate.applyAsDouble(inRange(coils, trail));
-    return Math.max(here, Math.max(below, above));
+    return Math.max(
+        estimate.applyAsDouble(inRange(coils / AROUND, trail)),
+        estimate.applyAsDouble(inRange(coils * AROUND, trail)));
   }
 
   private static double inRange(double coils, Trail<?> trail) {

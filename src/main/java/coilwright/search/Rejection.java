@@ -5,16 +5,13 @@ import coilwright.limit.Finding;
 import coilwright.problem.LimitName;
 import coilwright.spring.State;
 import java.util.EnumMap;
-import java.util.EnumSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 
-/** Why a wire has no candidate, and which limits alone keep it out. */
+/** Why a wire has no candidate. */
 final class Rejection<S extends State> {
-
-  private static final double[] TRIED_BETWEEN_STEPS = {0.5, 0, 1, 0.25, 0.75};
 
   private final WireSearch<S> search;
   private final Limits left;
@@ -26,15 +23,39 @@ final class Rejection<S extends State> {
 
   Outcome<S> outcome() {
     Conflict conflict = conflict();
-    return new Outcome<>(List.of(), Optional.of(conflict), ruledOutBy(conflict));
+    Set<LimitName> decisive = new Decisive<>(search).limits();
+    return new Outcome<>(
+        List.of(), Optional.of(conflict), decisive.isEmpty() ? conflict.limits() : decisive);
   }
 
   private Conflict conflict() {
-    List<Conflict.Part> parts = new Explanation(left.exact()).parts();
+    List<Conflict.Part> parts = new Explanation(sets()).parts();
     if (parts.isEmpty()) {
       parts = new Explanation(afterRounding()).parts();
+    } else {
+      parts = parts.stream().map(this::whole).toList();
     }
     return new Conflict(search.family().wire(), search.family().endForm(), parts);
+  }
+
+  /** A part with all that its limit leaves by itself, bounds included that others outdo. */
+  private Conflict.Part whole(Conflict.Part part) {
+    return new Conflict.Part(part.limit(), search.alone(part.limit()));
+  }
+
+  /**
+   * What each limit leaves. Where one leaves ranges apart, bounds that others outdo may cross with
+   * it, so that every bound is looked for.
+   */
+  private Map<LimitName, CoilSet> sets() {
+    boolean apart = left.exact().values().stream().anyMatch(set -> set.intervals().size() > 1);
+    return apart ? everySet() : left.exact();
+  }
+
+  private Map<LimitName, CoilSet> everySet() {
+    Map<LimitName, CoilSet> sets = new EnumMap<>(LimitName.class);
+    search.limits().forEach(limit -> sets.computeIfAbsent(limit.name(), search::alone));
+    return sets;
   }
 
   /**
@@ -44,7 +65,7 @@ final class Rejection<S extends State> {
    */
   private Map<LimitName, CoilSet> afterRounding() {
     CoilSet range = search.bounded(Limits.together(left.exact()));
-    Map<LimitName, CoilSet> sets = new EnumMap<>(left.exact());
+    Map<LimitName, CoilSet> sets = everySet();
     sets.put(LimitName.COIL_STEP, search.step().around(range.least(), range.greatest()));
     for (double coils : search.step().in(range)) {
       search
@@ -70,58 +91,5 @@ final class Rejection<S extends State> {
         List.of(
             new CoilSet.Interval(0, Math.nextDown(coils)),
             new CoilSet.Interval(Math.nextUp(coils), Double.POSITIVE_INFINITY)));
-  }
-
-  /**
-   * The limits whose removal alone lets the wire through; where there is none, those in conflict.
-   */
-  private Set<LimitName> ruledOutBy(Conflict conflict) {
-    Set<LimitName> decisive = EnumSet.noneOf(LimitName.class);
-    for (LimitName name : suspects()) {
-      if (name.removable() && holdsWithout(name)) {
-        decisive.add(name);
-      }
-    }
-    if (holdsBetweenSteps()) {
-      decisive.add(LimitName.COIL_STEP);
-    }
-    if (decisive.isEmpty()) {
-      conflict.parts().forEach(part -> decisive.add(part.limit()));
-    }
-    return decisive;
-  }
-
-  /** The limits that may decide: those that leave less than all, or any that rounding may break. */
-  private Set<LimitName> suspects() {
-    if (Limits.together(left.practical()).isEmpty()) {
-      return left.exact().keySet();
-    }
-    Set<LimitName> every = EnumSet.noneOf(LimitName.class);
-    search.limits().forEach(limit -> every.add(limit.name()));
-    return every;
-  }
-
-  private boolean holdsWithout(LimitName name) {
-    CoilSet others = search.bounded(Limits.without(left.practical(), name));
-    for (double coils : search.step().in(others)) {
-      if (search.holdsBut(name, coils)) {
-        return true;
-      }
-    }
-    return false;
-  }
-
-  /** Whether some count that is no multiple of the step would do: ends and middles are tried. */
-  private boolean holdsBetweenSteps() {
-    CoilSet ranges = search.bounded(Limits.together(left.exact()));
-    for (CoilSet.Interval range : ranges.intervals()) {
-      for (double share : TRIED_BETWEEN_STEPS) {
-        double coils = range.from() + share * (range.to() - range.from());
-        if (coils > 0 && search.holdsBut(LimitName.COIL_STEP, coils)) {
-          return true;
-        }
-      }
-    }
-    return false;
   }
 }

@@ -2,6 +2,7 @@ package coilwright.search;
 
 import coilwright.limit.CoilSet;
 import coilwright.limit.Limit;
+import coilwright.limit.Reach;
 import coilwright.limit.Trail;
 import coilwright.problem.LimitName;
 import coilwright.spring.Family;
@@ -67,6 +68,17 @@ final class WireSearch<S extends State> {
       }
     }
     return true;
+  }
+
+  /** What a limit leaves by itself of the unrounded springs: all its bounds together. */
+  CoilSet alone(LimitName name) {
+    CoilSet set = CoilSet.ALL;
+    for (Limit<S> limit : limits) {
+      if (limit.name() == name && !limit.onlyAfterRounding()) {
+        set = set.intersect(Reach.of(limit, family));
+      }
+    }
+    return set;
   }
 
   /** What each limit leaves. */

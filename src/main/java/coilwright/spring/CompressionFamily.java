@@ -84,7 +84,10 @@ public record CompressionFamily(
    */
   @Override
   public double roundingShare(double coils) {
-    double meanDiameter = meanDiameterAt(coils);
+    return shareAt(meanDiameterAt(coils));
+  }
+
+  private double shareAt(double meanDiameter) {
     return 6 * rounding.diameterStepAt(meanDiameter) / 2 / meanDiameter
         + 3 * rounding.lengthStepAt(meanDiameter) / 2 / greatestDeflection();
   }
@@ -99,7 +102,7 @@ public record CompressionFamily(
   public double play(double coils) {
     double meanDiameter = meanDiameterAt(coils);
     double fitting = rounding.lengthStepAt(meanDiameter) / 2 / wire.diameter();
-    return SAFETY * (coils * roundingShare(coils) / slope(meanDiameter) + fitting);
+    return SAFETY * (coils * shareAt(meanDiameter) / slope(meanDiameter) + fitting);
   }
 
   private double greatestDeflection() {

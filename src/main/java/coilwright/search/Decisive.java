@@ -1,0 +1,85 @@
+package coilwright.search;
+
+import coilwright.limit.CoilSet;
+import coilwright.problem.LimitName;
+import coilwright.spring.State;
+import java.util.EnumSet;
+import java.util.List;
+import java.util.Map;
+import java.util.Set;
+
+/** The limits that alone keep out a wire: without any one of them some spring of it would do. */
+final class Decisive<S extends State> {
+
+  private static final double[] TRIED_BETWEEN_STEPS = {0.5, 0, 1, 0.25, 0.75};
+  private static final double CLOSE = 1.002;
+
+  private final WireSearch<S> search;
+  private final Limits left;
+
+  Decisive(WireSearch<S> search) {
+    this.search = search;
+    this.left = search.left();
+  }
+
+  /** The limits; the coil step where some count that is no multiple of it would do. */
+  Set<LimitName> limits() {
+    Set<LimitName> decisive = EnumSet.noneOf(LimitName.class);
+    for (LimitName name : suspects()) {
+      if (name.removable() && holdsWithout(name)) {
+        decisive.add(name);
+      }
+    }
+    if (holdsBetweenSteps()) {
+      decisive.add(LimitName.COIL_STEP);
+    }
+    return decisive;
+  }
+
+  /** The limits that may decide: those that leave less than all, or any that rounding may break. */
+  private Set<LimitName> suspects() {
+    if (Limits.together(left.practical()).isEmpty()) {
+      return left.exact().keySet();
+    }
+    Set<LimitName> every = EnumSet.noneOf(LimitName.class);
+    search.limits().forEach(limit -> every.add(limit.name()));
+    return every;
+  }
+
+  private boolean holdsWithout(LimitName name) {
+    CoilSet others = search.bounded(Limits.without(left.practical(), name));
+    return search.step().any(others, coils -> search.holdsBut(name, coils));
+  }
+
+  /**
+   * Whether some count that is no multiple of the step would do. Tried are the ends and middles of
+   * what the limits leave before rounding, and counts so close that between two of them no force
+   * changes by more than a fraction of what rounding may cost.
+   */
+  private boolean holdsBetweenSteps() {
+    for (CoilSet.Interval range : ranges(left.exact())) {
+      for (double share : TRIED_BETWEEN_STEPS) {
+        if (holdsAt(range.from() + share * (range.to() - range.from()))) {
+          return true;
+        }
+      }
+    }
+    for (CoilSet.Interval range : ranges(left.practical())) {
+      double coils = Math.max(range.from(), search.family().fewestCoils());
+      for (; coils < range.to(); coils *= CLOSE) {
+        if (holdsAt(coils)) {
+          return true;
+        }
+      }
+    }
+    return false;
+  }
+
+  private List<CoilSet.Interval> ranges(Map<LimitName, CoilSet> sets) {
+    return search.bounded(Limits.together(sets)).intervals();
+  }
+
+  private boolean holdsAt(double coils) {
+    return coils > 0 && search.holdsBut(LimitName.COIL_STEP, coils);
+  }
+}
