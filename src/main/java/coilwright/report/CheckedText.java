@@ -14,7 +14,7 @@ import java.util.List;
 public final class CheckedText {
 
   private final Checked checked;
-  private final StringBuilder text = new StringBuilder();
+  private final Lines lines = new Lines();
 
   private CheckedText(Checked checked) {
     this.checked = checked;
@@ -34,8 +34,8 @@ public final class CheckedText {
     }
     report.checks(report.findings());
     checked.check().spring().ifPresent(spring -> report.cost(Cost.of(spring.state())));
-    report.foot();
-    return report.text.toString();
+    report.lines.foot(Warnings.of(checked));
+    return report.lines.text();
   }
 
   private List<Finding> findings() {
@@ -47,12 +47,12 @@ public final class CheckedText {
   }
 
   private void head() {
-    line(Understood.title(checked.problem()));
-    line(verdict());
-    line("");
-    line("Understood");
-    text.append(Understood.of(checked.problem(), List.of(checked.check().grade())));
-    line("");
+    lines.line(Understood.title(checked.problem()));
+    lines.line(verdict());
+    lines.line("");
+    lines.line("Understood");
+    lines.block(Understood.of(checked.problem(), List.of(checked.check().grade())));
+    lines.line("");
   }
 
   private String verdict() {
@@ -69,7 +69,7 @@ public final class CheckedText {
 
   private void spring(Candidate<CompressionState> candidate) {
     CompressionState state = candidate.state();
-    line(
+    lines.line(
         "The spring: "
             + Wires.text(state.wire())
             + ", "
@@ -93,13 +93,13 @@ public final class CheckedText {
     } else {
       table.row("critical deflection", Numbers.fixed(critical, 2), "mm");
     }
-    text.append(table.text("  "));
-    line("");
+    lines.table(table);
+    lines.line("");
     loads(state);
   }
 
   private void loads(CompressionState state) {
-    line("Its loads");
+    lines.line("Its loads");
     TextTable table = new TextTable("lrrrrr");
     List<String> head = new ArrayList<>(List.of(""));
     for (Quantity<LoadState> quantity : CompressionQuantities.LOAD) {
@@ -110,8 +110,8 @@ public final class CheckedText {
       table.row(cells("load " + (i + 1), state.loads().get(i)));
     }
     table.row(cells("solid", state.solid()));
-    text.append(table.text("  "));
-    line("");
+    lines.table(table);
+    lines.line("");
   }
 
   private static String[] cells(String name, LoadState load) {
@@ -123,7 +123,7 @@ public final class CheckedText {
   }
 
   private void checks(List<Finding> findings) {
-    line("Every check");
+    lines.line("Every check");
     List<String> sources =
         findings.stream().map(finding -> finding.source().text()).distinct().toList();
     TextTable table = new TextTable("llrlrlrrl");
@@ -140,11 +140,11 @@ public final class CheckedText {
           "[" + (sources.indexOf(finding.source().text()) + 1) + "]",
           finding.check().definition());
     }
-    text.append(table.text("  "));
+    lines.table(table);
     for (int i = 0; i < sources.size(); i++) {
-      line("  [" + (i + 1) + "] " + sources.get(i));
+      lines.line("  [" + (i + 1) + "] " + sources.get(i));
     }
-    line("");
+    lines.line("");
   }
 
   private static String number(Finding finding, double value) {
@@ -156,30 +156,16 @@ public final class CheckedText {
   private void cost(Cost cost) {
     int parallel = checked.problem().facts().springsInParallel();
     if (parallel > 1) {
-      line("Every figure is for one of the " + parallel + " springs.");
-      line("");
+      lines.line("Every figure is for one of the " + parallel + " springs.");
+      lines.line("");
     }
-    line("Cost proxy, in grams of hard-drawn wire (common practice, no source; not a price)");
+    lines.line("Cost proxy, in grams of hard-drawn wire (common practice, no source; not a price)");
     TextTable table = new TextTable("lr");
     for (Cost.Term term : cost.terms()) {
       table.row(term.name(), Numbers.fixed(term.value(), 2));
     }
     table.row("total", Numbers.fixed(cost.total(), 2));
-    text.append(table.text("  "));
-    line("");
-  }
-
-  private void foot() {
-    List<Warning> warnings = Warnings.of(checked);
-    if (!warnings.isEmpty()) {
-      line("Take note");
-      warnings.forEach(warning -> line("  " + warning.text()));
-      line("");
-    }
-    Cautions.LINES.forEach(this::line);
-  }
-
-  private void line(String words) {
-    text.append(words).append('\n');
+    lines.table(table);
+    lines.line("");
   }
 }

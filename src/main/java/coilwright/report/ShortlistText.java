@@ -32,7 +32,7 @@ public final class ShortlistText {
           column("cost", "cost_index"));
 
   private final Shortlist shortlist;
-  private final StringBuilder text = new StringBuilder();
+  private final Lines lines = new Lines();
 
   /** A number of the spring under a short head. */
   private record Column(String head, Quantity<CompressionState> quantity) {}
@@ -60,40 +60,41 @@ public final class ShortlistText {
       report.list();
     }
     report.ruledOut();
-    report.foot();
-    return report.text.toString();
+    report.lines.foot(Warnings.of(shortlist));
+    return report.lines.text();
   }
 
   private void head() {
-    line(Understood.title(shortlist.problem()));
-    line("");
-    line("Understood");
-    text.append(Understood.of(shortlist.problem(), shortlist.grades()));
-    line("");
+    lines.line(Understood.title(shortlist.problem()));
+    lines.line("");
+    lines.line("Understood");
+    lines.block(Understood.of(shortlist.problem(), shortlist.grades()));
+    lines.line("");
   }
 
   private void list() {
     int wires = shortlist.answer().wires();
     int fit = shortlist.answer().feasible().size();
-    line(fit + " of " + wires + " wires tried can do it, at " + counts() + " in all. " + listed());
-    line("");
+    lines.line(
+        fit + " of " + wires + " wires tried can do it, at " + counts() + " in all. " + listed());
+    lines.line("");
     TextTable table = new TextTable("rlll" + "r".repeat(COLUMNS.size()) + "rl");
     heads(table);
     for (int i = 0; i < shortlist.shown().size(); i++) {
       row(table, i + 1, shortlist.shown().get(i));
     }
-    text.append(table.text("  "));
+    lines.table(table);
     int hidden = listable() - shortlist.shown().size();
     if (hidden > 0) {
-      line("  " + hidden + " more: --top " + listable() + " shows them");
+      lines.line("  " + hidden + " more: --top " + listable() + " shows them");
     }
-    line("");
-    line(
+    lines.line("");
+    lines.line(
         "  n active and nt total coils, D mean and De outside diameter, L0 free and Ls solid length;");
-    line(
+    lines.line(
         "  cost is a proxy in grams of hard-drawn wire, its indices from memory; margins are shares");
-    line("  of the bound." + each());
-    line("");
+    lines.line("  of the bound." + each());
+    lines.line("");
   }
 
   private void heads(TextTable table) {
@@ -163,20 +164,20 @@ public final class ShortlistText {
 
   private void nothing() {
     int wires = shortlist.answer().wires();
-    line("None of the " + wires + (wires == 1 ? " wire" : " wires") + " tried can do it.");
-    line("");
+    lines.line("None of the " + wires + (wires == 1 ? " wire" : " wires") + " tried can do it.");
+    lines.line("");
     List<Conflict> nearest = nearest();
     if (nearest.isEmpty()) {
       return;
     }
-    line("Nearest, and what would have to change");
+    lines.line("Nearest, and what would have to change");
     for (Conflict conflict : nearest) {
-      line("  " + Reasons.of(conflict));
+      lines.line("  " + Reasons.of(conflict));
       for (String remedy : Remedies.of(shortlist.problem(), conflict)) {
-        line("    " + remedy);
+        lines.line("    " + remedy);
       }
     }
-    line("");
+    lines.line("");
   }
 
   /** The nearest wire of each material, nearest first. */
@@ -193,27 +194,14 @@ public final class ShortlistText {
     if (counts.isEmpty()) {
       return;
     }
-    line("What rules wires out, by how many (each under every limit that alone keeps it out,");
-    line("or else under the limits that cannot hold together)");
+    lines.line(
+        "What rules wires out, by how many (each under every limit that alone keeps it out,");
+    lines.line("or else under the limits that cannot hold together)");
     TextTable table = new TextTable("rl");
     counts.entrySet().stream()
         .sorted(Map.Entry.<LimitName, Integer>comparingByValue().reversed())
         .forEach(entry -> table.row(Integer.toString(entry.getValue()), entry.getKey().text()));
-    text.append(table.text("  "));
-    line("");
-  }
-
-  private void foot() {
-    List<Warning> warnings = Warnings.of(shortlist);
-    if (!warnings.isEmpty()) {
-      line("Take note");
-      warnings.forEach(warning -> line("  " + warning.text()));
-      line("");
-    }
-    Cautions.LINES.forEach(this::line);
-  }
-
-  private void line(String words) {
-    text.append(words).append('\n');
+    lines.table(table);
+    lines.line("");
   }
 }
