@@ -164,7 +164,10 @@ public final class ShortlistText {
 
   private void nothing() {
     int wires = shortlist.answer().wires();
-    lines.line("None of the " + wires + (wires == 1 ? " wire" : " wires") + " tried can do it.");
+    lines.line(
+        wires == 0
+            ? "There is no wire to try: the grades have no data for the sizes offered."
+            : "None of the " + wires + (wires == 1 ? " wire" : " wires") + " tried can do it.");
     lines.line("");
     List<Conflict> nearest = nearest();
     if (nearest.isEmpty()) {

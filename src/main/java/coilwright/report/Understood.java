@@ -131,6 +131,9 @@ final class Understood {
   }
 
   private static String step(double step, double small) {
+    if (step == 0 && small == 0) {
+      return "not rounded";
+    }
     return step == small
         ? Numbers.brief(step, 6) + " mm"
         : Numbers.brief(step, 6) + " mm (a tenth below 5 mm mean diameter)";

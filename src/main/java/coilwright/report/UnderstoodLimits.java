@@ -81,6 +81,9 @@ final class UnderstoodLimits {
     if (limit.share().isPresent()) {
       return percent(limit.share().getAsDouble()) + " of tensile strength";
     }
+    if (grades.isEmpty()) {
+      return "the handbook's share of tensile strength";
+    }
     Map<Double, List<String>> byShare = new LinkedHashMap<>();
     for (WireGrade grade : grades) {
       byShare
