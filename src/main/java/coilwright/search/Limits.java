@@ -23,6 +23,7 @@ record Limits(Map<LimitName, CoilSet> exact, Map<LimitName, CoilSet> practical) 
 
   private static final double NEARLY = 10;
   private static final double AROUND = 1.3;
+  private static final double SAMPLED = 0.02;
 
   /**
    * Asks every limit.
@@ -82,10 +83,11 @@ record Limits(Map<LimitName, CoilSet> exact, Map<LimitName, CoilSet> practical) 
     return set.widen(coils -> step.size() + play(coils, trail));
   }
 
+  /** Turns may be sampled, so that the margin is not quite what it comes to there. */
   private static <S extends State> boolean grazes(Limit<S> limit, Trail<S> trail) {
     for (double coils : limit.turns(trail)) {
       if (inRange(coils, trail) == coils
-          && Math.abs(limit.judge(trail.at(coils)).margin()) <= blur(coils, trail)) {
+          && Math.abs(limit.judge(trail.at(coils)).margin()) <= SAMPLED + blur(coils, trail)) {
         return true;
       }
     }
