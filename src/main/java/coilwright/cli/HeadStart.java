@@ -49,6 +49,8 @@ final class HeadStart {
     }
     Thread thread = new Thread(HeadStart::solveSmallProblem, "head start");
     thread.setDaemon(true);
+    // Whatever fails here fails again in the run itself, which can tell the user.
+    thread.setUncaughtExceptionHandler((failed, problem) -> {});
     thread.start();
     return new HeadStart(Optional.of(thread));
   }
@@ -76,7 +78,6 @@ final class HeadStart {
     WireChoice choice = WireChoice.of(problem, catalogue);
     Answer<CompressionState> answer = CompressionSearch.run(problem, choice);
     ShortlistText.of(
-        new Shortlist(
-            problem, choice, answer, RankBy.MASS, false, Order.ranked(answer, RankBy.MASS, false)));
+        new Shortlist(problem, choice, answer, false, Order.ranked(answer, RankBy.MASS, false)));
   }
 }

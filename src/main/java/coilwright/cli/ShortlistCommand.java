@@ -76,9 +76,10 @@ final class ShortlistCommand implements Callable<Integer> {
     result.refuseBadTarget(input);
     headStart.await();
     Catalogue catalogue = Catalogue.load();
-    Problem problem = input.read(Purpose.SHORTLIST, catalogue);
-    format.refuseUnitsToCome(problem.units());
-    Shortlist shortlist = shortlist(problem, catalogue);
+    Problem asked = input.read(Purpose.SHORTLIST, catalogue);
+    format.refuseUnitsToCome(asked.units());
+    RankBy by = rank == null ? asked.rankBy() : rank;
+    Shortlist shortlist = shortlist(asked.ranked(by, top == null ? asked.top() : top), catalogue);
     result.deliver(
         format.of(() -> ShortlistText.of(shortlist), () -> ShortlistJson.of(shortlist)), terminal);
     return shortlist.answer().feasible().isEmpty() ? Status.NOTHING : Status.FOUND;
@@ -87,10 +88,8 @@ final class ShortlistCommand implements Callable<Integer> {
   private Shortlist shortlist(Problem problem, Catalogue catalogue) {
     WireChoice choice = WireChoice.of(problem, catalogue);
     Answer<CompressionState> answer = CompressionSearch.run(problem, choice);
-    RankBy by = rank == null ? problem.rankBy() : rank;
-    List<Candidate<CompressionState>> ranked = Order.ranked(answer, by, all);
-    int most = top != null ? top : all ? ranked.size() : problem.top();
-    return new Shortlist(
-        problem, choice, answer, by, all, ranked.subList(0, Math.min(most, ranked.size())));
+    List<Candidate<CompressionState>> ranked = Order.ranked(answer, problem.rankBy(), all);
+    int most = all && top == null ? ranked.size() : Math.min(problem.top(), ranked.size());
+    return new Shortlist(problem, choice, answer, all, ranked.subList(0, most));
   }
 }

@@ -26,6 +26,8 @@ import java.util.function.ToDoubleFunction;
 public final class CompressionLimits {
 
   private static final Citation ASKED = Citation.seen(Source.PROBLEM_FILE, "envelope");
+  private static final DesignLimits USUAL = DesignLimits.DEFAULTS;
+  private static final Citation GIVEN = Citation.seen(Source.PROBLEM_FILE, "limits");
   private static final Citation PRACTICE = Citation.seen(Source.COMMON_PRACTICE, "");
   private static final Citation CLASH =
       Citation.seen(Source.SHIGLEY, "fractional overrun to closure, at least 0.15");
@@ -46,6 +48,19 @@ public final class CompressionLimits {
    * @return the limits; bounds the file switches off are left out
    */
   public static List<Limit<CompressionState>> of(Problem problem, List<LoadPoint> loads) {
+    return of(problem, loads, OptionalDouble.empty());
+  }
+
+  /**
+   * Every limit that applies, where the free length too is a fact that a spring must agree with.
+   *
+   * @param problem the problem
+   * @param loads the loads of one spring, as its states report them
+   * @param freeLength L0 of the load line asked [mm], or empty
+   * @return the limits; bounds the file switches off are left out
+   */
+  public static List<Limit<CompressionState>> of(
+      Problem problem, List<LoadPoint> loads, OptionalDouble freeLength) {
     CompressionLimits all = new CompressionLimits();
     all.stress(problem.limits());
     all.proportions(problem.limits());
@@ -53,7 +68,7 @@ public final class CompressionLimits {
     all.travel(problem.limits());
     all.stability(problem);
     all.surge(problem.limits());
-    all.nominal(loads);
+    all.nominal(loads, freeLength);
     return List.copyOf(all.limits);
   }
 
@@ -71,9 +86,15 @@ public final class CompressionLimits {
     band(
         LimitName.SPRING_INDEX,
         asked.springIndex(),
+        USUAL.springIndex(),
         "mean diameter over wire diameter",
         state -> state.spring().springIndex());
-    band(LimitName.ACTIVE_COILS, asked.activeCoils(), "active coils", CompressionState::coils);
+    band(
+        LimitName.ACTIVE_COILS,
+        asked.activeCoils(),
+        USUAL.activeCoils(),
+        "active coils",
+        CompressionState::coils);
     asked.maxPitchAngle().ifPresent(this::pitchAngle);
   }
 
@@ -83,7 +104,7 @@ public final class CompressionLimits {
             new Check(LimitName.PITCH_ANGLE, Side.MAX, Dimension.ANGLE, "free state"),
             state -> state.spring().pitchAngle(),
             state -> greatest,
-            PRACTICE,
+            source(OptionalDouble.of(greatest), USUAL.maxPitchAngle(), PRACTICE),
             false,
             CompressionLimits::steepest));
   }
@@ -98,9 +119,26 @@ public final class CompressionLimits {
   }
 
   private void band(
-      LimitName name, Band band, String definition, ToDoubleFunction<CompressionState> value) {
-    fixed(new Check(name, Side.MIN, Dimension.NUMBER, definition), value, band.min(), PRACTICE);
-    fixed(new Check(name, Side.MAX, Dimension.NUMBER, definition), value, band.max(), PRACTICE);
+      LimitName name,
+      Band band,
+      Band usual,
+      String definition,
+      ToDoubleFunction<CompressionState> value) {
+    fixed(
+        new Check(name, Side.MIN, Dimension.NUMBER, definition),
+        value,
+        band.min(),
+        source(band.min(), usual.min(), PRACTICE));
+    fixed(
+        new Check(name, Side.MAX, Dimension.NUMBER, definition),
+        value,
+        band.max(),
+        source(band.max(), usual.max(), PRACTICE));
+  }
+
+  /** Where a bound comes from: the file, unless it is the usual one. */
+  private static Citation source(OptionalDouble bound, OptionalDouble usual, Citation usualSource) {
+    return bound.equals(usual) ? usualSource : GIVEN;
   }
 
   /** Adds a limit against a fixed bound, where there is one. */
@@ -185,7 +223,7 @@ public final class CompressionLimits {
             "travel left between the most compressed load and solid, of the deflection there"),
         CompressionState::clashAllowance,
         asked.clashAllowance(),
-        CLASH);
+        source(asked.clashAllowance(), USUAL.clashAllowance(), CLASH));
     limits.add(
         new ValueLimit<>(
             new Check(
@@ -233,9 +271,9 @@ public final class CompressionLimits {
         Surge.CITATION);
   }
 
-  private void nominal(List<LoadPoint> loads) {
+  private void nominal(List<LoadPoint> loads, OptionalDouble freeLength) {
     if (loads.stream().anyMatch(load -> load.length().isPresent() && load.force().isPresent())) {
-      limits.add(new NominalLoad(loads));
+      limits.add(new NominalLoad(loads, freeLength));
     }
   }
 }

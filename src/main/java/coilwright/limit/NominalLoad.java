@@ -5,8 +5,10 @@ import coilwright.source.Citation;
 import coilwright.source.Source;
 import coilwright.spring.CompressionState;
 import coilwright.spring.LoadPoint;
+import coilwright.spring.LoadState;
 import coilwright.unit.Dimension;
 import java.util.List;
+import java.util.OptionalDouble;
 
 /** The loads of a spring as it is set against the loads asked: what rounding may cost. */
 final class NominalLoad implements Limit<CompressionState> {
@@ -22,9 +24,17 @@ final class NominalLoad implements Limit<CompressionState> {
       Citation.seen(Source.COMMON_PRACTICE, "a drawing rounds within 1 %");
 
   private final List<LoadPoint> asked;
+  private final OptionalDouble freeLength;
   private final double bound;
 
-  NominalLoad(List<LoadPoint> asked) {
+  /**
+   * The loads asked.
+   *
+   * @param asked the loads in the order a state reports them
+   * @param freeLength the length at which no force is asked [mm], where that is a fact of its own
+   */
+  NominalLoad(List<LoadPoint> asked, OptionalDouble freeLength) {
+    this.freeLength = freeLength;
     this.asked = List.copyOf(asked);
     this.bound = SHARE * asked.stream().mapToDouble(load -> load.force().orElse(0)).max().orElse(0);
   }
@@ -36,9 +46,10 @@ final class NominalLoad implements Limit<CompressionState> {
 
   @Override
   public Finding judge(CompressionState state) {
-    double worst = 0;
+    double worst = unloaded(state);
+    List<LoadState> loads = state.loads();
     for (int i = 0; i < asked.size(); i++) {
-      double force = state.loads().get(i).force();
+      double force = loads.get(i).force();
       worst = Math.max(worst, Math.abs(force - asked.get(i).force().orElse(force)));
     }
     return Finding.of(CHECK, worst, bound, SOURCE);
@@ -47,5 +58,11 @@ final class NominalLoad implements Limit<CompressionState> {
   @Override
   public boolean onlyAfterRounding() {
     return true;
+  }
+
+  /** What the spring's line gives at the free length asked, pulling where it is shorter [N]. */
+  private double unloaded(CompressionState state) {
+    double own = state.spring().freeLength();
+    return Math.abs(state.rate() * (own - freeLength.orElse(own)));
   }
 }

@@ -26,4 +26,22 @@ public record DesignLimits(
     StressLimit stressAtLoad,
     StressLimit stressAtSolid,
     BucklingRule buckling,
-    OptionalDouble minSurgeFrequency) {}
+    OptionalDouble minSurgeFrequency) {
+
+  /** What holds where the file says nothing. */
+  public static final DesignLimits DEFAULTS =
+      new DesignLimits(
+          band(5, 12),
+          band(3, 60),
+          OptionalDouble.of(Math.toRadians(12)),
+          OptionalDouble.of(0.15),
+          StressCorrection.BERGSTRAESSER,
+          new StressLimit(true, OptionalDouble.empty()),
+          new StressLimit(true, OptionalDouble.empty()),
+          BucklingRule.AT_LOAD_UNLESS_GUIDED,
+          OptionalDouble.empty());
+
+  private static Band band(double min, double max) {
+    return new Band(OptionalDouble.of(min), OptionalDouble.of(max));
+  }
+}

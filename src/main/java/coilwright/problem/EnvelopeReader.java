@@ -38,6 +38,7 @@ final class EnvelopeReader {
         envelope.maxOutsideDiameter(),
         envelope.minInsideDiameter());
     clearance(section);
+    room(section, envelope);
     return envelope;
   }
 
@@ -63,6 +64,18 @@ final class EnvelopeReader {
       section
           .spot(EnvelopeKeys.CLEARANCE)
           .fault("missing", "needed with bore or rod; its default is " + Later.WORDS);
+    }
+  }
+
+  /** A clearance that fills the bore leaves no coil. */
+  private static void room(Section section, Envelope envelope) {
+    boolean both = envelope.bore().isPresent() && envelope.diametralClearance().isPresent();
+    if (both && !(envelope.diametralClearance().getAsDouble() < envelope.bore().getAsDouble())) {
+      section
+          .spot(EnvelopeKeys.CLEARANCE)
+          .fault(
+              section.shown(EnvelopeKeys.CLEARANCE),
+              "must be below bore, " + section.shown(EnvelopeKeys.BORE));
     }
   }
 }

@@ -1,16 +1,12 @@
 package coilwright.problem;
 
-import coilwright.spring.StressCorrection;
 import java.util.Optional;
 import java.util.OptionalDouble;
 
 /** Reads the limits, merged bound by bound with the defaults. */
 final class LimitsReader {
 
-  private static final Band SPRING_INDEX = band(5, 12);
-  private static final Band ACTIVE_COILS = band(3, 60);
-  private static final OptionalDouble PITCH_ANGLE = OptionalDouble.of(Math.toRadians(12));
-  private static final OptionalDouble CLASH_ALLOWANCE = OptionalDouble.of(0.15);
+  private static final DesignLimits USUAL = DesignLimits.DEFAULTS;
   private static final OptionalDouble NONE = OptionalDouble.empty();
 
   private LimitsReader() {}
@@ -22,20 +18,7 @@ final class LimitsReader {
    * @return the limits; the defaults where the file has none
    */
   static DesignLimits read(Section root) {
-    return root.read(LimitKeys.LIMITS).map(LimitsReader::limits).orElse(defaults());
-  }
-
-  private static DesignLimits defaults() {
-    return new DesignLimits(
-        SPRING_INDEX,
-        ACTIVE_COILS,
-        PITCH_ANGLE,
-        CLASH_ALLOWANCE,
-        StressCorrection.BERGSTRAESSER,
-        new StressLimit(true, NONE),
-        new StressLimit(true, NONE),
-        BucklingRule.AT_LOAD_UNLESS_GUIDED,
-        NONE);
+    return root.read(LimitKeys.LIMITS).map(LimitsReader::limits).orElse(USUAL);
   }
 
   private static DesignLimits limits(Section section) {
@@ -43,16 +26,16 @@ final class LimitsReader {
     return new DesignLimits(
         new BandReader(
                 LimitKeys.SPRING_INDEX, LimitKeys.SPRING_INDEX_MIN, LimitKeys.SPRING_INDEX_MAX)
-            .read(section, SPRING_INDEX),
+            .read(section, USUAL.springIndex()),
         new BandReader(
                 LimitKeys.ACTIVE_COILS, LimitKeys.ACTIVE_COILS_MIN, LimitKeys.ACTIVE_COILS_MAX)
-            .read(section, ACTIVE_COILS),
-        bound(section, LimitKeys.PITCH_ANGLE, LimitKeys.PITCH_ANGLE_MAX, PITCH_ANGLE),
-        BandReader.bound(section.read(LimitKeys.CLASH_ALLOWANCE), CLASH_ALLOWANCE),
-        section.read(LimitKeys.STRESS_CORRECTION).orElse(StressCorrection.BERGSTRAESSER),
+            .read(section, USUAL.activeCoils()),
+        bound(section, LimitKeys.PITCH_ANGLE, LimitKeys.PITCH_ANGLE_MAX, USUAL.maxPitchAngle()),
+        BandReader.bound(section.read(LimitKeys.CLASH_ALLOWANCE), USUAL.clashAllowance()),
+        section.read(LimitKeys.STRESS_CORRECTION).orElse(USUAL.stressCorrection()),
         stress(section, LimitKeys.STRESS_AT_LOAD, LimitKeys.STRESS_AT_LOAD_MAX),
         stress(section, LimitKeys.STRESS_AT_SOLID, LimitKeys.STRESS_AT_SOLID_MAX),
-        section.read(LimitKeys.BUCKLING).orElse(BucklingRule.AT_LOAD_UNLESS_GUIDED),
+        section.read(LimitKeys.BUCKLING).orElse(USUAL.buckling()),
         bound(section, LimitKeys.SURGE_FREQUENCY, LimitKeys.SURGE_FREQUENCY_MIN, NONE));
   }
 
@@ -84,9 +67,5 @@ final class LimitsReader {
     Optional<Setting<Double>> max = setting.get().value().get().read(maxKey);
     boolean judged = max.isEmpty() || max.get().value().isPresent();
     return new StressLimit(judged, BandReader.bound(max, NONE));
-  }
-
-  private static Band band(double min, double max) {
-    return new Band(OptionalDouble.of(min), OptionalDouble.of(max));
   }
 }

@@ -24,9 +24,9 @@ final class MaterialKeys {
           new IdReader(),
           "",
           "a new id",
-          "coil-lot-4711",
-          "coil-lot-4712",
-          "coil-lot-4713");
+          "coil-lot-2608",
+          "coil-lot-2609",
+          "coil-lot-2610");
 
   static final ProblemKey<String> LIKE =
       ProblemKey.of(

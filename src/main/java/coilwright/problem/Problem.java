@@ -40,4 +40,27 @@ public record Problem(
   public Problem {
     ownMaterials = List.copyOf(ownMaterials);
   }
+
+  /**
+   * The same problem with another order.
+   *
+   * @param by the order
+   * @param most how many lines of the ranked list are shown
+   * @return the problem
+   */
+  public Problem ranked(RankBy by, int most) {
+    return new Problem(
+        title,
+        units,
+        facts,
+        required,
+        envelope,
+        seats,
+        make,
+        design,
+        limits,
+        ownMaterials,
+        by,
+        most);
+  }
 }

@@ -3,7 +3,6 @@ package coilwright.report;
 import coilwright.material.Wire;
 import coilwright.material.WireGrade;
 import coilwright.problem.Problem;
-import coilwright.problem.RankBy;
 import coilwright.search.Answer;
 import coilwright.search.Candidate;
 import coilwright.search.WireChoice;
@@ -13,10 +12,9 @@ import java.util.List;
 /**
  * What a shortlist shows.
  *
- * @param problem the problem
+ * @param problem the problem, with the order in which the list stands
  * @param choice the wires it offers
  * @param answer what the search found
- * @param rankedBy the order
  * @param everyCount whether every feasible coil count is listed, or the best of each wire
  * @param shown the candidates listed, best first
  */
@@ -24,7 +22,6 @@ public record Shortlist(
     Problem problem,
     WireChoice choice,
     Answer<CompressionState> answer,
-    RankBy rankedBy,
     boolean everyCount,
     List<Candidate<CompressionState>> shown) {
 

@@ -4,11 +4,9 @@ import coilwright.limit.Finding;
 import coilwright.material.Wire;
 import coilwright.problem.LimitName;
 import coilwright.search.Candidate;
-import coilwright.search.Conflict;
 import coilwright.source.Evidence;
 import coilwright.spring.CompressionState;
 import java.util.ArrayList;
-import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -133,7 +131,7 @@ public final class ShortlistText {
   }
 
   private String order() {
-    return switch (shortlist.rankedBy()) {
+    return switch (shortlist.problem().rankBy()) {
       case MASS -> "lightest first";
       case MARGIN -> "greatest stress margin first";
       case COST -> "lowest cost proxy first";
@@ -169,26 +167,23 @@ public final class ShortlistText {
             ? "There is no wire to try: the grades have no data for the sizes offered."
             : "None of the " + wires + (wires == 1 ? " wire" : " wires") + " tried can do it.");
     lines.line("");
-    List<Conflict> nearest = nearest();
+    List<WayOut> nearest = nearest();
     if (nearest.isEmpty()) {
       return;
     }
     lines.line("Nearest, and what would have to change");
-    for (Conflict conflict : nearest) {
-      lines.line("  " + Reasons.of(conflict));
-      for (String remedy : Remedies.of(shortlist.problem(), conflict)) {
-        lines.line("    " + remedy);
-      }
+    for (WayOut way : nearest) {
+      lines.line("  " + Reasons.of(way.conflict()));
+      lines.line("    " + way.text());
     }
     lines.line("");
   }
 
   /** The nearest wire of each material, nearest first. */
-  private List<Conflict> nearest() {
-    Map<String, Conflict> byMaterial = new LinkedHashMap<>();
-    shortlist.answer().conflicts().stream()
-        .sorted(Comparator.comparingDouble(Nearness::of))
-        .forEach(conflict -> byMaterial.putIfAbsent(conflict.wire().grade().id(), conflict));
+  private List<WayOut> nearest() {
+    Map<String, WayOut> byMaterial = new LinkedHashMap<>();
+    WayOut.nearestFirst(shortlist.problem(), shortlist.answer().conflicts())
+        .forEach(way -> byMaterial.putIfAbsent(way.conflict().wire().grade().id(), way));
     return byMaterial.values().stream().limit(NEAREST).toList();
   }
 

@@ -69,6 +69,12 @@ final class Understood {
     load.force().ifPresent(force -> words.add(Numbers.brief(force, 3) + " N"));
     load.tolerance().map(Understood::tolerance).ifPresent(words::add);
     load.length().ifPresent(length -> words.add("at " + length(length)));
+    if (load.force().isEmpty()) {
+      words.add("(force computed)");
+    }
+    if (load.length().isEmpty()) {
+      words.add("(length computed)");
+    }
     return String.join(" ", words);
   }
 

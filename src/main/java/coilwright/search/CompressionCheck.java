@@ -16,6 +16,7 @@ import coilwright.source.Source;
 import coilwright.spring.CompressionSpring;
 import coilwright.spring.CompressionState;
 import coilwright.spring.Duty;
+import coilwright.spring.LoadLine;
 import coilwright.spring.LoadPoint;
 import coilwright.spring.Seating;
 import coilwright.unit.Dimension;
@@ -55,7 +56,9 @@ public record CompressionCheck(
     return new CompressionCheck(
         grade,
         Optional.empty(),
-        Optional.of(Candidate.judge(state, CompressionLimits.of(problem, loads))));
+        Optional.of(
+            Candidate.judge(
+                state, CompressionLimits.of(problem, loads, freeLength(problem, loads)))));
   }
 
   /** Whether the spring holds everything. */
@@ -84,12 +87,24 @@ public record CompressionCheck(
     return Optional.of(Finding.of(check, diameter, thin ? range.min() : range.max(), DATA));
   }
 
+  /** The loads of one spring; where the facts fix the load line, it completes them. */
   private static List<LoadPoint> loads(Problem problem) {
     if (problem.required().isPresent()) {
-      return problem.required().get().loads();
+      LoadLine line = problem.required().get().line();
+      return problem.required().get().loads().stream().map(load -> load.on(line)).toList();
     }
     int parallel = problem.facts().springsInParallel();
     return problem.facts().loads().stream().map(load -> point(load, parallel)).toList();
+  }
+
+  /** Where one load and another fact fix the line, the free length that follows is asked too. */
+  private static OptionalDouble freeLength(Problem problem, List<LoadPoint> loads) {
+    return loads.size() == 1
+        ? problem
+            .required()
+            .map(required -> OptionalDouble.of(required.line().freeLength()))
+            .orElse(OptionalDouble.empty())
+        : OptionalDouble.empty();
   }
 
   private static LoadPoint point(LoadAsked load, int parallel) {

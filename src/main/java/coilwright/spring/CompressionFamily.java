@@ -106,11 +106,7 @@ public record CompressionFamily(
   }
 
   private double greatestDeflection() {
-    double shortest = Double.POSITIVE_INFINITY;
-    for (LoadPoint load : duty.loads()) {
-      shortest = Math.min(shortest, load.length().orElse(shortest));
-    }
-    return line.freeLength() - shortest;
+    return line.freeLength() - duty.shortestLength().orElseThrow();
   }
 
   /** d ln(K D) / d ln D with the factor (4C + 2)/(4C - 3), kept away from zero. */

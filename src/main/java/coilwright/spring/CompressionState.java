@@ -15,7 +15,6 @@ public final class CompressionState implements State {
   private final double rate;
   private final double solidLength;
   private final double correctionFactor;
-  private final List<LoadState> loads;
   private final LoadState mostCompressed;
   private final LoadState solid;
 
@@ -31,21 +30,11 @@ public final class CompressionState implements State {
     this.rate = spring.rate();
     this.solidLength = spring.solidLength();
     this.correctionFactor = duty.correction().at(spring.springIndex());
-    this.loads = loadStates();
-    this.mostCompressed = shortest(loads);
+    this.mostCompressed =
+        duty.shortestLength().isPresent()
+            ? at(duty.shortestLength().getAsDouble())
+            : shortest(loads());
     this.solid = at(solidLength);
-  }
-
-  private List<LoadState> loadStates() {
-    List<LoadState> states = new ArrayList<>(duty.loads().size());
-    for (LoadPoint point : duty.loads()) {
-      states.add(
-          at(
-              point.length().isPresent()
-                  ? point.length().getAsDouble()
-                  : spring.freeLength() - point.force().orElseThrow() / rate));
-    }
-    return states;
   }
 
   private static LoadState shortest(List<LoadState> loads) {
@@ -128,7 +117,15 @@ public final class CompressionState implements State {
 
   /** The loads, in the order asked. */
   public List<LoadState> loads() {
-    return loads;
+    List<LoadState> states = new ArrayList<>(duty.loads().size());
+    for (LoadPoint point : duty.loads()) {
+      states.add(
+          at(
+              point.length().isPresent()
+                  ? point.length().getAsDouble()
+                  : spring.freeLength() - point.force().orElseThrow() / rate));
+    }
+    return states;
   }
 
   /** The load at the shortest length. */

@@ -20,4 +20,15 @@ public record LoadPoint(OptionalDouble length, OptionalDouble force) {
   public static LoadPoint at(double length, double force) {
     return new LoadPoint(OptionalDouble.of(length), OptionalDouble.of(force));
   }
+
+  /**
+   * This load with what it leaves open taken from a load line.
+   *
+   * @param line the line
+   * @return the load with both length and force
+   */
+  public LoadPoint on(LoadLine line) {
+    double at = length.isPresent() ? length.getAsDouble() : line.lengthUnder(force.orElseThrow());
+    return at(at, force.orElse(line.forceAt(at)));
+  }
 }

@@ -43,4 +43,24 @@ class CheckTest {
     Run.reading(both, "check", "-").refused("given beside make");
     Run.reading(both, "shortlist", "-").refused("given beside make");
   }
+
+  @Test
+  void aRateAskedIsHeldAgainstTheSpringEvenWithOneLoad() {
+    String stiff =
+        "spring: compression\nloads: [{length: 22 mm, force: 45 N}]\nrate: 2.7 N/mm\n"
+            + "design: {material: music-wire, wire_diameter: 1.7 mm, mean_diameter: 12.2 mm, "
+            + "active_coils: 8, free_length: 29.663 mm, ends: squared-ground}\n";
+    assertThat(Run.reading(stiff, "check", "-").found(Status.NOTHING).out())
+        .contains("The spring fails: nominal load.");
+  }
+
+  @Test
+  void aForceAloneIsHeldAgainstTheLineThatOtherFactsFix() {
+    String soft =
+        "spring: compression\nloads: [{force: 20 N}]\nrate: 3 N/mm\nfree_length: 38 mm\n"
+            + "design: {material: music-wire, wire_diameter: 1.4 mm, mean_diameter: 12.2 mm, "
+            + "active_coils: 8, free_length: 38 mm, ends: squared-ground}\n";
+    assertThat(Run.reading(soft, "check", "-").found(Status.NOTHING).out())
+        .contains("nominal load");
+  }
 }

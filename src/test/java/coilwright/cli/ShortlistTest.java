@@ -51,6 +51,48 @@ class ShortlistTest {
   }
 
   @Test
+  void theProblemEchoedStandsInTheOrderOfTheList() {
+    JsonNode rank =
+        piped(Run.VALVE, "--format", "json", "--rank", "cost", "--top", "1")
+            .found(Status.FOUND)
+            .json()
+            .path("problem")
+            .path("rank");
+    assertThat(rank.path("by").asText()).isEqualTo("cost");
+    assertThat(rank.path("top").asInt()).isEqualTo(1);
+  }
+
+  @Test
+  void aBoundFromTheFileIsNotLaidToAHandbook() {
+    String wide = Run.VALVE + "limits: {spring_index: {max: 16}, clash_allowance: 20 %}\n";
+    JsonNode checks =
+        piped(wide, "--format", "json")
+            .found(Status.FOUND)
+            .json()
+            .path("candidates")
+            .path(0)
+            .path("checks");
+    List<String> sources = new ArrayList<>();
+    checks.forEach(
+        check -> {
+          String limit = check.path("limit").asText() + " " + check.path("side").asText();
+          sources.add(limit + ": " + check.path("source").asText());
+        });
+    assertThat(sources)
+        .contains(
+            "spring index min: common practice, no source",
+            "spring index max: problem file, limits",
+            "clash allowance min: problem file, limits");
+  }
+
+  @Test
+  void aLimitThatNoCountMeetsIsExplainedByTheNearestWire() {
+    String flat = Run.VALVE.replace("max_solid_length: 18 mm", "max_free_length: 38 mm");
+    assertThat(piped(flat).found(Status.NOTHING).out())
+        .contains("free length holds at no coil count", "free length 38.67 mm, allowed 38 mm");
+  }
+
+  @Test
   void nothingFoundIsPrintedAllTheSame() {
     assertThat(piped(Run.CRAMPED).found(Status.NOTHING).out()).contains("solid length");
     JsonNode json = piped(Run.CRAMPED, "--format=json").found(Status.NOTHING).json();

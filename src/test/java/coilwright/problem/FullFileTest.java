@@ -46,7 +46,7 @@ class FullFileTest {
       seats: fixed-pinned
       make:
         supply: any
-        materials: [music-wire, coil-lot-4711]
+        materials: [music-wire, coil-lot-2608]
         exclude_materials: hard-drawn
         wire_series: [metric, music-wire-gauge]
         ends: squared
@@ -67,7 +67,7 @@ class FullFileTest {
         buckling: at-solid
         surge_frequency: {min: 200 Hz}
       own_materials:
-        - id: coil-lot-4711
+        - id: coil-lot-2608
           like: music-wire
           tensile_strength: 1900 MPa
       rank: {by: robust, top: 3}
@@ -115,7 +115,7 @@ class FullFileTest {
         .isEqualTo(
             new Make(
                 Supply.ANY,
-                List.of("music-wire", "coil-lot-4711"),
+                List.of("music-wire", "coil-lot-2608"),
                 false,
                 List.of("hard-drawn"),
                 List.of(WireSeries.METRIC, WireSeries.MUSIC_WIRE_GAUGE),

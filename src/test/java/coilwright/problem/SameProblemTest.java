@@ -23,7 +23,7 @@ class SameProblemTest {
          "max_outside_diameter": "15.5 mm", "min_inside_diameter": "8.5 mm",
          "max_free_length": "45 mm", "max_solid_length": "18 mm"},
        "seats": "fixed-pinned",
-       "make": {"supply": "any", "materials": ["music-wire", "coil-lot-4711"],
+       "make": {"supply": "any", "materials": ["music-wire", "coil-lot-2608"],
          "exclude_materials": "hard-drawn", "wire_series": ["metric", "music-wire-gauge"],
          "ends": "squared", "hand": "left", "set_removed": false, "coil_step": 0.5,
          "diameter_step": "0.05 mm", "length_step": "0 mm"},
@@ -32,7 +32,7 @@ class SameProblemTest {
          "stress_correction": "wahl", "stress_at_load": {"max": "40 %"},
          "stress_at_solid": "none", "buckling": "at-solid", "surge_frequency": {"min": "200 Hz"}},
        "own_materials": [
-         {"id": "coil-lot-4711", "like": "music-wire", "tensile_strength": "1900 MPa"}],
+         {"id": "coil-lot-2608", "like": "music-wire", "tensile_strength": "1900 MPa"}],
        "rank": {"by": "robust", "top": 3}}
       """;
 

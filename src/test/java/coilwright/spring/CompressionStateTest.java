@@ -66,7 +66,7 @@ class CompressionStateTest {
   void theShortestLengthIsTheMostCompressed() {
     CompressionState state =
         state(StressCorrection.WAHL, LoadPoint.at(38, 1), LoadPoint.at(30, 2), ALONE_BY_FORCE);
-    assertThat(state.mostCompressed()).isSameAs(state.loads().get(1));
+    assertThat(state.mostCompressed()).isEqualTo(state.loads().get(1));
     assertThat(state.clashAllowance())
         .isCloseTo((30 - state.solidLength()) / (FREE - 30), within(EXACT));
   }

@@ -1,0 +1,146 @@
+package coilwright.report;
+
+import coilwright.limit.CoilSet;
+import coilwright.limit.Finding;
+import coilwright.limit.Limit;
+import coilwright.limit.Side;
+import coilwright.problem.LimitName;
+import coilwright.problem.Problem;
+import coilwright.search.CompressionSearch;
+import coilwright.search.Conflict;
+import coilwright.search.Nearest;
+import coilwright.spring.CompressionFamily;
+import coilwright.spring.CompressionState;
+import coilwright.unit.Dimension;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+
+/**
+ * The way out for a wire without a candidate: the coil count at which least would have to change,
+ * and every limit that would have to give way there.
+ *
+ * @param conflict why the wire has no candidate
+ * @param coils the coil count [-]; NaN where at every count tried a physical fact stands in the way
+ * @param failing what fails there
+ */
+record WayOut(Conflict conflict, double coils, List<Finding> failing) {
+
+  private static final int MOST_COILS_TRIED = 60;
+
+  /** A coil count at a bound fails it by no more than the accuracy of the count. */
+  private static final double AT_THE_BOUND = 1e-6;
+
+  /** Copies the list. */
+  WayOut {
+    failing = List.copyOf(failing);
+  }
+
+  /** The way out of each conflict, the one that asks the smallest change first. */
+  static List<WayOut> nearestFirst(Problem problem, List<Conflict> conflicts) {
+    List<Limit<CompressionState>> limits = CompressionSearch.limits(problem);
+    return conflicts.stream()
+        .map(conflict -> of(problem, limits, conflict))
+        .sorted(Comparator.comparingDouble(WayOut::shortfall))
+        .toList();
+  }
+
+  private static WayOut of(
+      Problem problem, List<Limit<CompressionState>> limits, Conflict conflict) {
+    CompressionFamily family = family(problem, conflict);
+    WayOut best = new WayOut(conflict, Double.NaN, List.of());
+    for (double coils : counts(conflict)) {
+      if (coils >= family.fewestCoils() && coils <= family.mostCoils()) {
+        WayOut way = new WayOut(conflict, coils, failing(family.at(coils), limits));
+        best = way.shortfall() < best.shortfall() ? way : best;
+      }
+    }
+    return best;
+  }
+
+  private static CompressionFamily family(Problem problem, Conflict conflict) {
+    return CompressionSearch.families(problem, List.of(conflict.wire())).stream()
+        .filter(one -> one.endForm().equals(conflict.endForm()))
+        .findFirst()
+        .orElseThrow();
+  }
+
+  /** Where a pair comes closest; else the bounds of all parts, and whole counts. */
+  private static List<Double> counts(Conflict conflict) {
+    List<Conflict.Part> parts = conflict.parts();
+    if (parts.size() == 2) {
+      Nearest nearest = Nearest.of(parts.get(0).coils(), parts.get(1).coils());
+      return List.of(nearest.inFirst(), nearest.inSecond());
+    }
+    List<Double> counts = new ArrayList<>();
+    for (Conflict.Part part : parts) {
+      for (CoilSet.Interval interval : part.coils().intervals()) {
+        counts.add(interval.from());
+        counts.add(interval.to());
+      }
+    }
+    for (int coils = 1; coils <= MOST_COILS_TRIED; coils++) {
+      counts.add((double) coils);
+    }
+    return counts;
+  }
+
+  private static List<Finding> failing(
+      CompressionState state, List<Limit<CompressionState>> limits) {
+    List<Finding> failing = new ArrayList<>();
+    for (Limit<CompressionState> limit : limits) {
+      Finding finding = limit.judge(state);
+      if (!(finding.margin() >= -AT_THE_BOUND)) {
+        failing.add(finding);
+      }
+    }
+    return failing;
+  }
+
+  /** The shares by which limits would have to give way, added; infinite where one cannot [-]. */
+  double shortfall() {
+    double sum = Double.isNaN(coils) ? Double.POSITIVE_INFINITY : 0;
+    for (Finding finding : failing) {
+      boolean removable = finding.check().limit().removable();
+      sum += removable ? -finding.margin() : Double.POSITIVE_INFINITY;
+    }
+    return sum;
+  }
+
+  /** "at 11 coils: stress at load 975 MPa, allowed 873 MPa". */
+  String text() {
+    if (Double.isInfinite(shortfall())) {
+      return "at no coil count would changing the limits be enough";
+    }
+    String at = "at " + Numbers.brief(coils, 2) + " coils: ";
+    return failing.isEmpty()
+        ? at + "only rounding stands in the way; try finer steps"
+        : at + String.join("; ", failing.stream().map(WayOut::need).toList());
+  }
+
+  private static String need(Finding finding) {
+    Dimension dimension = finding.check().dimension();
+    return judged(finding.check().limit())
+        + " "
+        + number(dimension, finding.value())
+        + (finding.check().side() == Side.MAX ? ", allowed " : ", needed ")
+        + number(dimension, finding.bound());
+  }
+
+  /** The number that a limit judges, where its name alone would mislead. */
+  private static String judged(LimitName name) {
+    return switch (name) {
+      case BORE -> "outside diameter in the bore";
+      case ROD -> "inside diameter over the rod";
+      case BUCKLING -> "deflection, against buckling,";
+      default -> name.text();
+    };
+  }
+
+  private static String number(Dimension dimension, double value) {
+    String unit = OutputUnits.METRIC.symbol(dimension);
+    int decimals = dimension == Dimension.STRESS ? 0 : 2;
+    String number = Numbers.brief(OutputUnits.METRIC.convert(dimension, value), decimals);
+    return unit.isEmpty() ? number : number + " " + unit;
+  }
+}
