@@ -58,7 +58,7 @@ public final class Figures {
     text.append("| problem | wires | fit | candidates | search ms | scan ms | search/scan |");
     text.append(" states search | states scan | share |\n");
     text.append("|---|---|---|---|---|---|---|---|---|---|\n");
-    for (String problem : new String[] {"typical", "loose", "infeasible"}) {
+    for (String problem : new String[] {"typical", "loose", "infeasible", "wide"}) {
       text.append(row(problem, times));
     }
     text.append("\n## Whole runs in turns, 21 pairs, heap 256 MB\n\n");

@@ -28,8 +28,8 @@ import org.openjdk.jmh.annotations.Warmup;
 @Threads(1)
 public class SearchBenchmark {
 
-  /** Which problem: typical, loose or infeasible. */
-  @Param({"typical", "loose", "infeasible"})
+  /** Which problem: typical, loose, infeasible, or typical over both series for every grade. */
+  @Param({"typical", "loose", "infeasible", "wide"})
   public String problem;
 
   private Workload workload;

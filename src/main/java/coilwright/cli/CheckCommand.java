@@ -36,18 +36,15 @@ final class CheckCommand implements Callable<Integer> {
   @Mixin private ResultOptions result;
 
   private final Terminal terminal;
-  private final HeadStart headStart;
 
-  CheckCommand(Terminal terminal, HeadStart headStart) {
+  CheckCommand(Terminal terminal) {
     this.terminal = terminal;
-    this.headStart = headStart;
   }
 
   @Override
   public Integer call() throws IOException {
     ProblemFile input = new ProblemFile(file, terminal);
     result.refuseBadTarget(input);
-    headStart.await();
     Catalogue catalogue = Catalogue.load();
     Problem problem = input.read(Purpose.CHECK, catalogue);
     format.refuseUnitsToCome(problem.units());

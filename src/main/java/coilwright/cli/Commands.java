@@ -13,9 +13,9 @@ final class Commands {
 
   private final Map<String, Supplier<Object>> byName = new LinkedHashMap<>();
 
-  Commands(Terminal terminal, HeadStart headStart) {
-    byName.put("shortlist", () -> new ShortlistCommand(terminal, headStart));
-    byName.put("check", () -> new CheckCommand(terminal, headStart));
+  Commands(Terminal terminal) {
+    byName.put("shortlist", () -> new ShortlistCommand(terminal));
+    byName.put("check", () -> new CheckCommand(terminal));
     byName.put("materials", () -> new MaterialsCommand(terminal));
     byName.put("wires", () -> new WiresCommand(terminal));
     byName.put("starter", () -> new StarterCommand(terminal));

@@ -14,12 +14,11 @@ public final class Main {
    * @param args command line
    */
   public static void main(String[] args) {
-    HeadStart headStart = HeadStart.forArguments(args);
     Terminal terminal =
         new Terminal(
             System.in,
             new FileOutputStream(FileDescriptor.out),
             new FileOutputStream(FileDescriptor.err));
-    System.exit(Program.run(terminal, headStart, args));
+    System.exit(Program.run(terminal, args));
   }
 }

@@ -19,15 +19,10 @@ public final class Program {
    * @return the exit status: 0 found, 1 failed, 2 refused, 3 nothing found
    */
   public static int run(Terminal terminal, String... args) {
-    return run(terminal, HeadStart.none(), args);
-  }
-
-  /** The same with a head start that may be under way. */
-  static int run(Terminal terminal, HeadStart headStart, String... args) {
     StringWriter out = new StringWriter();
     StringWriter err = new StringWriter();
     try {
-      int status = commandLine(new Commands(terminal, headStart), out, err, args).execute(args);
+      int status = commandLine(new Commands(terminal), out, err, args).execute(args);
       terminal.complain(err.toString());
       terminal.print(out.toString().replace("\r\n", "\n"));
       return status;

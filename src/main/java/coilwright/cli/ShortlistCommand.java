@@ -63,18 +63,15 @@ final class ShortlistCommand implements Callable<Integer> {
   private boolean all;
 
   private final Terminal terminal;
-  private final HeadStart headStart;
 
-  ShortlistCommand(Terminal terminal, HeadStart headStart) {
+  ShortlistCommand(Terminal terminal) {
     this.terminal = terminal;
-    this.headStart = headStart;
   }
 
   @Override
   public Integer call() throws IOException {
     ProblemFile input = new ProblemFile(file, terminal);
     result.refuseBadTarget(input);
-    headStart.await();
     Catalogue catalogue = Catalogue.load();
     Problem asked = input.read(Purpose.SHORTLIST, catalogue);
     format.refuseUnitsToCome(asked.units());
