@@ -36,13 +36,4 @@ public record Conflict(Wire wire, String endForm, List<Part> parts) {
     parts.forEach(part -> names.add(part.limit()));
     return names;
   }
-
-  /** How far apart the limits are, in coils; zero where it is not two counts that are apart. */
-  public double gap() {
-    if (parts.size() != 2) {
-      return 0;
-    }
-    double distance = parts.get(0).coils().distanceTo(parts.get(1).coils());
-    return distance < Double.POSITIVE_INFINITY ? distance : 0;
-  }
 }

@@ -15,7 +15,7 @@ import org.junit.jupiter.api.Test;
 class StreamsTest {
 
   private static final String TITLE = "Gew\u00e4chshaus \u6e29\u5ba4 \ud83c\udf31";
-  private static final String STEERING = "\"a\\e[31mb\\x7Fc\\x9Bd\\x85e\\tf\\ng\"";
+  private static final String CONTROLS = "\"a\\e[31mb\\x7Fc\\x9Bd\\x85e\\tf\\ng\"";
 
   @Test
   void sameBytesTwice() {
@@ -44,9 +44,9 @@ class StreamsTest {
 
   @Test
   void controlCharactersDoNotLeaveTheProgram() {
-    Run text = titled(STEERING, "text");
+    Run text = titled(CONTROLS, "text");
     assertThat(text.out()).doesNotContainPattern("[\\p{Cc}&&[^\n]]").startsWith("a [31mb c d e f");
-    Run json = titled(STEERING, "json");
+    Run json = titled(CONTROLS, "json");
     assertThat(json.out()).doesNotContainPattern("[\\p{Cc}&&[^\n]]");
     assertThat(json.json().path("problem").path("title").asText())
         .isEqualTo("a\u001b[31mb\u007fc\u009bd\u0085e\tf\ng");

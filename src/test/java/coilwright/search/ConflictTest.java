@@ -64,7 +64,7 @@ class ConflictTest {
     double widest = widest(new ArrayList<>(alone.values()));
     if (widest > 0 && alone.values().stream().noneMatch(CoilSet::isEmpty)) {
       assertThat(wire.parts()).as(wire.toString()).hasSize(2);
-      assertThat(wire.outcome().conflict().orElseThrow().gap())
+      assertThat(wire.parts().get(0).coils().distanceTo(wire.parts().get(1).coils()))
           .as(wire.toString())
           .isCloseTo(widest, withPercentage(1e-4));
       wire.parts().forEach(part -> isWhatItLeaves(wire, part, alone.get(part.limit())));
