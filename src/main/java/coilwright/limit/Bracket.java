@@ -13,8 +13,12 @@ import org.apache.commons.math3.analysis.solvers.PegasusSolver;
  */
 final class Bracket<S extends State> {
 
+  /** Of a coil count, as a share: a tenth of what a margin may fall short and still hold. */
   private static final double ACCURACY = 1e-10;
+
+  /** Ratios of value and bound beyond this say only on which side they are. */
   private static final double WIDEST = 30;
+
   private static final int MOST_EVALUATIONS = 200;
 
   private final Limit<S> limit;

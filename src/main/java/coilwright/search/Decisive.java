@@ -12,6 +12,8 @@ import java.util.Set;
 final class Decisive<S extends State> {
 
   private static final double[] TRIED_BETWEEN_STEPS = {0.5, 0, 1, 0.25, 0.75};
+
+  /** Counts tried between steps are this ratio apart; see {@link #holdsBetweenSteps}. */
   private static final double CLOSE = 1.002;
 
   private final WireSearch<S> search;

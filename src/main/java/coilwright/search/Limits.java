@@ -21,8 +21,13 @@ import java.util.function.DoubleUnaryOperator;
  */
 record Limits(Map<LimitName, CoilSet> exact, Map<LimitName, CoilSet> practical) {
 
+  /** How many times the family's rounding share a margin may miss and still be judged rounded. */
   private static final double NEARLY = 10;
+
+  /** How far to either side of a bound rounding is asked for, as a ratio of coil counts. */
   private static final double AROUND = 1.3;
+
+  /** What a margin may differ at a turn that was found by sampling [-]. */
   private static final double SAMPLED = 0.02;
 
   /**
