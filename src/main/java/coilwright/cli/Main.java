@@ -6,6 +6,9 @@ import java.io.FileOutputStream;
 /** The program's entry: runs the command line and exits with its status. */
 public final class Main {
 
+  /** Kinds of value that no option of ours takes; picocli need not load what reads them. */
+  private static final String UNUSED_CONVERTERS = "java.sql.*,java.time.*";
+
   private Main() {}
 
   /**
@@ -14,6 +17,7 @@ public final class Main {
    * @param args command line
    */
   public static void main(String[] args) {
+    System.setProperty("picocli.converters.excludes", UNUSED_CONVERTERS);
     Terminal terminal =
         new Terminal(
             System.in,

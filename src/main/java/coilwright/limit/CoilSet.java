@@ -135,6 +135,10 @@ public record CoilSet(List<Interval> intervals) {
    *     share one, positive infinity where either is empty
    */
   public double distanceTo(CoilSet other) {
+    double apart = Math.max(least() - other.greatest(), other.least() - greatest());
+    if (apart > 0 || intervals.size() == 1 && other.intervals.size() == 1) {
+      return Math.max(0, apart);
+    }
     double least = Double.POSITIVE_INFINITY;
     for (Interval mine : intervals) {
       for (Interval theirs : other.intervals) {

@@ -4,8 +4,6 @@ import coilwright.limit.CoilSet;
 import coilwright.problem.LimitName;
 import coilwright.spring.State;
 import java.util.EnumSet;
-import java.util.List;
-import java.util.Map;
 import java.util.Set;
 
 /** The limits that alone keep out a wire: without any one of them some spring of it would do. */
@@ -38,10 +36,14 @@ final class Decisive<S extends State> {
     return decisive;
   }
 
-  /** The limits that may decide: those that leave less than all, or any that rounding may break. */
+  /**
+   * The limits that may decide: of two that cross only these, for without another they still cross;
+   * else those that leave less than all, or any that rounding may break.
+   */
   private Set<LimitName> suspects() {
-    if (Limits.together(left.practical()).isEmpty()) {
-      return left.exact().keySet();
+    if (search.practical().isEmpty()) {
+      Set<LimitName> crossing = Limits.crossing(left.practical());
+      return crossing.isEmpty() ? left.exact().keySet() : crossing;
     }
     Set<LimitName> every = EnumSet.noneOf(LimitName.class);
     search.limits().forEach(limit -> every.add(limit.name()));
@@ -59,14 +61,17 @@ final class Decisive<S extends State> {
    * changes by more than a fraction of what rounding may cost.
    */
   private boolean holdsBetweenSteps() {
-    for (CoilSet.Interval range : ranges(left.exact())) {
+    if (search.practical().isEmpty()) {
+      return false;
+    }
+    for (CoilSet.Interval range : search.bounded(Limits.together(left.exact())).intervals()) {
       for (double share : TRIED_BETWEEN_STEPS) {
         if (holdsAt(range.from() + share * (range.to() - range.from()))) {
           return true;
         }
       }
     }
-    for (CoilSet.Interval range : ranges(left.practical())) {
+    for (CoilSet.Interval range : search.practical().intervals()) {
       double coils = Math.max(range.from(), search.family().fewestCoils());
       for (; coils < range.to(); coils *= CLOSE) {
         if (holdsAt(coils)) {
@@ -75,10 +80,6 @@ final class Decisive<S extends State> {
       }
     }
     return false;
-  }
-
-  private List<CoilSet.Interval> ranges(Map<LimitName, CoilSet> sets) {
-    return search.bounded(Limits.together(sets)).intervals();
   }
 
   private boolean holdsAt(double coils) {

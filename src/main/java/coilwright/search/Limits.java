@@ -7,8 +7,10 @@ import coilwright.limit.Trail;
 import coilwright.problem.LimitName;
 import coilwright.spring.State;
 import java.util.EnumMap;
+import java.util.EnumSet;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import java.util.function.DoubleUnaryOperator;
 
 /**
@@ -57,11 +59,7 @@ record Limits(Map<LimitName, CoilSet> exact, Map<LimitName, CoilSet> practical) 
 
   /** What all names leave together. */
   static CoilSet together(Map<LimitName, CoilSet> sets) {
-    CoilSet shared = CoilSet.ALL;
-    for (CoilSet set : sets.values()) {
-      shared = shared.intersect(set);
-    }
-    return shared;
+    return without(sets, null);
   }
 
   /** What all names but one leave together. */
@@ -70,9 +68,34 @@ record Limits(Map<LimitName, CoilSet> exact, Map<LimitName, CoilSet> practical) 
     for (Map.Entry<LimitName, CoilSet> entry : sets.entrySet()) {
       if (entry.getKey() != left) {
         shared = shared.intersect(entry.getValue());
+        if (shared.isEmpty()) {
+          return shared;
+        }
       }
     }
     return shared;
+  }
+
+  /**
+   * The name that begins last and the one that ends first, where nothing lies between: one and the
+   * same where it leaves nothing. Empty where they meet.
+   */
+  static Set<LimitName> crossing(Map<LimitName, CoilSet> sets) {
+    LimitName last = null;
+    LimitName first = null;
+    double least = 0;
+    double greatest = Double.POSITIVE_INFINITY;
+    for (Map.Entry<LimitName, CoilSet> entry : sets.entrySet()) {
+      if (entry.getValue().least() > least) {
+        least = entry.getValue().least();
+        last = entry.getKey();
+      }
+      if (entry.getValue().greatest() < greatest) {
+        greatest = entry.getValue().greatest();
+        first = entry.getKey();
+      }
+    }
+    return least > greatest ? EnumSet.of(last, first) : EnumSet.noneOf(LimitName.class);
   }
 
   /**

@@ -7,7 +7,6 @@ import coilwright.spring.State;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
-import java.util.Optional;
 import java.util.Set;
 
 /** Why a wire has no candidate. */
@@ -15,20 +14,28 @@ final class Rejection<S extends State> {
 
   private final WireSearch<S> search;
   private final Limits left;
+  private Conflict conflict;
 
   Rejection(WireSearch<S> search) {
     this.search = search;
     this.left = search.left();
   }
 
-  Outcome<S> outcome() {
-    Conflict conflict = conflict();
+  /** The limits counted against the wire: those that alone keep it out, else all in conflict. */
+  Set<LimitName> ruledOutBy() {
     Set<LimitName> decisive = new Decisive<>(search).limits();
-    return new Outcome<>(
-        List.of(), Optional.of(conflict), decisive.isEmpty() ? conflict.limits() : decisive);
+    return decisive.isEmpty() ? conflict().limits() : decisive;
   }
 
-  private Conflict conflict() {
+  /** The limits that cannot hold together; worked out once. */
+  Conflict conflict() {
+    if (conflict == null) {
+      conflict = inConflict();
+    }
+    return conflict;
+  }
+
+  private Conflict inConflict() {
     List<Conflict.Part> parts = new Explanation(sets()).parts();
     if (parts.isEmpty()) {
       parts = new Explanation(afterRounding()).parts();

@@ -27,7 +27,7 @@ public final class Search {
   public static <S extends State> Answer<S> run(
       List<? extends Family<S>> families, List<Limit<S>> limits, CoilStep step, int outsideRange) {
     List<List<Candidate<S>>> feasible = new ArrayList<>();
-    List<Conflict> conflicts = new ArrayList<>();
+    List<Rejection<S>> rejections = new ArrayList<>();
     Map<LimitName, Integer> ruledOut = new EnumMap<>(LimitName.class);
     if (outsideRange > 0) {
       ruledOut.put(LimitName.WIRE_RANGE, outsideRange);
@@ -36,11 +36,11 @@ public final class Search {
       Outcome<S> outcome = new WireSearch<>(family, limits, step).outcome();
       if (outcome.candidates().isEmpty()) {
         outcome.ruledOutBy().forEach(name -> ruledOut.merge(name, 1, Integer::sum));
-        outcome.conflict().ifPresent(conflicts::add);
+        outcome.rejection().ifPresent(rejections::add);
       } else {
         feasible.add(outcome.candidates());
       }
     }
-    return new Answer<>(families.size(), feasible, ruledOut, conflicts);
+    return new Answer<>(families.size(), feasible, ruledOut, new Conflicts(rejections));
   }
 }

@@ -8,7 +8,6 @@ import coilwright.problem.LimitName;
 import coilwright.spring.Family;
 import coilwright.spring.State;
 import java.util.ArrayList;
-import java.util.EnumSet;
 import java.util.List;
 import java.util.Optional;
 
@@ -22,25 +21,25 @@ final class WireSearch<S extends State> {
   private final List<Limit<S>> limits;
   private final CoilStep step;
   private final Limits left;
+  private final CoilSet practical;
 
   WireSearch(Family<S> family, List<Limit<S>> limits, CoilStep step) {
     this.family = new Trail<>(family);
     this.limits = limits;
     this.step = step;
     this.left = Limits.of(limits, this.family, step);
+    this.practical = bounded(Limits.together(left.practical()));
   }
 
   Outcome<S> outcome() {
     List<Candidate<S>> candidates = candidates();
-    if (!candidates.isEmpty()) {
-      return new Outcome<>(candidates, Optional.empty(), EnumSet.noneOf(LimitName.class));
-    }
-    return new Rejection<>(this).outcome();
+    return new Outcome<>(
+        candidates, candidates.isEmpty() ? Optional.of(new Rejection<>(this)) : Optional.empty());
   }
 
   private List<Candidate<S>> candidates() {
     List<Candidate<S>> held = new ArrayList<>();
-    for (double coils : step.in(bounded(Limits.together(left.practical())))) {
+    for (double coils : step.in(practical)) {
       judged(coils).filter(Candidate::holds).ifPresent(held::add);
     }
     return held;
@@ -84,6 +83,11 @@ final class WireSearch<S extends State> {
   /** What each limit leaves. */
   Limits left() {
     return left;
+  }
+
+  /** Where a rounded spring may hold every limit. */
+  CoilSet practical() {
+    return practical;
   }
 
   /** The practical counts. */
