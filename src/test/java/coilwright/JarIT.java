@@ -64,6 +64,27 @@ class JarIT {
   }
 
   @Test
+  void startScriptGivesTheSameAnswerWithItsArchiveAndWithout() throws Exception {
+    Path copy = Files.createDirectory(folder.resolve("moved"));
+    Path script = JAR.resolveSibling("coilwright");
+    Files.copy(JAR, copy.resolve("coilwright.jar"));
+    Files.copy(script, copy.resolve("coilwright"));
+    Files.createSymbolicLink(folder.resolve("linked"), copy.resolve("coilwright"));
+    Ran ran =
+        bash(
+            "for start in '"
+                + SMALL_HEAP
+                + "' "
+                + script
+                + " ./linked; do"
+                + " $start shortlist "
+                + EXAMPLE
+                + " | sha256sum; done | uniq | wc -l",
+            Map.of());
+    assertThat(ran).isEqualTo(new Ran(0, "1\n", ""));
+  }
+
+  @Test
   void nameThatTheLocaleCannotExpressIsRefusedInWords() throws Exception {
     Ran ran =
         bash("java -jar " + JAR + " shortlist $'gew\\xc3\\xa4chs.yaml'", Map.of("LC_ALL", "C"));

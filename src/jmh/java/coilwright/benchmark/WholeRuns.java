@@ -18,11 +18,21 @@ record WholeRuns(double[] hello, double[] shortlist) {
   private static final String JAVA =
       System.getProperty("java.home") + File.separator + "bin" + File.separator + "java";
 
+  /** The program as `java -jar` starts it, against a bare Java start. */
+  static WholeRuns ofJar(String problemFile) throws IOException, InterruptedException {
+    return inTurns(
+        List.of(JAVA, "-Xmx256m", "-jar", "target/coilwright.jar", "shortlist", problemFile));
+  }
+
+  /** The program as its start script starts it, against a bare Java start. */
+  static WholeRuns ofScript(String problemFile) throws IOException, InterruptedException {
+    return inTurns(List.of("target/coilwright", "shortlist", problemFile));
+  }
+
   /** Runs both in turns; the first round warms the file cache and does not count. */
-  static WholeRuns measure(String problemFile) throws IOException, InterruptedException {
+  private static WholeRuns inTurns(List<String> shortlist)
+      throws IOException, InterruptedException {
     List<String> hello = List.of(JAVA, "-cp", "target/test-classes", HelloWorld.class.getName());
-    List<String> shortlist =
-        List.of(JAVA, "-Xmx256m", "-jar", "target/coilwright.jar", "shortlist", problemFile);
     double[] first = new double[ROUNDS];
     double[] second = new double[ROUNDS];
     for (int i = -1; i < ROUNDS; i++) {

@@ -19,6 +19,7 @@ import java.io.IOException;
 import java.io.InputStream;
 import java.io.UncheckedIOException;
 import java.util.List;
+import java.util.Objects;
 import java.util.concurrent.atomic.AtomicLong;
 
 /** A problem over the whole catalogue, ready to be searched and to be scanned. */
@@ -56,13 +57,15 @@ final class Workload {
     return families.size();
   }
 
-  /** The search of the program. */
+  /** The search of the program, with every conflict worked out. */
   Answer<CompressionState> search() {
     return search(families);
   }
 
   private Answer<CompressionState> search(List<? extends Family<CompressionState>> over) {
-    return Search.run(over, limits, step, 0);
+    Answer<CompressionState> answer = Search.run(over, limits, step, 0);
+    answer.conflicts().forEach(Objects::requireNonNull);
+    return answer;
   }
 
   /** Every practical count within the limits on active coils, judged; how many hold. */
