@@ -59,10 +59,10 @@ public final class Figures {
     text.append("Command: `mvn -B -ntp -P benchmark verify -DskipTests`\n\n");
     text.append("Machine: ").append(machine()).append("\n\n");
     text.append("## Warm search of the whole catalogue, one core, heap 256 MB\n\n");
-    text.append("A spring computed at its loads is one state; root finding is included, and so ");
-    text.append("is working out every conflict, which a text list with candidates never reads. ");
-    text.append("Typical, loose and infeasible try every\ngrade in the series it is stocked in; ");
-    text.append("wide is the typical problem with every grade in both series.\n\n");
+    text.append("A spring computed at its loads is one state; root finding is included, and so\n");
+    text.append("is working out every conflict, which a text list with candidates never reads.\n");
+    text.append("Typical, loose and infeasible try every grade in the series it is stocked in; ");
+    text.append("wide is the\ntypical problem with every grade in both series.\n\n");
     text.append("| problem | wires | fit | candidates | search ms | scan ms | search/scan |");
     text.append(" states search | states scan | share |\n");
     text.append("|---|---|---|---|---|---|---|---|---|---|\n");
