@@ -1,5 +1,6 @@
 package coilwright.material;
 
+import coilwright.source.Evidence;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.UncheckedIOException;
@@ -15,6 +16,8 @@ import java.util.function.UnaryOperator;
  * read when it is first needed and then kept; not for use by several threads at once.
  */
 public final class Catalogue {
+
+  private static final String COMMON_TOLERANCE = "tolerance-en-10218-2";
 
   private final UnaryOperator<String> textOf;
   private final Map<String, Table> tables = new HashMap<>();
@@ -71,6 +74,21 @@ public final class Catalogue {
    */
   public List<WireSize> sizes(WireSeries series) {
     return sizes.computeIfAbsent(series, key -> SizeReader.read(key, table("sizes-" + key.id())));
+  }
+
+  /**
+   * The diameter tolerance that stands for wire whose own is not known.
+   *
+   * @return the tolerance of EN 10218-2, whose table covers the most sizes, taken as remembered
+   * @throws IllegalStateException naming file, line and column if its file is bad
+   */
+  public ToleranceLaw commonTolerance() {
+    return GradeTolerance.of(table(COMMON_TOLERANCE), Evidence.MEMORY).law();
+  }
+
+  /** Where {@link #commonTolerance()} comes from. */
+  public GradeSource commonToleranceSource() {
+    return GradeTolerance.of(table(COMMON_TOLERANCE), Evidence.MEMORY).source();
   }
 
   /**

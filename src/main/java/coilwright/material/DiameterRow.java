@@ -8,7 +8,7 @@ import java.util.List;
  * One row of a table by wire diameter.
  *
  * @param diameter d [mm]; infinite for a last step that nothing bounds
- * @param value the strength or modulus there [MPa]
+ * @param value the strength or modulus there [MPa], or the tolerance [mm]
  * @param evidence whether the row was seen or is remembered
  */
 record DiameterRow(double diameter, double value, Evidence evidence) {
@@ -21,7 +21,7 @@ record DiameterRow(double diameter, double value, Evidence evidence) {
     if (!(diameter > 0)) {
       throw new IllegalArgumentException("wire diameter: " + diameter + " mm must be positive");
     }
-    Require.positive(value, "value at " + diameter + " mm", "MPa");
+    Require.positive(value, "value at " + diameter + " mm", "inner");
   }
 
   /**

@@ -13,15 +13,17 @@ final class DiameterRows {
   private DiameterRows() {}
 
   /**
-   * The rows, converted to mm and MPa.
+   * The rows, converted to mm and to the inner unit of their value.
    *
    * @param rows rows of a file, with diameters rising
    * @param diameter the column of the diameters; "any" there makes an open last step
-   * @param value the column of the strengths or moduli
+   * @param value the column of the values
+   * @param dimension what the values are
    * @return one for each row
    * @throws IllegalStateException naming file, line and column if the diameters do not rise
    */
-  static List<DiameterRow> of(List<TableRow> rows, String diameter, String value) {
+  static List<DiameterRow> of(
+      List<TableRow> rows, String diameter, String value, Dimension dimension) {
     List<DiameterRow> read = new ArrayList<>();
     double last = 0;
     for (TableRow row : rows) {
@@ -33,7 +35,7 @@ final class DiameterRows {
         throw row.fault(diameter, "found " + row.text(diameter) + ", must rise from row to row");
       }
       last = d;
-      read.add(new DiameterRow(d, row.quantity(value, Dimension.STRESS), row.evidence()));
+      read.add(new DiameterRow(d, row.quantity(value, dimension), row.evidence()));
     }
     return read;
   }

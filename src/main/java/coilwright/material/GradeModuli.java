@@ -1,6 +1,7 @@
 package coilwright.material;
 
 import coilwright.source.Evidence;
+import coilwright.unit.Dimension;
 import java.util.List;
 
 /**
@@ -24,8 +25,8 @@ record GradeModuli(ModulusLaw shear, ModulusLaw elastic, GradeSource source) {
     List<TableRow> rows = table.rowsOf("grade", gradeId);
     Evidence weakest = rows.stream().map(TableRow::evidence).reduce(Evidence.SEEN, Evidence::and);
     return new GradeModuli(
-        new StepTable(DiameterRows.of(rows, "up_to", "shear_modulus")),
-        new StepTable(DiameterRows.of(rows, "up_to", "elastic_modulus")),
+        new StepTable(DiameterRows.of(rows, "up_to", "shear_modulus", Dimension.STRESS)),
+        new StepTable(DiameterRows.of(rows, "up_to", "elastic_modulus", Dimension.STRESS)),
         new GradeSource("moduli", rows.get(0).place(), weakest));
   }
 }

@@ -1,5 +1,6 @@
 package coilwright.material;
 
+import coilwright.source.Evidence;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
@@ -33,11 +34,14 @@ final class GradeReader {
     String id = row.text("id");
     GradeStrength strength = GradeStrength.of(tables.apply(row.text("strength")), id);
     GradeModuli moduli = GradeModuli.of(tables.apply(row.text("moduli")), id);
+    GradeTolerance tolerance =
+        GradeTolerance.of(tables.apply(row.text("tolerance")), toleranceBasis(row));
     Optional<GradeProperty> temperature = property(id, GradeProperty.SERVICE_TEMPERATURE);
     GradeProperty density = needed(row, id, GradeProperty.DENSITY);
     GradeProperty cost = needed(row, id, GradeProperty.COST_INDEX);
     List<GradeSource> sources = new ArrayList<>(strength.sources());
     sources.add(moduli.source());
+    sources.add(tolerance.source());
     sources.add(density.source());
     temperature.map(GradeProperty::source).ifPresent(sources::add);
     sources.add(cost.source());
@@ -52,6 +56,7 @@ final class GradeReader {
         strength.law(),
         moduli.shear(),
         moduli.elastic(),
+        tolerance.law(),
         strength.diameters(),
         density.value(),
         temperature.map(each -> OptionalDouble.of(each.value())).orElse(OptionalDouble.empty()),
@@ -60,6 +65,10 @@ final class GradeReader {
         OptionalDouble.empty(),
         OptionalDouble.empty(),
         sources);
+  }
+
+  private static Evidence toleranceBasis(TableRow row) {
+    return row.oneOf("tolerance_evidence", Evidence.values(), Evidence::word);
   }
 
   private Optional<GradeProperty> property(String id, String property) {

@@ -42,7 +42,7 @@ record GradeStrength(StrengthLaw law, DiameterRange diameters, List<GradeSource>
   }
 
   private static GradeStrength interpolated(Table table) {
-    List<DiameterRow> rows = DiameterRows.of(table.rows(), DIAMETER, STRENGTH);
+    List<DiameterRow> rows = DiameterRows.of(table.rows(), DIAMETER, STRENGTH, Dimension.STRESS);
     double last = rows.get(rows.size() - 1).diameter();
     if (last == Double.POSITIVE_INFINITY) {
       TableRow row = table.rows().get(rows.size() - 1);
@@ -53,7 +53,7 @@ record GradeStrength(StrengthLaw law, DiameterRange diameters, List<GradeSource>
   }
 
   private static GradeStrength stepped(Table table) {
-    List<DiameterRow> rows = DiameterRows.of(table.rows(), DIAMETER, STRENGTH);
+    List<DiameterRow> rows = DiameterRows.of(table.rows(), DIAMETER, STRENGTH, Dimension.STRESS);
     DiameterRange range = new DiameterRange(0, rows.get(rows.size() - 1).diameter());
     return new GradeStrength(new StepTable(rows), range, sources(table));
   }

@@ -11,7 +11,8 @@ import coilwright.unit.Require;
  * @param tensileStrength minimum tensile strength Rm [MPa]
  * @param shearModulus G [MPa]
  * @param elasticModulus E [MPa]
- * @param evidence the weakest evidence among strength, moduli and size
+ * @param evidence the weakest evidence among strength, moduli and size; that of the tolerance is
+ *     {@link #diameterToleranceEvidence()}, so that a tolerance alone makes no wire one from memory
  */
 public record Wire(
     WireGrade grade,
@@ -31,6 +32,16 @@ public record Wire(
   /** Wire diameter d [mm]. */
   public double diameter() {
     return size.diameter();
+  }
+
+  /** What the wire may differ from its nominal diameter by, either way [mm]; positive. */
+  public double diameterTolerance() {
+    return grade.diameterTolerance().at(diameter());
+  }
+
+  /** Whether {@link #diameterTolerance()} was seen for the grade or is taken for it. */
+  public Evidence diameterToleranceEvidence() {
+    return grade.diameterTolerance().evidenceAt(diameter());
   }
 
   /** Density [kg/m^3]. */

@@ -19,6 +19,7 @@ import java.util.OptionalDouble;
  * @param strength minimum tensile strength by diameter
  * @param shearModulus G by diameter
  * @param elasticModulus E by diameter
+ * @param diameterTolerance what the wire may differ from its nominal diameter by
  * @param diameters where the strength holds
  * @param density [kg/m^3]
  * @param maxServiceTemperature [degC]; empty where none is cited
@@ -39,6 +40,7 @@ public record WireGrade(
     StrengthLaw strength,
     ModulusLaw shearModulus,
     ModulusLaw elasticModulus,
+    ToleranceLaw diameterTolerance,
     DiameterRange diameters,
     double density,
     OptionalDouble maxServiceTemperature,

@@ -1,6 +1,7 @@
 package coilwright.problem;
 
 import coilwright.material.AllowableClass;
+import coilwright.material.Catalogue;
 import coilwright.material.DiameterRange;
 import coilwright.material.GradeSource;
 import coilwright.material.ModulusLaw;
@@ -24,9 +25,15 @@ import java.util.stream.Stream;
  * @param like the grade that what is left out is taken from; empty where there is none or it is
  *     faulty
  * @param alone whether the file names no such grade: then everything must be given
+ * @param catalogue gives the diameter tolerance of a grade that is like no other
  * @param units decide the usual wire series of a grade that is like no other
  */
-record OwnGrade(Section section, Optional<WireGrade> like, boolean alone, UnitSystem units) {
+record OwnGrade(
+    Section section,
+    Optional<WireGrade> like,
+    boolean alone,
+    Catalogue catalogue,
+    UnitSystem units) {
 
   /**
    * Reads the grade.
@@ -65,6 +72,7 @@ record OwnGrade(Section section, Optional<WireGrade> like, boolean alone, UnitSy
             law(strength, WireGrade::strength).get(),
             law(shear, WireGrade::shearModulus).get(),
             law(elastic, WireGrade::elasticModulus).get(),
+            like.map(WireGrade::diameterTolerance).orElseGet(catalogue::commonTolerance),
             diameters.get(),
             density.orElseGet(() -> like.get().density()),
             like.map(WireGrade::maxServiceTemperature).orElse(OptionalDouble.empty()),
@@ -134,6 +142,10 @@ record OwnGrade(Section section, Optional<WireGrade> like, boolean alone, UnitSy
     List<GradeSource> sources = new ArrayList<>();
     source("strength", sources, MaterialKeys.TENSILE_STRENGTH);
     source("moduli", sources, MaterialKeys.SHEAR.whole(), MaterialKeys.ELASTIC.whole());
+    source("diameter tolerance", sources);
+    if (like.isEmpty()) {
+      sources.add(catalogue.commonToleranceSource());
+    }
     source("density", sources, MaterialKeys.DENSITY);
     source("service temperature", sources);
     source("cost index", sources, MaterialKeys.COST_INDEX);

@@ -63,7 +63,8 @@ final class OwnMaterials {
     boolean faulty = section.spot().faults().count() > before;
     Optional<WireGrade> like = faulty ? Optional.empty() : likeId.flatMap(this::known);
     boolean alone = !section.has(MaterialKeys.LIKE);
-    Optional<WireGrade> grade = new OwnGrade(section, like, alone, units).read(id.orElse("-"));
+    Optional<WireGrade> grade =
+        new OwnGrade(section, like, alone, catalogue, units).read(id.orElse("-"));
     if (section.spot().faults().count() > before) {
       return Optional.empty();
     }

@@ -9,6 +9,7 @@ class BadTableTest {
 
   private static final String A228 = "strength-astm-a228.csv";
   private static final String MODULI = "moduli-shigley.csv";
+  private static final String TOLERANCE = "tolerance-astm-a228.csv";
   private static final String GAUGE = "sizes-music-wire-gauge.csv";
 
   @Test
@@ -39,6 +40,9 @@ class BadTableTest {
   void diametersThatDoNotRise() {
     refused(A228, "0.006,", "0.004,", "line 11", "column diameter", "rise");
     refused(MODULI, "music-wire,0.063,", "music-wire,0.032,", "line 9", "column up_to", "rise");
+    refused(TOLERANCE, "0.028,0.063,", "0.028,0.028,", "line 10", "column up_to", "rise");
+    refused(TOLERANCE, "0.028,0.063,", "0.027,0.063,", "line 10", "column from", "overlap");
+    refused(TOLERANCE, "0.028,0.063,", "0.064,0.063,", "line 10", "column from", "overlap");
     refused(MODULI, "music-wire,0.063,", "music-wire,any,", "line 10", "column up_to", "rise");
   }
 

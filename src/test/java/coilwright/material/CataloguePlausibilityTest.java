@@ -72,7 +72,7 @@ class CataloguePlausibilityTest {
       assertThat(source.text()).isNotBlank();
       assertThat(source.evidence()).isNotNull();
     }
-    assertThat(kinds).contains("strength", "moduli", "density", "cost index");
+    assertThat(kinds).contains("strength", "moduli", "diameter tolerance", "density", "cost index");
     assertThat(kinds.contains("service temperature"))
         .isEqualTo(grade.maxServiceTemperature().isPresent());
   }

@@ -63,7 +63,11 @@ class CatalogueTest {
     assertThat(watched.grade("music-wire")).isSameAs(first);
     assertThat(opened)
         .containsExactly(
-            "grades.csv", "strength-astm-a228.csv", "moduli-shigley.csv", "properties.csv");
+            "grades.csv",
+            "strength-astm-a228.csv",
+            "moduli-shigley.csv",
+            "tolerance-astm-a228.csv",
+            "properties.csv");
   }
 
   @Test

@@ -7,6 +7,7 @@ import coilwright.material.StrengthLaw;
 import coilwright.material.StrengthLaws;
 import coilwright.material.Supply;
 import coilwright.material.WireGrade;
+import coilwright.spring.SampleWire;
 import java.util.List;
 import java.util.OptionalDouble;
 
@@ -123,6 +124,7 @@ public record GradeDraft(
         strength,
         ModulusLaws.constant(shearModulus),
         ModulusLaws.constant(elasticModulus),
+        SampleWire.TOLERANCE,
         diameters,
         density,
         OptionalDouble.empty(),

@@ -6,6 +6,7 @@ import coilwright.material.GradeSource;
 import coilwright.material.ModulusLaw;
 import coilwright.material.StrengthLaw;
 import coilwright.material.Supply;
+import coilwright.material.ToleranceLaw;
 import coilwright.material.Wire;
 import coilwright.material.WireGrade;
 import coilwright.material.WireSize;
@@ -27,6 +28,9 @@ public final class SampleWire {
 
   /** Rm [MPa]. */
   public static final double STRENGTH = 1900;
+
+  /** What the wire may differ from its diameter by. */
+  public static final ToleranceLaw TOLERANCE = new Constant(0.02);
 
   private SampleWire() {}
 
@@ -61,6 +65,7 @@ public final class SampleWire {
         new Constant(STRENGTH),
         new Constant(SHEAR_MODULUS),
         new Constant(ELASTIC_MODULUS),
+        TOLERANCE,
         new DiameterRange(0, Double.POSITIVE_INFINITY),
         DENSITY,
         OptionalDouble.empty(),
@@ -72,7 +77,7 @@ public final class SampleWire {
   }
 
   /** A property that does not change with the diameter. */
-  private record Constant(double value) implements StrengthLaw, ModulusLaw {
+  private record Constant(double value) implements StrengthLaw, ModulusLaw, ToleranceLaw {
 
     @Override
     public double at(double diameter) {
