@@ -1,6 +1,5 @@
 package coilwright.limit;
 
-import coilwright.material.AllowableClass;
 import coilwright.material.WireGrade;
 import coilwright.problem.StressLimit;
 import coilwright.source.Citation;
@@ -15,10 +14,6 @@ import java.util.OptionalDouble;
  */
 public record Allowable(double share, Citation source) {
 
-  /** Static compression, before set removal, on the corrected stress. */
-  static final Citation HANDBOOK =
-      Citation.remembered(Source.SHIGLEY, "table 10-6, before set removal, corrected stress");
-
   private static final Citation FILE = Citation.seen(Source.PROBLEM_FILE, "limits");
   private static final Citation OWN = Citation.seen(Source.PROBLEM_FILE, "own_materials");
 
@@ -27,10 +22,11 @@ public record Allowable(double share, Citation source) {
    *
    * @param limit what the file says
    * @param grade the grade
+   * @param basis whose allowables apply where neither says
    * @return the bound
    */
-  public static Allowable atLoad(StressLimit limit, WireGrade grade) {
-    return of(limit, grade, grade.stressAtLoad());
+  public static Allowable atLoad(StressLimit limit, WireGrade grade, StressBasis basis) {
+    return of(limit, grade, grade.stressAtLoad(), basis);
   }
 
   /**
@@ -38,34 +34,21 @@ public record Allowable(double share, Citation source) {
    *
    * @param limit what the file says
    * @param grade the grade
+   * @param basis whose allowables apply where neither says
    * @return the bound
    */
-  public static Allowable atSolid(StressLimit limit, WireGrade grade) {
-    return of(limit, grade, grade.stressAtSolid());
+  public static Allowable atSolid(StressLimit limit, WireGrade grade, StressBasis basis) {
+    return of(limit, grade, grade.stressAtSolid(), basis);
   }
 
-  /**
-   * The bound that applies: the file's, else the grade's own, else the handbook's.
-   *
-   * @param limit what the file says
-   * @param grade the grade
-   * @param own the grade's own share for this check, where it has one
-   * @return the bound
-   */
-  private static Allowable of(StressLimit limit, WireGrade grade, OptionalDouble own) {
+  /** The bound that applies: the file's, else the grade's own, else the basis's. */
+  private static Allowable of(
+      StressLimit limit, WireGrade grade, OptionalDouble own, StressBasis basis) {
     if (limit.share().isPresent()) {
       return new Allowable(limit.share().getAsDouble(), FILE);
     }
     return own.isPresent()
         ? new Allowable(own.getAsDouble(), OWN)
-        : new Allowable(handbookShare(grade.allowableClass()), HANDBOOK);
-  }
-
-  private static double handbookShare(AllowableClass allowableClass) {
-    return switch (allowableClass) {
-      case COLD_DRAWN_CARBON -> 0.45;
-      case HARDENED_TEMPERED -> 0.50;
-      case AUSTENITIC_STAINLESS, NON_FERROUS -> 0.35;
-    };
+        : new Allowable(basis.share(grade.allowableClass()), basis.citation());
   }
 }

@@ -35,25 +35,60 @@ final class AlongFamily {
    * Deflection from free to solid [mm] at a coil count; zero where the coils do not even fit free.
    */
   double deflectionToSolid(double coils) {
-    return Math.max(
-        0,
-        end.spring().freeLength()
-            - end.spring().ends().solidLength(coils, end.spring().wireDiameter()));
+    return Math.max(0, freeLengthAt(coils) - solidLengthAt(coils));
   }
 
-  /** The coil count at which the coils touch when free [-]. */
-  double coilsSolidWhenFree() {
-    double d = end.spring().wireDiameter();
-    return (end.spring().freeLength() - end.spring().ends().solidLength(0, d)) / d;
+  /** The free length [mm] at a coil count: the same for all, unless it follows from the travel. */
+  double freeLengthAt(double coils) {
+    return end.duty().travel().isPresent()
+        ? solidLengthAt(coils)
+            + end.duty()
+                .travel()
+                .get()
+                .toSolid(meanDiameterAt(coils), end.spring().wireDiameter(), coils)
+        : end.spring().freeLength();
+  }
+
+  /** The pitch [mm] at a coil count. */
+  double pitchAt(double coils) {
+    return end.spring().ends().pitch(freeLengthAt(coils), end.spring().wireDiameter(), coils);
+  }
+
+  private double solidLengthAt(double coils) {
+    return end.duty()
+        .method()
+        .solidLength(end.spring().ends(), coils, end.wire(), end.duty().coating());
   }
 
   /**
-   * What the corrected stress at solid is proportional to: deflection times factor times index
-   * [mm].
+   * The coil count at which the coils touch when free [-]; positive infinity where the free length
+   * grows with the coils.
    */
-  double stressAtSolid(double coils) {
+  double coilsSolidWhenFree() {
+    double none = solidLengthAt(0);
+    return lengthsOpen()
+        ? Double.POSITIVE_INFINITY
+        : (end.spring().freeLength() - none) / (solidLengthAt(1) - none);
+  }
+
+  /** Whether the lengths follow from the travel. */
+  boolean lengthsOpen() {
+    return end.duty().travel().isPresent();
+  }
+
+  /**
+   * What a stress at some deflection is proportional to: deflection times factor times index [mm].
+   */
+  double stress(double coils, double deflection, StressMeaning meaning) {
     double index = meanDiameterAt(coils) / end.spring().wireDiameter();
-    return deflectionToSolid(coils) * end.correction().at(index) * index;
+    return deflection * meaning.factor(end.correction(), index) * index;
+  }
+
+  /** The deflection of the extreme load [mm], where the lengths follow from the travel. */
+  double deflectionAtExtreme(double coils) {
+    double asked = end.duty().travel().orElseThrow().deflection();
+    double overtravel = end.duty().overtravel().orElse(Double.POSITIVE_INFINITY);
+    return Math.max(asked, freeLengthAt(coils) - overtravel);
   }
 
   /** Any spring of the family, for what all have in common. */

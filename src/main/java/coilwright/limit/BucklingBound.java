@@ -7,6 +7,8 @@ import coilwright.spring.CompressionState;
 import coilwright.spring.Family;
 import coilwright.spring.Seating;
 import coilwright.unit.Dimension;
+import org.apache.commons.math3.analysis.UnivariateFunction;
+import org.apache.commons.math3.analysis.solvers.BrentSolver;
 import org.apache.commons.math3.optim.MaxEval;
 import org.apache.commons.math3.optim.nonlinear.scalar.GoalType;
 import org.apache.commons.math3.optim.univariate.BrentOptimizer;
@@ -22,12 +24,21 @@ final class BucklingBound implements Limit<CompressionState> {
           Side.MAX,
           Dimension.LENGTH,
           "deflection at the most compressed load, against the critical deflection");
+  private static final Check AT_OVERTRAVEL =
+      new Check(
+          LimitName.BUCKLING,
+          Side.MAX,
+          Dimension.LENGTH,
+          "deflection at the most compressed load, overtravel included, against the critical"
+              + " deflection");
   private static final Check AT_SOLID =
       new Check(
           LimitName.BUCKLING,
           Side.MAX,
           Dimension.LENGTH,
           "deflection at solid, against the critical deflection");
+
+  private static final int MOST_EVALUATIONS = 200;
 
   private final boolean atSolid;
 
@@ -42,12 +53,13 @@ final class BucklingBound implements Limit<CompressionState> {
 
   @Override
   public Finding judge(CompressionState state) {
-    Check check = atSolid ? AT_SOLID : AT_LOAD;
+    boolean overtravel = state.duty().overtravel().isPresent();
+    Check check = atSolid ? AT_SOLID : overtravel ? AT_OVERTRAVEL : AT_LOAD;
     double critical = state.criticalDeflection();
     if (critical == Double.POSITIVE_INFINITY) {
       return Finding.cannotFail(check, Buckling.CITATION);
     }
-    double deflection = (atSolid ? state.solid() : state.mostCompressed()).deflection();
+    double deflection = (atSolid ? state.solid() : state.extreme()).deflection();
     return Finding.of(check, deflection, critical, Buckling.CITATION);
   }
 
@@ -56,23 +68,40 @@ final class BucklingBound implements Limit<CompressionState> {
    *
    * <p>Up to some coil count the coil is wide enough never to buckle. Beyond it the deflection that
    * the loads ask stays and the critical one falls; but the deflection to solid falls too, so that
-   * its ratio to the critical one first rises, then falls to zero.
+   * its ratio to the critical one first rises, then falls to zero. Where the lengths follow from
+   * the travel the spring grows longer as the coil grows narrower: once it can buckle it can do so
+   * ever more easily.
    */
   @Override
   public double[] turns(Family<CompressionState> family) {
     AlongFamily along = new AlongFamily(family);
-    double wide = along.coilsAt(alwaysStable(along.any()));
+    double wide =
+        along.lengthsOpen()
+            ? stableUpTo(along, family)
+            : along.coilsAt(alwaysStable(along.any(), along.any().spring().freeLength()));
     double justBeyond = wide * (1 + 1e-9);
     double solid = along.coilsSolidWhenFree();
-    if (!atSolid || !(solid > justBeyond)) {
+    if (!atSolid || along.lengthsOpen() || !(solid > justBeyond)) {
       return new double[] {wide, justBeyond};
     }
     return new double[] {wide, justBeyond, worst(along, justBeyond, solid), solid};
   }
 
-  private static double alwaysStable(CompressionState state) {
+  /** The coil count up to which the coil is wide enough never to buckle. */
+  private static double stableUpTo(AlongFamily along, Family<CompressionState> family) {
+    UnivariateFunction tooNarrow =
+        coils -> alwaysStable(along.any(), along.freeLengthAt(coils)) - along.meanDiameterAt(coils);
+    double few = family.fewestCoils();
+    double many = family.mostCoils();
+    if (!(tooNarrow.value(few) < 0 && tooNarrow.value(many) > 0)) {
+      return tooNarrow.value(few) < 0 ? many : few;
+    }
+    return new BrentSolver(1e-14, 1e-14).solve(MOST_EVALUATIONS, tooNarrow, few, many);
+  }
+
+  private static double alwaysStable(CompressionState state, double freeLength) {
     return Buckling.alwaysStableMeanDiameter(
-        state.spring().freeLength(),
+        freeLength,
         state.seating().factor(),
         state.wire().shearModulus(),
         state.wire().elasticModulus());

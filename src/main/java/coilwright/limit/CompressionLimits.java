@@ -3,42 +3,53 @@ package coilwright.limit;
 import coilwright.problem.Band;
 import coilwright.problem.BucklingRule;
 import coilwright.problem.DesignLimits;
-import coilwright.problem.Envelope;
 import coilwright.problem.LimitName;
 import coilwright.problem.Problem;
 import coilwright.source.Citation;
 import coilwright.source.Source;
-import coilwright.spring.Coil;
 import coilwright.spring.CompressionState;
 import coilwright.spring.EndType;
 import coilwright.spring.Family;
+import coilwright.spring.GapSum;
 import coilwright.spring.LoadPoint;
+import coilwright.spring.Method;
 import coilwright.spring.Surge;
 import coilwright.unit.Dimension;
 import java.util.ArrayList;
-import java.util.EnumSet;
 import java.util.List;
 import java.util.OptionalDouble;
-import java.util.Set;
 import java.util.function.ToDoubleFunction;
 
 /** The limits that a problem sets for compression springs, in the order of their names. */
 public final class CompressionLimits {
 
-  private static final Citation ASKED = Citation.seen(Source.PROBLEM_FILE, "envelope");
   private static final DesignLimits USUAL = DesignLimits.DEFAULTS;
   private static final Citation GIVEN = Citation.seen(Source.PROBLEM_FILE, "limits");
   private static final Citation PRACTICE = Citation.seen(Source.COMMON_PRACTICE, "");
   private static final Citation CLASH =
       Citation.seen(Source.SHIGLEY, "fractional overrun to closure, at least 0.15");
 
-  /** Limits on lengths of coils that touch, and on their count. */
-  private static final Set<LimitName> STRAIGHT =
-      EnumSet.of(LimitName.ACTIVE_COILS, LimitName.SOLID_LENGTH, LimitName.CLASH_ALLOWANCE);
+  private static final Limit<CompressionState> GAP_SUM =
+      new ValueLimit<>(
+          new Check(
+              LimitName.CLASH_ALLOWANCE,
+              Side.MIN,
+              Dimension.LENGTH,
+              "travel left between the most compressed load and solid, against the least sum of"
+                  + " gaps"),
+          CompressionState::travelLeft,
+          CompressionState::leastGapSum,
+          GapSum.CITATION,
+          false);
 
+  private final Method method;
+  private final boolean overtravel;
   private final List<Limit<CompressionState>> limits = new ArrayList<>();
 
-  private CompressionLimits() {}
+  private CompressionLimits(Problem problem) {
+    this.method = problem.limits().method();
+    this.overtravel = problem.overtravel().isPresent();
+  }
 
   /**
    * Every limit that applies.
@@ -61,10 +72,10 @@ public final class CompressionLimits {
    */
   public static List<Limit<CompressionState>> of(
       Problem problem, List<LoadPoint> loads, OptionalDouble freeLength) {
-    CompressionLimits all = new CompressionLimits();
-    all.stress(problem.limits());
+    CompressionLimits all = new CompressionLimits(problem);
+    all.stress(problem.limits(), StressBasis.of(all.method, problem.setRemoved()));
     all.proportions(problem.limits());
-    all.space(problem.envelope());
+    all.limits.addAll(SpaceLimits.of(problem.envelope(), all.method));
     all.travel(problem.limits());
     all.stability(problem);
     all.surge(problem.limits());
@@ -72,13 +83,13 @@ public final class CompressionLimits {
     return List.copyOf(all.limits);
   }
 
-  private void stress(DesignLimits asked) {
-    String author = asked.stressCorrection().author();
+  private void stress(DesignLimits asked, StressBasis basis) {
     if (asked.stressAtLoad().judged()) {
-      limits.add(StressBound.atLoad(asked.stressAtLoad(), author));
+      limits.add(
+          StressBound.atLoad(asked.stressAtLoad(), basis, asked.stressCorrection(), overtravel));
     }
     if (asked.stressAtSolid().judged()) {
-      limits.add(StressBound.atSolid(asked.stressAtSolid(), author));
+      limits.add(StressBound.atSolid(asked.stressAtSolid(), basis, asked.stressCorrection()));
     }
   }
 
@@ -111,9 +122,17 @@ public final class CompressionLimits {
 
   /**
    * The pitch angle falls along a family, but for plain and ground ends it rises up to half a coil:
-   * it goes with the cube root of n over n + 1.
+   * it goes with the cube root of n over n + 1. Where the lengths follow from the travel, the pitch
+   * falls to the wire's and then the coil's narrowing tells.
    */
   private static double[] steepest(Family<CompressionState> family) {
+    AlongFamily along = new AlongFamily(family);
+    if (along.lengthsOpen()) {
+      return Extremes.between(
+          family.fewestCoils(),
+          family.mostCoils(),
+          coils -> along.pitchAt(coils) / along.meanDiameterAt(coils));
+    }
     boolean rises = family.endForm().equals(EndType.PLAIN_GROUND.id());
     return rises ? new double[] {0.5} : new double[0];
   }
@@ -148,92 +167,30 @@ public final class CompressionLimits {
       OptionalDouble bound,
       Citation source) {
     if (bound.isPresent()) {
-      double limit = bound.getAsDouble();
-      limits.add(
-          new ValueLimit<>(check, value, state -> limit, source, STRAIGHT.contains(check.limit())));
+      boolean straight = check.limit() == LimitName.ACTIVE_COILS;
+      limits.add(ValueLimit.fixed(check, value, bound.getAsDouble(), source, straight));
     }
   }
 
-  private void space(Envelope space) {
-    double clearance = space.diametralClearance().orElse(0);
-    length(
-        LimitName.BORE,
-        Side.MAX,
-        "outside diameter at solid, ends held, against bore less clearance",
-        state -> state.spring().outsideDiameterAtSolid(),
-        shifted(space.bore(), -clearance),
-        Coil.GROWTH);
-    length(
-        LimitName.ROD,
-        Side.MIN,
-        "inside diameter, free state, against rod plus clearance",
-        state -> state.spring().insideDiameter(),
-        shifted(space.rod(), clearance),
-        ASKED);
-    length(
-        LimitName.OUTSIDE_DIAMETER,
-        Side.MAX,
-        "nominal, free state",
-        state -> state.spring().outsideDiameter(),
-        space.maxOutsideDiameter(),
-        ASKED);
-    length(
-        LimitName.INSIDE_DIAMETER,
-        Side.MIN,
-        "nominal, free state",
-        state -> state.spring().insideDiameter(),
-        space.minInsideDiameter(),
-        ASKED);
-    length(
-        LimitName.FREE_LENGTH,
-        Side.MAX,
-        "nominal",
-        state -> state.spring().freeLength(),
-        space.maxFreeLength(),
-        ASKED);
-    length(
-        LimitName.SOLID_LENGTH,
-        Side.MAX,
-        "nominal wire diameter",
-        CompressionState::solidLength,
-        space.maxSolidLength(),
-        EndType.CITATION);
-  }
-
-  private static OptionalDouble shifted(OptionalDouble value, double by) {
-    return value.isPresent() ? OptionalDouble.of(value.getAsDouble() + by) : value;
-  }
-
-  private void length(
-      LimitName name,
-      Side side,
-      String definition,
-      ToDoubleFunction<CompressionState> value,
-      OptionalDouble bound,
-      Citation source) {
-    fixed(new Check(name, side, Dimension.LENGTH, definition), value, bound, source);
-  }
-
   private void travel(DesignLimits asked) {
-    fixed(
-        new Check(
-            LimitName.CLASH_ALLOWANCE,
-            Side.MIN,
-            Dimension.SHARE,
-            "travel left between the most compressed load and solid, of the deflection there"),
-        CompressionState::clashAllowance,
-        asked.clashAllowance(),
-        source(asked.clashAllowance(), USUAL.clashAllowance(), CLASH));
+    if (asked.clashAllowance().isPresent()) {
+      limits.add(new Shaping<>(clashShare(asked.clashAllowance())));
+    }
+    if (asked.gapSum()) {
+      limits.add(new Shaping<>(GAP_SUM));
+    }
     limits.add(
         new ValueLimit<>(
             new Check(
                 LimitName.BEYOND_SOLID,
                 Side.MAX,
                 Dimension.LENGTH,
-                "solid length, against the length at the most compressed load"),
+                overtravel
+                    ? "solid length, against the shortest length, overtravel included"
+                    : "solid length, against the length at the most compressed load"),
             CompressionState::solidLength,
-            state -> state.mostCompressed().length(),
-            EndType.CITATION,
+            state -> state.extreme().length(),
+            method.solidCitation(),
             true));
     limits.add(
         new ValueLimit<>(
@@ -243,9 +200,22 @@ public final class CompressionLimits {
                 Dimension.LENGTH,
                 "pitch, free state, against the wire diameter"),
             state -> state.spring().pitch(),
-            state -> state.spring().wireDiameter(),
+            CompressionState::coatedDiameter,
             EndType.CITATION,
             false));
+  }
+
+  private static Limit<CompressionState> clashShare(OptionalDouble share) {
+    return ValueLimit.fixed(
+        new Check(
+            LimitName.CLASH_ALLOWANCE,
+            Side.MIN,
+            Dimension.SHARE,
+            "travel left between the most compressed load and solid, of the deflection there"),
+        CompressionState::clashAllowance,
+        share.getAsDouble(),
+        source(share, USUAL.clashAllowance(), CLASH),
+        true);
   }
 
   private void stability(Problem problem) {
@@ -272,7 +242,7 @@ public final class CompressionLimits {
   }
 
   private void nominal(List<LoadPoint> loads, OptionalDouble freeLength) {
-    if (loads.stream().anyMatch(load -> load.length().isPresent() && load.force().isPresent())) {
+    if (loads.stream().anyMatch(LoadPoint::fixesForce)) {
       limits.add(new NominalLoad(loads, freeLength));
     }
   }

@@ -50,4 +50,15 @@ public interface Limit<S extends State> {
   default boolean onlyAfterRounding() {
     return false;
   }
+
+  /**
+   * The springs that would be made if this limit were not asked: other ones only where the limit
+   * shapes them.
+   *
+   * @param family the family searched
+   * @return the family that takes its place, or the same one
+   */
+  default Family<S> dropped(Family<S> family) {
+    return family;
+  }
 }

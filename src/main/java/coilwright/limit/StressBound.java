@@ -6,53 +6,64 @@ import coilwright.problem.StressLimit;
 import coilwright.spring.CompressionState;
 import coilwright.spring.Family;
 import coilwright.spring.LoadState;
+import coilwright.spring.StressCorrection;
 import coilwright.unit.Dimension;
-import java.util.function.BiFunction;
 import java.util.function.Function;
 
-/** Corrected shear stress at one place against a share of tensile strength. */
+/** Shear stress at one place against a share of tensile strength. */
 final class StressBound implements Limit<CompressionState> {
+
+  /** How the bound at one place is chosen. */
+  private interface Choice {
+    Allowable of(StressLimit limit, WireGrade grade, StressBasis basis);
+  }
 
   private final Check check;
   private final StressLimit limit;
+  private final StressBasis basis;
   private final Function<CompressionState, LoadState> where;
-  private final BiFunction<StressLimit, WireGrade, Allowable> allowableOf;
+  private final Choice choice;
   private final Function<Family<CompressionState>, double[]> turns;
 
   private StressBound(
-      LimitName name,
-      String author,
+      Check check,
       StressLimit limit,
+      StressBasis basis,
       Function<CompressionState, LoadState> where,
-      BiFunction<StressLimit, WireGrade, Allowable> allowable,
+      Choice choice,
       Function<Family<CompressionState>, double[]> turns) {
-    this.check = new Check(name, Side.MAX, Dimension.STRESS, "corrected, " + author);
+    this.check = check;
     this.limit = limit;
+    this.basis = basis;
     this.where = where;
-    this.allowableOf = allowable;
+    this.choice = choice;
     this.turns = turns;
   }
 
-  /** The bound at the most compressed load. */
-  static StressBound atLoad(StressLimit limit, String author) {
+  /** The bound at the most compressed load, or at the overtravel beyond it. */
+  static StressBound atLoad(
+      StressLimit limit, StressBasis basis, StressCorrection correction, boolean overtravel) {
+    String definition =
+        basis.meaning().definition(correction) + (overtravel ? ", overtravel included" : "");
     return new StressBound(
-        LimitName.STRESS_AT_LOAD,
-        author,
+        new Check(LimitName.STRESS_AT_LOAD, Side.MAX, Dimension.STRESS, definition),
         limit,
-        CompressionState::mostCompressed,
+        basis,
+        CompressionState::extreme,
         Allowable::atLoad,
-        StressTurns::atLoad);
+        family -> StressTurns.atLoad(family, basis.meaning()));
   }
 
   /** The bound at solid. */
-  static StressBound atSolid(StressLimit limit, String author) {
+  static StressBound atSolid(StressLimit limit, StressBasis basis, StressCorrection correction) {
+    String definition = basis.meaning().definition(correction);
     return new StressBound(
-        LimitName.STRESS_AT_SOLID,
-        author,
+        new Check(LimitName.STRESS_AT_SOLID, Side.MAX, Dimension.STRESS, definition),
         limit,
+        basis,
         CompressionState::solid,
         Allowable::atSolid,
-        StressTurns::atSolid);
+        family -> StressTurns.atSolid(family, basis.meaning()));
   }
 
   @Override
@@ -62,10 +73,10 @@ final class StressBound implements Limit<CompressionState> {
 
   @Override
   public Finding judge(CompressionState state) {
-    Allowable allowable = allowableOf.apply(limit, state.wire().grade());
+    Allowable allowable = choice.of(limit, state.wire().grade(), basis);
     return Finding.of(
         check,
-        where.apply(state).correctedShearStress(),
+        basis.meaning().of(state, where.apply(state)),
         allowable.share() * state.wire().tensileStrength(),
         allowable.source());
   }

@@ -38,6 +38,12 @@ record ValueLimit<S extends State>(
     this(check, value, bound, source, straight, family -> new double[0]);
   }
 
+  /** A limit whose bound is the same for every spring and whose margin never turns. */
+  static <S extends State> ValueLimit<S> fixed(
+      Check check, ToDoubleFunction<S> value, double bound, Citation source, boolean straight) {
+    return new ValueLimit<>(check, value, state -> bound, source, straight);
+  }
+
   @Override
   public LimitName name() {
     return check.limit();

@@ -21,7 +21,11 @@ record Agreement(Section root, FixedLine fixed) {
    * @param facts the same loads with the other facts
    */
   void check(List<LoadEntry> loads, LoadFacts facts) {
-    compare(LoadKeys.RATE, facts.rate(), fixed.line().rate(), "N/mm");
+    compare(LoadKeys.RATE, facts.rate(), fixed.rate(), "N/mm");
+    stroke(new Stroke(loads), facts);
+    if (fixed.freeLength().isEmpty()) {
+      return;
+    }
     compare(LoadKeys.FREE_LENGTH, facts.freeLength(), fixed.line().freeLength(), "mm");
     for (LoadEntry load : loads) {
       if (load.isFull() && !agrees(load.force(), fixed.line().forceAt(load.length()))) {
@@ -32,9 +36,46 @@ record Agreement(Section root, FixedLine fixed) {
             "N");
       }
     }
-    belowFreeLength(
-        loads.stream().filter(load -> !load.isFull()).toList(),
-        OptionalDouble.of(fixed.line().freeLength()));
+    belowFreeLength(loads.stream().filter(load -> !load.isFull()).toList(), fixed.freeLength());
+    loads.stream()
+        .filter(load -> load.asked().length().isEmpty())
+        .filter(load -> !(fixed.line().lengthUnder(load.force()) > 0))
+        .forEach(this::beyondAnyLength);
+  }
+
+  private void beyondAnyLength(LoadEntry load) {
+    double most = fixed.rate() * fixed.line().freeLength();
+    load.section()
+        .spot(LoadKeys.FORCE)
+        .fault(
+            load.section().shown(LoadKeys.FORCE),
+            "must be below "
+                + Range.number(most)
+                + " N, at which the load line comes to no length at all");
+  }
+
+  private void stroke(Stroke stroke, LoadFacts facts) {
+    if (facts.stroke().isPresent() && stroke.byForces()) {
+      compare(LoadKeys.STROKE, facts.stroke(), stroke.force() / fixed.rate(), "mm");
+    } else if (facts.stroke().isPresent() && stroke.byLengths()) {
+      compare(LoadKeys.STROKE, facts.stroke(), stroke.length(), "mm");
+    }
+  }
+
+  /**
+   * Reports a stroke that belongs to nothing: some loads give only a length, others only a force.
+   *
+   * @param root the file
+   * @param loads the loads
+   */
+  static void strokeBetween(Section root, List<LoadEntry> loads) {
+    Stroke stroke = new Stroke(loads);
+    if (root.has(LoadKeys.STROKE) && !stroke.byForces() && !stroke.byLengths()) {
+      root.spot(LoadKeys.STROKE)
+          .fault(
+              root.shown(LoadKeys.STROKE) + " between loads of which some lack their force",
+              "must go with loads that all give a force, or that all give a length");
+    }
   }
 
   /**

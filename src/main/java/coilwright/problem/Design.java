@@ -14,6 +14,8 @@ import coilwright.spring.Hand;
  * @param freeLength L0 [mm]
  * @param ends how its ends are formed
  * @param hand direction of winding
+ * @param setRemoved whether the spring was pressed solid once before use
+ * @param coating thickness of what covers the wire [mm], zero for bare wire
  */
 public record Design(
     String material,
@@ -22,4 +24,6 @@ public record Design(
     double activeCoils,
     double freeLength,
     EndType ends,
-    Hand hand) {}
+    Hand hand,
+    boolean setRemoved,
+    double coating) {}

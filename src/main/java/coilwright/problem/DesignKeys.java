@@ -85,10 +85,22 @@ final class DesignKeys {
   static final ProblemKey<Boolean> SET_REMOVED =
       ProblemKey.of(
           "design.set_removed",
-          Values.notSet(),
+          Values.flag(),
           "false",
           "whether the spring was pressed solid once to raise its strength",
           "false");
+
+  static final ProblemKey<Section> COATING =
+      ProblemKey.of(
+          "design.coating",
+          new SectionReader("design.coating"),
+          "bare wire",
+          "what covers the wire: it adds where coils touch and clear",
+          "{thickness: 8 um}");
+
+  static final ProblemKey<Double> COATING_THICKNESS =
+      ProblemKey.of(
+          "design.coating.thickness", Values.length(), "", "how thick the cover is", "8 um");
 
   /** All of them. */
   static final List<ProblemKey<?>> ROWS =
@@ -104,7 +116,9 @@ final class DesignKeys {
           FREE_LENGTH,
           ENDS,
           HAND,
-          SET_REMOVED);
+          SET_REMOVED,
+          COATING,
+          COATING_THICKNESS);
 
   private DesignKeys() {}
 }

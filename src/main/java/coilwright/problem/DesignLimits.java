@@ -1,5 +1,6 @@
 package coilwright.problem;
 
+import coilwright.spring.Method;
 import coilwright.spring.StressCorrection;
 import java.util.OptionalDouble;
 
@@ -11,6 +12,8 @@ import java.util.OptionalDouble;
  * @param maxPitchAngle [rad], or empty
  * @param clashAllowance travel left before solid as a share of the greatest deflection [-], or
  *     empty
+ * @param gapSum whether the sum of gaps of EN 13906-1 must be left before solid
+ * @param method whose allowables and formulas apply
  * @param stressCorrection which factor corrects the stress
  * @param stressAtLoad the bound at the most compressed load
  * @param stressAtSolid the bound at solid
@@ -22,6 +25,8 @@ public record DesignLimits(
     Band activeCoils,
     OptionalDouble maxPitchAngle,
     OptionalDouble clashAllowance,
+    boolean gapSum,
+    Method method,
     StressCorrection stressCorrection,
     StressLimit stressAtLoad,
     StressLimit stressAtSolid,
@@ -35,6 +40,8 @@ public record DesignLimits(
           band(3, 60),
           OptionalDouble.of(Math.toRadians(12)),
           OptionalDouble.of(0.15),
+          false,
+          Method.HANDBOOK,
           StressCorrection.BERGSTRAESSER,
           new StressLimit(true, OptionalDouble.empty()),
           new StressLimit(true, OptionalDouble.empty()),

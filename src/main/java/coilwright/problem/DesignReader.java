@@ -3,6 +3,7 @@ package coilwright.problem;
 import coilwright.material.WireSize;
 import coilwright.spring.EndType;
 import coilwright.spring.Hand;
+import coilwright.spring.Method;
 import java.util.List;
 import java.util.Optional;
 
@@ -11,8 +12,9 @@ import java.util.Optional;
  *
  * @param ids the grades that may be named
  * @param section its block of keys
+ * @param method decides which ends can be judged
  */
-record DesignReader(MaterialIds ids, Section section) {
+record DesignReader(MaterialIds ids, Section section, Method method) {
 
   private static final List<ProblemKey<Double>> DIAMETERS =
       List.of(DesignKeys.MEAN_DIAMETER, DesignKeys.OUTSIDE_DIAMETER, DesignKeys.INSIDE_DIAMETER);
@@ -34,10 +36,16 @@ record DesignReader(MaterialIds ids, Section section) {
       only(DIAMETERS).ifPresent(section::read);
     }
     Optional<EndType> ends = section.require(DesignKeys.ENDS);
+    ends.ifPresent(formed -> ClosedEnds.check(formed, method, section.spot(DesignKeys.ENDS)));
     Optional<Double> activeCoils = activeCoils(ends);
     Optional<Double> freeLength = section.require(DesignKeys.FREE_LENGTH);
     Hand hand = section.read(DesignKeys.HAND).orElse(Hand.EITHER);
-    section.read(DesignKeys.SET_REMOVED);
+    boolean setRemoved = section.read(DesignKeys.SET_REMOVED).orElse(false);
+    double coating =
+        section
+            .read(DesignKeys.COATING)
+            .flatMap(inner -> inner.require(DesignKeys.COATING_THICKNESS))
+            .orElse(0.0);
     if (section.spot().faults().count() > before) {
       return Optional.empty();
     }
@@ -49,7 +57,9 @@ record DesignReader(MaterialIds ids, Section section) {
             activeCoils.get(),
             freeLength.get(),
             ends.get(),
-            hand));
+            hand,
+            setRemoved,
+            coating));
   }
 
   private Optional<Double> meanDiameter(double wire) {

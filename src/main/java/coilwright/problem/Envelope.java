@@ -7,8 +7,8 @@ import java.util.OptionalDouble;
  *
  * @param bore hole it works in [mm]
  * @param rod shaft through it [mm]
- * @param diametralClearance between coil and bore, and coil and rod [mm]; given whenever bore or
- *     rod is
+ * @param diametralClearance between coil and bore, and coil and rod [mm]; where it is empty the
+ *     tolerance of the coil diameter stands in
  * @param maxOutsideDiameter nominal, free state [mm]
  * @param minInsideDiameter nominal, free state [mm]
  * @param maxFreeLength [mm]
@@ -26,5 +26,10 @@ public record Envelope(
   /** Whether a bore or a rod keeps the spring straight. */
   public boolean guides() {
     return bore.isPresent() || rod.isPresent();
+  }
+
+  /** Whether the tolerance of the coil diameter is taken for the clearance. */
+  public boolean clearanceAssumed() {
+    return guides() && diametralClearance.isEmpty();
   }
 }

@@ -30,7 +30,7 @@ final class EnvelopeKeys {
       ProblemKey.of(
           "envelope.diametral_clearance",
           Values.quantity(Dimension.LENGTH, Range.FROM_ZERO),
-          "must be given with a bore or a rod",
+          "coil diameter tolerance of EN 15800 grade 2, assumed",
           "between coil and bore, and coil and rod",
           "0.4 mm");
 

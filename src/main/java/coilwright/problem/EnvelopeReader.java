@@ -37,7 +37,6 @@ final class EnvelopeReader {
         EnvelopeKeys.MIN_INSIDE_DIAMETER,
         envelope.maxOutsideDiameter(),
         envelope.minInsideDiameter());
-    clearance(section);
     room(section, envelope);
     return envelope;
   }
@@ -55,15 +54,6 @@ final class EnvelopeReader {
           .fault(
               section.shown(outerKey),
               "must be above " + innerKey.name() + ", " + section.shown(innerKey));
-    }
-  }
-
-  private static void clearance(Section section) {
-    boolean guided = section.has(EnvelopeKeys.BORE) || section.has(EnvelopeKeys.ROD);
-    if (guided && section.lacks(EnvelopeKeys.CLEARANCE)) {
-      section
-          .spot(EnvelopeKeys.CLEARANCE)
-          .fault("missing", "needed with bore or rod; its default is " + Later.WORDS);
     }
   }
 

@@ -10,8 +10,6 @@ final class Later {
 
   private static final List<String> KEYS =
       List.of(
-          "stroke",
-          "overtravel",
           "loading",
           "loads[].torque",
           "loads[].arm",
@@ -19,7 +17,6 @@ final class Later {
           "envelope.max_extended_length",
           "envelope.pin",
           "envelope.max_body_length",
-          "make.coating",
           "make.hooks",
           "make.hook_length",
           "make.hook_bend_radius",

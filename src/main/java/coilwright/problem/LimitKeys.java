@@ -1,5 +1,6 @@
 package coilwright.problem;
 
+import coilwright.spring.Method;
 import coilwright.spring.StressCorrection;
 import coilwright.unit.Dimension;
 import java.util.List;
@@ -58,14 +59,14 @@ final class LimitKeys {
       bound(
           "limits.clash_allowance",
           Values.quantity(Dimension.SHARE, Range.FROM_ZERO),
-          "15 %",
-          "travel left between the most compressed load and solid, of the deflection there",
+          "15 %; under en-13906 the sum of gaps",
+          "travel kept before solid, of the deflection at the greatest load",
           "15 %");
 
-  static final ProblemKey<String> STRESS_BASIS =
+  static final ProblemKey<Method> STRESS_BASIS =
       ProblemKey.of(
           "limits.stress_basis",
-          new WordReader<>(List.of("handbook"), word -> word, "en-13906"),
+          new WordReader<>(List.of(Method.values()), Method::id),
           "handbook",
           "whose allowables and formulas",
           "handbook");
@@ -81,7 +82,7 @@ final class LimitKeys {
   static final ProblemKey<Setting<Section>> STRESS_AT_LOAD =
       limit(
           "limits.stress_at_load",
-          "the handbook's value for the material",
+          "the value of the stress basis for the material",
           "{max: 45 %}",
           "share of tensile strength at the loads");
 
@@ -89,14 +90,14 @@ final class LimitKeys {
       bound(
           "limits.stress_at_load.max",
           Values.shareOfStrength(),
-          "the handbook's value for the material",
+          "the value of the stress basis for the material",
           "greatest share",
           "45 %");
 
   static final ProblemKey<Setting<Section>> STRESS_AT_SOLID =
       limit(
           "limits.stress_at_solid",
-          "the handbook's value for the material",
+          "the value of the stress basis for the material",
           "{max: 45 %}",
           "likewise with the coils pressed together");
 
@@ -104,7 +105,7 @@ final class LimitKeys {
       bound(
           "limits.stress_at_solid.max",
           Values.shareOfStrength(),
-          "the handbook's value for the material",
+          "the value of the stress basis for the material",
           "greatest share",
           "45 %");
 

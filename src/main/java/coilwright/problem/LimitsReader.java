@@ -1,5 +1,6 @@
 package coilwright.problem;
 
+import coilwright.spring.Method;
 import java.util.Optional;
 import java.util.OptionalDouble;
 
@@ -22,7 +23,9 @@ final class LimitsReader {
   }
 
   private static DesignLimits limits(Section section) {
-    section.read(LimitKeys.STRESS_BASIS);
+    Method method = section.read(LimitKeys.STRESS_BASIS).orElse(USUAL.method());
+    boolean standard = method == Method.EN_13906;
+    Optional<Setting<Double>> clash = section.read(LimitKeys.CLASH_ALLOWANCE);
     return new DesignLimits(
         new BandReader(
                 LimitKeys.SPRING_INDEX, LimitKeys.SPRING_INDEX_MIN, LimitKeys.SPRING_INDEX_MAX)
@@ -31,7 +34,9 @@ final class LimitsReader {
                 LimitKeys.ACTIVE_COILS, LimitKeys.ACTIVE_COILS_MIN, LimitKeys.ACTIVE_COILS_MAX)
             .read(section, USUAL.activeCoils()),
         bound(section, LimitKeys.PITCH_ANGLE, LimitKeys.PITCH_ANGLE_MAX, USUAL.maxPitchAngle()),
-        BandReader.bound(section.read(LimitKeys.CLASH_ALLOWANCE), USUAL.clashAllowance()),
+        BandReader.bound(clash, standard ? NONE : USUAL.clashAllowance()),
+        standard && clash.map(setting -> setting.value().isPresent()).orElse(true),
+        method,
         section.read(LimitKeys.STRESS_CORRECTION).orElse(USUAL.stressCorrection()),
         stress(section, LimitKeys.STRESS_AT_LOAD, LimitKeys.STRESS_AT_LOAD_MAX),
         stress(section, LimitKeys.STRESS_AT_SOLID, LimitKeys.STRESS_AT_SOLID_MAX),

@@ -15,30 +15,20 @@ record LoadEntry(Section section, LoadAsked asked) {
    * Reads a load.
    *
    * @param section its block of keys
-   * @param purpose a shortlist needs both length and force
    * @return the load
    */
-  static LoadEntry read(Section section, Purpose purpose) {
+  static LoadEntry read(Section section) {
     OptionalDouble length = section.number(LoadKeys.LENGTH);
     OptionalDouble force = section.number(LoadKeys.FORCE);
     Optional<ToleranceAsked> tolerance = section.read(LoadKeys.TOLERANCE);
-    boolean lacksLength = section.lacks(LoadKeys.LENGTH);
     boolean lacksForce = section.lacks(LoadKeys.FORCE);
-    if (lacksLength && lacksForce) {
-      section.spot().fault("neither length nor force", "must have " + wanted(purpose));
-    } else if (purpose == Purpose.SHORTLIST && (lacksLength || lacksForce)) {
-      section
-          .spot(lacksForce ? LoadKeys.FORCE : LoadKeys.LENGTH)
-          .fault("missing", "must be given; leaving it to shortlist is " + Later.WORDS);
+    if (section.lacks(LoadKeys.LENGTH) && lacksForce) {
+      section.spot().fault("neither length nor force", "must have one of them or both");
     }
     if (section.has(LoadKeys.TOLERANCE) && lacksForce) {
       section.spot(LoadKeys.TOLERANCE).fault("no force to go with it", "must stand with a force");
     }
     return new LoadEntry(section, new LoadAsked(length, force, resolved(tolerance, force)));
-  }
-
-  private static String wanted(Purpose purpose) {
-    return purpose == Purpose.SHORTLIST ? "both" : "one of them or both";
   }
 
   private static Optional<Tolerance> resolved(

@@ -19,7 +19,7 @@ final class LoadKeys {
           "loads[].length",
           Values.length(),
           "",
-          "length under the load; a file for check may leave out length or force",
+          "length under the load; length or force may be left out where other facts give it",
           "32 mm",
           "22 mm");
 
@@ -73,6 +73,26 @@ final class LoadKeys {
           "likewise: the length without load",
           "38.67 mm");
 
+  static final ProblemKey<Double> STROKE =
+      ProblemKey.of(
+          "stroke",
+          Values.length(),
+          "follows from the loads",
+          "from the least load to the greatest; without lengths the shortest are found",
+          "10 mm");
+
+  static final ProblemKey<Section> OVERTRAVEL =
+      ProblemKey.of(
+          "overtravel",
+          new SectionReader("overtravel"),
+          "none",
+          "assembly or abuse beyond the loads: stress, solid, buckling hold",
+          "{length: 20 mm}");
+
+  static final ProblemKey<Double> OVERTRAVEL_LENGTH =
+      ProblemKey.of(
+          "overtravel.length", Values.length(), "", "length it is pressed to; no force", "20 mm");
+
   static final ProblemKey<Integer> SPRINGS_IN_PARALLEL =
       ProblemKey.of(
           "springs_in_parallel",
@@ -83,7 +103,19 @@ final class LoadKeys {
 
   /** All of them. */
   static final List<ProblemKey<?>> ROWS =
-      List.of(LOADS, LENGTH, FORCE, TOLERANCE, PLUS, MINUS, RATE, FREE_LENGTH, SPRINGS_IN_PARALLEL);
+      List.of(
+          LOADS,
+          LENGTH,
+          FORCE,
+          TOLERANCE,
+          PLUS,
+          MINUS,
+          RATE,
+          FREE_LENGTH,
+          STROKE,
+          OVERTRAVEL,
+          OVERTRAVEL_LENGTH,
+          SPRINGS_IN_PARALLEL);
 
   private LoadKeys() {}
 }

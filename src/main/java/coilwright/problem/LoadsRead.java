@@ -1,6 +1,5 @@
 package coilwright.problem;
 
-import coilwright.spring.LoadLine;
 import coilwright.spring.LoadPoint;
 import java.util.List;
 import java.util.Optional;
@@ -25,17 +24,17 @@ record LoadsRead(List<LoadEntry> loads, LoadFacts facts, Optional<Requirement> r
   static LoadsRead of(Section root, Purpose purpose) {
     long before = root.spot().faults().count();
     List<LoadEntry> loads =
-        root.require(LoadKeys.LOADS).orElse(List.of()).stream()
-            .map(section -> LoadEntry.read(section, purpose))
-            .toList();
+        root.require(LoadKeys.LOADS).orElse(List.of()).stream().map(LoadEntry::read).toList();
     LoadFacts facts =
         new LoadFacts(
             loads.stream().map(LoadEntry::asked).toList(),
             root.number(LoadKeys.RATE),
             root.number(LoadKeys.FREE_LENGTH),
+            root.number(LoadKeys.STROKE),
             root.read(LoadKeys.SPRINGS_IN_PARALLEL).orElse(1));
     if (root.spot().faults().count() == before) {
       LoadOrder.check(loads);
+      Agreement.strokeBetween(root, loads);
     }
     if (root.spot().faults().count() > before) {
       return new LoadsRead(loads, facts, Optional.empty());
@@ -55,8 +54,9 @@ record LoadsRead(List<LoadEntry> loads, LoadFacts facts, Optional<Requirement> r
     if (purpose == Purpose.SHORTLIST && root.spot().faults().count() == before) {
       root.spot(LoadKeys.LOADS)
           .fault(
-              "one load does not fix the load line",
-              "must be two loads, or one and rate or free_length");
+              "the facts do not fix the load line",
+              "must be two loads at lengths; or one, and rate, free_length or a second force and"
+                  + " stroke; or rate and free_length; or no length at all, and rate or stroke");
     }
     return Optional.empty();
   }
@@ -69,8 +69,9 @@ record LoadsRead(List<LoadEntry> loads, LoadFacts facts, Optional<Requirement> r
   void checkAgainst(Design design) {
     double reported =
         required
-            .map(asked -> asked.line().freeLength())
-            .orElse(facts.freeLength().orElse(Double.POSITIVE_INFINITY));
+            .map(Requirement::freeLength)
+            .orElse(facts.freeLength())
+            .orElse(Double.POSITIVE_INFINITY);
     List<LoadEntry> lengths =
         loads.stream()
             .filter(load -> load.section().lacks(LoadKeys.FORCE))
@@ -81,12 +82,20 @@ record LoadsRead(List<LoadEntry> loads, LoadFacts facts, Optional<Requirement> r
 
   private static Requirement perSpring(FixedLine fixed, LoadFacts facts) {
     int n = facts.springsInParallel();
-    LoadLine line = new LoadLine(fixed.line().rate() / n, fixed.line().freeLength());
+    double rate = fixed.rate() / n;
+    if (fixed.freeLength().isEmpty()) {
+      List<LoadPoint> deflected =
+          facts.loads().stream()
+              .map(load -> load.force().orElseThrow() / n)
+              .map(force -> LoadPoint.deflected(force / rate, force))
+              .toList();
+      return new Requirement(rate, fixed.freeLength(), fixed.rule(), deflected);
+    }
     List<LoadPoint> loads =
         facts.loads().stream()
             .map(load -> new LoadPoint(load.length(), divided(load.force(), n)))
             .toList();
-    return new Requirement(line, fixed.rule(), loads);
+    return new Requirement(rate, fixed.freeLength(), fixed.rule(), loads);
   }
 
   private static OptionalDouble divided(OptionalDouble force, int n) {

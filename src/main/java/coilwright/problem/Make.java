@@ -19,6 +19,8 @@ import java.util.List;
  * @param wireSizes explicit sizes; empty where none is given. They take the place of series
  * @param ends the end types tried
  * @param hand direction of winding
+ * @param setRemoved whether the spring is pressed solid once before use
+ * @param coating thickness of what covers the wire [mm], zero for bare wire
  * @param coilStep active coils are multiples of this [-]
  * @param rounding steps of mean diameter and free length
  */
@@ -31,6 +33,8 @@ public record Make(
     List<WireSize> wireSizes,
     List<EndType> ends,
     Hand hand,
+    boolean setRemoved,
+    double coating,
     double coilStep,
     Rounding rounding) {
 

@@ -78,10 +78,22 @@ final class MakeKeys {
   static final ProblemKey<Boolean> SET_REMOVED =
       ProblemKey.of(
           "make.set_removed",
-          Values.notSet(),
+          Values.flag(),
           "false",
           "whether the spring is pressed solid once to raise its strength",
           "false");
+
+  static final ProblemKey<Section> COATING =
+      ProblemKey.of(
+          "make.coating",
+          new SectionReader("make.coating"),
+          "bare wire",
+          "what covers the wire: it adds where coils touch and clear",
+          "{thickness: 8 um}");
+
+  static final ProblemKey<Double> COATING_THICKNESS =
+      ProblemKey.of(
+          "make.coating.thickness", Values.length(), "", "how thick the cover is", "8 um");
 
   static final ProblemKey<Double> COIL_STEP =
       ProblemKey.of(
@@ -119,6 +131,8 @@ final class MakeKeys {
           ENDS,
           HAND,
           SET_REMOVED,
+          COATING,
+          COATING_THICKNESS,
           COIL_STEP,
           DIAMETER_STEP,
           LENGTH_STEP);

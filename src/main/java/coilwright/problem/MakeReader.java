@@ -3,6 +3,7 @@ package coilwright.problem;
 import coilwright.material.Supply;
 import coilwright.spring.EndType;
 import coilwright.spring.Hand;
+import coilwright.spring.Method;
 import coilwright.spring.Rounding;
 import java.util.List;
 import java.util.Optional;
@@ -12,8 +13,9 @@ import java.util.Optional;
  *
  * @param ids the grades that may be named
  * @param units decide the defaults of supply and rounding
+ * @param method decides which ends may be made
  */
-record MakeReader(MaterialIds ids, UnitSystem units) {
+record MakeReader(MaterialIds ids, UnitSystem units, Method method) {
 
   private static final double COIL_STEP = 0.25;
   private static final List<EndType> ENDS = List.of(EndType.SQUARED_GROUND, EndType.SQUARED);
@@ -33,7 +35,18 @@ record MakeReader(MaterialIds ids, UnitSystem units) {
     Rounding rounding = StepDefaults.of(units).rounding(Optional.empty(), Optional.empty());
     List<String> none = List.of();
     return new Make(
-        supply, none, false, none, List.of(), List.of(), ENDS, Hand.EITHER, COIL_STEP, rounding);
+        supply,
+        none,
+        false,
+        none,
+        List.of(),
+        List.of(),
+        ENDS,
+        Hand.EITHER,
+        false,
+        0,
+        COIL_STEP,
+        rounding);
   }
 
   private Make read(Section section, Supply usual) {
@@ -41,7 +54,6 @@ record MakeReader(MaterialIds ids, UnitSystem units) {
     List<String> excluded = section.read(MakeKeys.EXCLUDE_MATERIALS).orElse(List.of());
     boolean all = materials.contains(MaterialIds.ALL);
     checkMaterials(section, materials, excluded);
-    section.read(MakeKeys.SET_REMOVED);
     Make make =
         new Make(
             section.read(MakeKeys.SUPPLY).orElse(usual),
@@ -52,16 +64,29 @@ record MakeReader(MaterialIds ids, UnitSystem units) {
             section.read(MakeKeys.WIRE_SIZES).orElse(List.of()),
             section.read(MakeKeys.ENDS).orElse(ENDS),
             section.read(MakeKeys.HAND).orElse(Hand.EITHER),
+            section.read(MakeKeys.SET_REMOVED).orElse(false),
+            section
+                .read(MakeKeys.COATING)
+                .flatMap(coating -> coating.require(MakeKeys.COATING_THICKNESS))
+                .orElse(0.0),
             section.read(MakeKeys.COIL_STEP).orElse(COIL_STEP),
             StepDefaults.of(units)
                 .rounding(
                     section.read(MakeKeys.DIAMETER_STEP), section.read(MakeKeys.LENGTH_STEP)));
+    checkEnds(section, make.ends());
     if (section.has(MakeKeys.WIRE_SERIES) && section.has(MakeKeys.WIRE_SIZES)) {
       section
           .spot(MakeKeys.WIRE_SIZES)
           .fault("given beside wire_series", "must be one of them: sizes take the place of series");
     }
     return make;
+  }
+
+  private void checkEnds(Section section, List<EndType> ends) {
+    List<Spot> spots = section.itemSpots(MakeKeys.ENDS);
+    for (int i = 0; i < Math.min(ends.size(), spots.size()); i++) {
+      ClosedEnds.check(ends.get(i), method, spots.get(i));
+    }
   }
 
   private void checkMaterials(Section section, List<String> materials, List<String> excluded) {

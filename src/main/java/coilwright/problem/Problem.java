@@ -4,6 +4,7 @@ import coilwright.material.WireGrade;
 import coilwright.spring.Seating;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 
 /**
  * A problem file, read and found valid, defaults filled in.
@@ -13,6 +14,7 @@ import java.util.Optional;
  * @param facts what the file says about the load line
  * @param required the load line and loads of one spring; empty only in a file for checking that
  *     does not fix the line
+ * @param overtravel a length it must survive beyond its loads [mm], or empty
  * @param envelope the space
  * @param seats how the ends are held; empty where the usual seating of each end type applies
  * @param make what may be made; the defaults where the file has a {@code design} block
@@ -27,6 +29,7 @@ public record Problem(
     UnitSystem units,
     LoadFacts facts,
     Optional<Requirement> required,
+    OptionalDouble overtravel,
     Envelope envelope,
     Optional<Seating> seats,
     Make make,
@@ -39,6 +42,16 @@ public record Problem(
   /** Copies the list. */
   public Problem {
     ownMaterials = List.copyOf(ownMaterials);
+  }
+
+  /** Whether the spring to check, or any to be made, is pressed solid once before use. */
+  public boolean setRemoved() {
+    return design.map(Design::setRemoved).orElse(make.setRemoved());
+  }
+
+  /** Thickness of what covers the wire of the spring to check, or of any to be made [mm]. */
+  public double coating() {
+    return design.map(Design::coating).orElse(make.coating());
   }
 
   /**
@@ -54,6 +67,7 @@ public record Problem(
         units,
         facts,
         required,
+        overtravel,
         envelope,
         seats,
         make,

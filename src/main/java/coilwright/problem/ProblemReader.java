@@ -5,6 +5,7 @@ import coilwright.material.WireGrade;
 import coilwright.spring.Seating;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 
 /** Reads problem files. */
 public final class ProblemReader {
@@ -54,15 +55,17 @@ public final class ProblemReader {
     UnitSystem units = root.read(HeadKeys.UNITS).orElse(UnitSystem.METRIC);
     checkPurpose();
     LoadsRead loads = LoadsRead.of(root, root.has(DesignKeys.DESIGN) ? Purpose.CHECK : purpose);
+    OptionalDouble overtravel = OvertravelReader.read(root, loads);
     Envelope envelope = EnvelopeReader.read(root);
     Optional<Seating> seats = root.read(EnvelopeKeys.SEATS);
     MaterialIds ids = new MaterialIds(catalogue);
     List<WireGrade> own = new OwnMaterials(catalogue, ids, units).read(root);
-    Make make = new MakeReader(ids, units).read(root);
-    Optional<Design> design =
-        root.read(DesignKeys.DESIGN).flatMap(section -> new DesignReader(ids, section).read());
-    design.ifPresent(loads::checkAgainst);
     DesignLimits limits = LimitsReader.read(root);
+    Make make = new MakeReader(ids, units, limits.method()).read(root);
+    Optional<Design> design =
+        root.read(DesignKeys.DESIGN)
+            .flatMap(section -> new DesignReader(ids, section, limits.method()).read());
+    design.ifPresent(loads::checkAgainst);
     Optional<Section> rank = root.read(RankKeys.RANK);
     RankBy by = rank.flatMap(section -> section.read(RankKeys.BY)).orElse(RankBy.MASS);
     int top = rank.flatMap(section -> section.read(RankKeys.TOP)).orElse(TOP);
@@ -72,6 +75,7 @@ public final class ProblemReader {
             units,
             loads.facts(),
             loads.required(),
+            overtravel,
             envelope,
             seats,
             make,

@@ -27,11 +27,17 @@ public final class Starter {
     for (ProblemKey<?> key : KeyTable.children(parent)) {
       boolean on = !key.optional() || HeadKeys.ROWS.contains(key);
       if (key.examples().isEmpty()) {
-        block(key, indent, off || key == DesignKeys.DESIGN);
+        block(key, indent, off || needsMore(key));
       } else {
         line(indent, off || !on, entry(key, 0), comment(key));
       }
     }
+  }
+
+  /** Whether a block may be left out, but not what belongs into it. */
+  private static boolean needsMore(ProblemKey<?> block) {
+    return block.optional()
+        && KeyTable.children(block.path()).stream().anyMatch(key -> !key.optional());
   }
 
   private void block(ProblemKey<?> key, String indent, boolean off) {

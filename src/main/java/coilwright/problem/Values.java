@@ -50,9 +50,9 @@ final class Values {
     return new NumberReader(Range.FROM_ONE, true).map(Double::intValue);
   }
 
-  /** Whether the springs are set, of which only {@code false} is available. */
-  static ValueReader<Boolean> notSet() {
-    return new WordReader<>(List.of(false), String::valueOf, "true");
+  /** True or false. */
+  static ValueReader<Boolean> flag() {
+    return new WordReader<>(List.of(true, false), String::valueOf);
   }
 
   /**

@@ -36,10 +36,13 @@ final class CandidateJson {
     json.string("data", state.wire().evidence().word());
     json.string("seats", state.seating().id());
     json.array("loads", this::loads);
+    if (state.overtravel().isPresent()) {
+      json.object("overtravel", body -> load(body, state.overtravel().get()));
+    }
     json.object("solid", this::solid);
     json.number(
         "outside_diameter_at_solid_mm",
-        OutputUnits.plain(Dimension.LENGTH, state.spring().outsideDiameterAtSolid()));
+        OutputUnits.plain(Dimension.LENGTH, state.outsideDiameterAtSolid()));
     json.object("buckling", this::buckling);
     json.array("checks", this::checks);
     if (candidate.leastMargin().isPresent()) {
@@ -63,12 +66,13 @@ final class CandidateJson {
 
   private void loads(Json json) throws IOException {
     for (LoadState load : state.loads()) {
-      json.braces(
-          body -> {
-            for (Quantity<LoadState> quantity : CompressionQuantities.LOAD) {
-              body.number(quantity.key(), quantity.plain(load));
-            }
-          });
+      json.braces(body -> load(body, load));
+    }
+  }
+
+  private static void load(Json json, LoadState load) throws IOException {
+    for (Quantity<LoadState> quantity : CompressionQuantities.LOAD) {
+      json.number(quantity.key(), quantity.plain(load));
     }
   }
 
@@ -86,7 +90,7 @@ final class CandidateJson {
       json.nothing("critical_deflection_mm");
     }
     boolean atSolid = problem.limits().buckling() == BucklingRule.AT_SOLID;
-    json.flag("stable", state.stableAt(atSolid ? state.solid() : state.mostCompressed()));
+    json.flag("stable", state.stableAt(atSolid ? state.solid() : state.extreme()));
   }
 
   private void checks(Json json) throws IOException {

@@ -83,10 +83,7 @@ public final class CheckedText {
           quantity.text(state, OutputUnits.METRIC),
           OutputUnits.METRIC.symbol(quantity.dimension()));
     }
-    table.row(
-        "outside diameter at solid",
-        Numbers.fixed(state.spring().outsideDiameterAtSolid(), 3),
-        "mm");
+    table.row("outside diameter at solid", Numbers.fixed(state.outsideDiameterAtSolid(), 3), "mm");
     double critical = state.criticalDeflection();
     if (Double.isInfinite(critical)) {
       table.row("critical deflection", "none", "cannot buckle");
@@ -109,6 +106,7 @@ public final class CheckedText {
     for (int i = 0; i < state.loads().size(); i++) {
       table.row(cells("load " + (i + 1), state.loads().get(i)));
     }
+    state.overtravel().ifPresent(load -> table.row(cells("overtravel", load)));
     table.row(cells("solid", state.solid()));
     lines.table(table);
     lines.line("");

@@ -12,6 +12,7 @@ import coilwright.problem.Make;
 import coilwright.problem.Problem;
 import coilwright.problem.StressLimit;
 import coilwright.problem.Tolerance;
+import coilwright.spring.CoilTolerance;
 import coilwright.spring.EndType;
 import coilwright.unit.Dimension;
 import java.io.IOException;
@@ -67,6 +68,11 @@ final class ProblemJson implements Json.Part {
         });
     optional(json, "rate_n_per_mm", problem.facts().rate());
     optional(json, "free_length_mm", problem.facts().freeLength());
+    optional(json, "stroke_mm", problem.facts().stroke());
+    if (problem.overtravel().isPresent()) {
+      json.object(
+          "overtravel", body -> body.number("length_mm", problem.overtravel().getAsDouble()));
+    }
     json.count("springs_in_parallel", problem.facts().springsInParallel());
   }
 
@@ -89,6 +95,9 @@ final class ProblemJson implements Json.Part {
     optional(json, "bore_mm", space.bore());
     optional(json, "rod_mm", space.rod());
     optional(json, "diametral_clearance_mm", space.diametralClearance());
+    if (space.clearanceAssumed()) {
+      json.string("diametral_clearance", CoilTolerance.citation().place() + " (assumed)");
+    }
     optional(json, "max_outside_diameter_mm", space.maxOutsideDiameter());
     optional(json, "min_inside_diameter_mm", space.minInsideDiameter());
     optional(json, "max_free_length_mm", space.maxFreeLength());
@@ -109,7 +118,8 @@ final class ProblemJson implements Json.Part {
     }
     json.strings("ends", make.ends().stream().map(EndType::id).toList());
     json.string("hand", make.hand().id());
-    json.flag("set_removed", false);
+    json.flag("set_removed", make.setRemoved());
+    coating(json, make.coating());
     json.number("coil_step", make.coilStep());
     json.number("diameter_step_mm", make.rounding().diameterStep());
     json.number("length_step_mm", make.rounding().lengthStep());
@@ -123,7 +133,14 @@ final class ProblemJson implements Json.Part {
     json.number("free_length_mm", design.freeLength());
     json.string("ends", design.ends().id());
     json.string("hand", design.hand().id());
-    json.flag("set_removed", false);
+    json.flag("set_removed", design.setRemoved());
+    coating(json, design.coating());
+  }
+
+  private static void coating(Json json, double thickness) throws IOException {
+    if (thickness > 0) {
+      json.object("coating", body -> body.number("thickness_mm", thickness));
+    }
   }
 
   private static void limits(Json json, DesignLimits limits) throws IOException {
@@ -133,9 +150,9 @@ final class ProblemJson implements Json.Part {
     if (limits.clashAllowance().isPresent()) {
       json.number("clash_allowance", limits.clashAllowance().getAsDouble());
     } else {
-      json.string("clash_allowance", "none");
+      json.string("clash_allowance", limits.gapSum() ? "sum of gaps" : "none");
     }
-    json.string("stress_basis", "handbook");
+    json.string("stress_basis", limits.method().id());
     json.string("stress_correction", limits.stressCorrection().id());
     stress(json, "stress_at_load", limits.stressAtLoad());
     stress(json, "stress_at_solid", limits.stressAtSolid());

@@ -46,8 +46,10 @@ public final class ShortlistJson {
     json.object(
         "required",
         body -> {
-          body.number("rate_n_per_mm", required.line().rate());
-          body.number("free_length_mm", required.line().freeLength());
+          body.number("rate_n_per_mm", required.rate());
+          if (required.freeLength().isPresent()) {
+            body.number("free_length_mm", required.freeLength().getAsDouble());
+          }
           body.string("rule", required.rule());
         });
   }

@@ -8,9 +8,9 @@ import coilwright.problem.Envelope;
 import coilwright.problem.LoadAsked;
 import coilwright.problem.Make;
 import coilwright.problem.Problem;
+import coilwright.problem.Requirement;
 import coilwright.problem.Tolerance;
 import coilwright.spring.EndType;
-import coilwright.spring.LoadLine;
 import coilwright.spring.Seating;
 import java.util.ArrayList;
 import java.util.List;
@@ -48,20 +48,29 @@ final class Understood {
 
   private void loads() {
     int parallel = problem.facts().springsInParallel();
+    String stroke =
+        problem.facts().stroke().isPresent()
+            ? "; stroke " + length(problem.facts().stroke().getAsDouble())
+            : "";
     String shared = parallel > 1 ? ", shared by " + parallel + " springs side by side" : "";
     List<String> loads = problem.facts().loads().stream().map(Understood::load).toList();
-    table.row("loads", String.join("; ", loads) + shared);
+    table.row("loads", String.join("; ", loads) + stroke + shared);
     if (problem.required().isPresent()) {
-      LoadLine line = problem.required().get().line();
+      Requirement required = problem.required().get();
       table.row(
           parallel > 1 ? "each spring" : "load line",
           "rate "
-              + Numbers.brief(line.rate(), 4)
-              + " N/mm, free length "
-              + length(line.freeLength())
+              + Numbers.brief(required.rate(), 4)
+              + " N/mm, "
+              + (required.freeLength().isPresent()
+                  ? "free length " + length(required.freeLength().getAsDouble())
+                  : "lengths as short as the limits allow")
               + ", from "
-              + problem.required().get().rule());
+              + required.rule());
     }
+    problem
+        .overtravel()
+        .ifPresent(length -> table.row("overtravel", "to " + length(length) + ", no force asked"));
   }
 
   private static String load(LoadAsked load) {
@@ -70,10 +79,10 @@ final class Understood {
     load.tolerance().map(Understood::tolerance).ifPresent(words::add);
     load.length().ifPresent(length -> words.add("at " + length(length)));
     if (load.force().isEmpty()) {
-      words.add("(force computed)");
+      words.add("(force found)");
     }
     if (load.length().isEmpty()) {
-      words.add("(length computed)");
+      words.add("(length found)");
     }
     return String.join(" ", words);
   }
@@ -97,6 +106,9 @@ final class Understood {
     if (space.guides()) {
       bound(words, "diametral clearance", space.diametralClearance());
     }
+    if (space.clearanceAssumed()) {
+      words.add("clearance the coil diameter tolerance of EN 15800 grade 2 (assumed)");
+    }
     bound(words, "outside diameter up to", space.maxOutsideDiameter());
     bound(words, "inside diameter from", space.minInsideDiameter());
     bound(words, "free length up to", space.maxFreeLength());
@@ -117,6 +129,12 @@ final class Understood {
             + (assumed ? " (assumed: common grades, supply " + make.supply().word() + ")" : ""));
     table.row("wire", wire(make));
     table.row("ends", String.join(", ", make.ends().stream().map(EndType::id).toList()));
+    if (make.setRemoved()) {
+      table.row("set", "removed: pressed solid once before use");
+    }
+    if (make.coating() > 0) {
+      table.row("coating", Numbers.brief(make.coating(), 4) + " mm thick");
+    }
     table.row(
         "steps",
         "coils "

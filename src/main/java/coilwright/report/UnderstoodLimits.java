@@ -1,6 +1,7 @@
 package coilwright.report;
 
 import coilwright.limit.Allowable;
+import coilwright.limit.StressBasis;
 import coilwright.material.WireGrade;
 import coilwright.problem.Band;
 import coilwright.problem.DesignLimits;
@@ -10,18 +11,19 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.function.BiFunction;
 
 /** The limits of a problem in words. */
 final class UnderstoodLimits {
 
   private final Problem problem;
   private final DesignLimits limits;
+  private final StressBasis basis;
   private final List<WireGrade> grades;
 
   UnderstoodLimits(Problem problem, List<WireGrade> grades) {
     this.problem = problem;
     this.limits = problem.limits();
+    this.basis = StressBasis.of(limits.method(), problem.setRemoved());
     this.grades = grades;
   }
 
@@ -44,11 +46,16 @@ final class UnderstoodLimits {
                 + Numbers.brief(StrictMath.toDegrees(limits.maxPitchAngle().getAsDouble()), 2)
                 + " deg"
             : "pitch angle any");
-    words.add(
-        limits.clashAllowance().isPresent()
-            ? "clash allowance " + percent(limits.clashAllowance().getAsDouble())
-            : "clash allowance none");
+    words.add("clash allowance " + clash());
     return String.join(", ", words);
+  }
+
+  private String clash() {
+    if (limits.clashAllowance().isEmpty()) {
+      return limits.gapSum() ? "the sum of gaps of EN 13906-1" : "none";
+    }
+    String share = percent(limits.clashAllowance().getAsDouble());
+    return limits.gapSum() ? share + " and the sum of gaps of EN 13906-1" : share;
   }
 
   private static String band(Band band) {
@@ -69,12 +76,25 @@ final class UnderstoodLimits {
     return (load.equals(solid)
             ? "at load and at solid " + load
             : "at load " + load + "; at solid " + solid)
-        + "; corrected by "
-        + limits.stressCorrection().author();
+        + "; "
+        + meant();
+  }
+
+  private String meant() {
+    return switch (basis) {
+      case HANDBOOK -> "corrected by " + limits.stressCorrection().author();
+      case HANDBOOK_SET_REMOVED -> "set removed, on the stress times 1 + 0.5/C";
+      case EN_13906 -> "EN 13906-1, on the uncorrected stress";
+    };
+  }
+
+  /** How the bound of a grade is chosen. */
+  private interface Choice {
+    Allowable of(StressLimit limit, WireGrade grade, StressBasis basis);
   }
 
   /** The share of each grade, grades with the same one together. */
-  private String share(StressLimit limit, BiFunction<StressLimit, WireGrade, Allowable> of) {
+  private String share(StressLimit limit, Choice choice) {
     if (!limit.judged()) {
       return "not judged";
     }
@@ -82,12 +102,12 @@ final class UnderstoodLimits {
       return percent(limit.share().getAsDouble()) + " of tensile strength";
     }
     if (grades.isEmpty()) {
-      return "the handbook's share of tensile strength";
+      return "the share of tensile strength that the basis gives";
     }
     Map<Double, List<String>> byShare = new LinkedHashMap<>();
     for (WireGrade grade : grades) {
       byShare
-          .computeIfAbsent(of.apply(limit, grade).share(), share -> new ArrayList<>())
+          .computeIfAbsent(choice.of(limit, grade, basis).share(), share -> new ArrayList<>())
           .add(grade.id());
     }
     List<String> words = new ArrayList<>();

@@ -79,6 +79,6 @@ final class Warnings {
   private static boolean buckles(Problem problem, CompressionState state) {
     return problem.limits().buckling() == BucklingRule.AT_LOAD_UNLESS_GUIDED
         && problem.envelope().guides()
-        && !state.stableAt(state.mostCompressed());
+        && !state.stableAt(state.extreme());
   }
 }

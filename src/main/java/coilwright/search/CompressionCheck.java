@@ -11,12 +11,12 @@ import coilwright.problem.Design;
 import coilwright.problem.LimitName;
 import coilwright.problem.LoadAsked;
 import coilwright.problem.Problem;
+import coilwright.problem.Requirement;
 import coilwright.source.Citation;
 import coilwright.source.Source;
 import coilwright.spring.CompressionSpring;
 import coilwright.spring.CompressionState;
 import coilwright.spring.Duty;
-import coilwright.spring.LoadLine;
 import coilwright.spring.LoadPoint;
 import coilwright.spring.Seating;
 import coilwright.unit.Dimension;
@@ -90,8 +90,7 @@ public record CompressionCheck(
   /** The loads of one spring; where the facts fix the load line, it completes them. */
   private static List<LoadPoint> loads(Problem problem) {
     if (problem.required().isPresent()) {
-      LoadLine line = problem.required().get().line();
-      return problem.required().get().loads().stream().map(load -> load.on(line)).toList();
+      return problem.required().get().completed();
     }
     int parallel = problem.facts().springsInParallel();
     return problem.facts().loads().stream().map(load -> point(load, parallel)).toList();
@@ -100,10 +99,7 @@ public record CompressionCheck(
   /** Where one load and another fact fix the line, the free length that follows is asked too. */
   private static OptionalDouble freeLength(Problem problem, List<LoadPoint> loads) {
     return loads.size() == 1
-        ? problem
-            .required()
-            .map(required -> OptionalDouble.of(required.line().freeLength()))
-            .orElse(OptionalDouble.empty())
+        ? problem.required().map(Requirement::freeLength).orElse(OptionalDouble.empty())
         : OptionalDouble.empty();
   }
 
@@ -124,6 +120,13 @@ public record CompressionCheck(
             design.activeCoils(),
             design.freeLength(),
             design.ends()),
-        new Duty(loads, problem.limits().stressCorrection(), seating));
+        new Duty(
+            loads,
+            problem.limits().stressCorrection(),
+            seating,
+            problem.limits().method(),
+            problem.coating(),
+            problem.overtravel(),
+            Optional.empty()));
   }
 }

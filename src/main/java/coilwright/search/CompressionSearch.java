@@ -3,6 +3,7 @@ package coilwright.search;
 import coilwright.limit.CompressionLimits;
 import coilwright.limit.Limit;
 import coilwright.material.Wire;
+import coilwright.problem.DesignLimits;
 import coilwright.problem.Problem;
 import coilwright.problem.Requirement;
 import coilwright.spring.CompressionFamily;
@@ -10,8 +11,11 @@ import coilwright.spring.CompressionState;
 import coilwright.spring.Duty;
 import coilwright.spring.EndType;
 import coilwright.spring.Seating;
+import coilwright.spring.Travel;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
 
 /** The search for compression springs: a problem's wires and ends as families, and its limits. */
 public final class CompressionSearch {
@@ -46,12 +50,33 @@ public final class CompressionSearch {
     for (Wire wire : wires) {
       for (EndType ends : problem.make().ends()) {
         Seating seating = problem.seats().orElse(Seating.usualFor(ends));
-        Duty duty = new Duty(required.loads(), problem.limits().stressCorrection(), seating);
         families.add(
-            new CompressionFamily(wire, ends, required.line(), duty, problem.make().rounding()));
+            new CompressionFamily(
+                wire,
+                ends,
+                required.rate(),
+                required.freeLength(),
+                duty(problem, required, seating),
+                problem.make().rounding()));
       }
     }
     return families;
+  }
+
+  private static Duty duty(Problem problem, Requirement required, Seating seating) {
+    DesignLimits limits = problem.limits();
+    OptionalDouble deflection = required.greatestDeflection();
+    return new Duty(
+        required.completed(),
+        limits.stressCorrection(),
+        seating,
+        limits.method(),
+        problem.coating(),
+        problem.overtravel(),
+        deflection.isPresent()
+            ? Optional.of(
+                new Travel(deflection.getAsDouble(), limits.clashAllowance(), limits.gapSum()))
+            : Optional.empty());
   }
 
   /**
@@ -61,6 +86,6 @@ public final class CompressionSearch {
    * @return its limits
    */
   public static List<Limit<CompressionState>> limits(Problem problem) {
-    return CompressionLimits.of(problem, problem.required().orElseThrow().loads());
+    return CompressionLimits.of(problem, problem.required().orElseThrow().completed());
   }
 }

@@ -1,6 +1,7 @@
 package coilwright.search;
 
 import coilwright.limit.CoilSet;
+import coilwright.limit.Limit;
 import coilwright.problem.LimitName;
 import coilwright.spring.State;
 import java.util.EnumSet;
@@ -28,6 +29,11 @@ final class Decisive<S extends State> {
     for (LimitName name : suspects()) {
       if (name.removable() && holdsWithout(name)) {
         decisive.add(name);
+      }
+    }
+    for (Limit<S> limit : search.limits()) {
+      if (!decisive.contains(limit.name()) && search.holdsReshaped(limit)) {
+        decisive.add(limit.name());
       }
     }
     if (holdsBetweenSteps()) {

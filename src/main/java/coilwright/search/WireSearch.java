@@ -17,6 +17,7 @@ import java.util.Optional;
  */
 final class WireSearch<S extends State> {
 
+  private final Family<S> source;
   private final Trail<S> family;
   private final List<Limit<S>> limits;
   private final CoilStep step;
@@ -24,6 +25,7 @@ final class WireSearch<S extends State> {
   private final CoilSet practical;
 
   WireSearch(Family<S> family, List<Limit<S>> limits, CoilStep step) {
+    this.source = family;
     this.family = new Trail<>(family);
     this.limits = limits;
     this.step = step;
@@ -67,6 +69,17 @@ final class WireSearch<S extends State> {
       }
     }
     return true;
+  }
+
+  /** Whether dropping a limit makes other springs, of which some practical one would do. */
+  boolean holdsReshaped(Limit<S> dropped) {
+    Family<S> other = dropped.dropped(source);
+    if (other == source) {
+      return false;
+    }
+    List<Limit<S>> others = new ArrayList<>(limits);
+    others.removeIf(limit -> limit.name() == dropped.name());
+    return !new WireSearch<>(other, others, step).candidates().isEmpty();
   }
 
   /** What a limit leaves by itself of the unrounded springs: all its bounds together. */

@@ -19,6 +19,10 @@ public enum Source {
   EN_10218_2(
       "EN 10218-2",
       "EN 10218-2, Steel wire and wire products, part 2: wire dimensions and tolerances"),
+  /** Quality of cold-coiled compression springs. */
+  EN_15800(
+      "EN 15800",
+      "EN 15800, Cylindrical helical springs made of round wire, quality specifications for cold coiled compression springs"),
   /** Compression springs, calculation and design. */
   EN_13906_1(
       "EN 13906-1",

@@ -11,6 +11,10 @@ public final class Coil {
   public static final Citation GROWTH =
       Citation.remembered(Source.WAHL, "diameter increase on compression, ends held");
 
+  /** Growth of a coil whose ends can turn. */
+  public static final Citation GROWTH_FREE =
+      Citation.remembered(Source.EN_13906_1, "increase of the coil diameter under load");
+
   /** Slope and length of a helix. */
   public static final Citation HELIX = Citation.seen(Source.FIRST_PRINCIPLES, "unrolled helix");
 
@@ -66,5 +70,24 @@ public final class Coil {
     double dia = Require.above(meanDiameter, d, "mean diameter", "mm");
     double p = Require.finite(pitch, "pitch", "mm");
     return Math.sqrt(dia * dia + (p * p - d * d) / (Math.PI * Math.PI));
+  }
+
+  /**
+   * Growth of the outside diameter of a coil pressed to solid whose ends can turn, 0.1 (p^2 - 0.8 p
+   * d - 0.2 d^2)/D.
+   *
+   * @param meanDiameter D when free [mm], above the wire diameter
+   * @param pitch p when free [mm]
+   * @param wireDiameter d [mm]
+   * @return the growth [mm]
+   * @throws IllegalArgumentException if a diameter is not positive and finite, the pitch not
+   *     finite, or the mean diameter below the wire's
+   */
+  public static double growthFreeToTurn(double meanDiameter, double pitch, double wireDiameter) {
+    double d = Require.positive(wireDiameter, "wire diameter", "mm");
+    double p = Require.finite(pitch, "pitch", "mm");
+    return 0.1
+        * (p * p - 0.8 * p * d - 0.2 * d * d)
+        / Require.above(meanDiameter, d, "mean diameter", "mm");
   }
 }

@@ -47,11 +47,6 @@ public record CompressionSpring(
     return activeCoils + ends.deadCoils();
   }
 
-  /** Solid length Ls [mm]. */
-  public double solidLength() {
-    return ends.solidLength(activeCoils, wire.diameter());
-  }
-
   /** Pitch p [mm]. */
   public double pitch() {
     return ends.pitch(freeLength, wire.diameter(), activeCoils);
@@ -81,11 +76,6 @@ public record CompressionSpring(
   public double surgeFrequency() {
     return Surge.firstFrequency(
         wire.diameter(), meanDiameter, activeCoils, wire.shearModulus(), wire.density());
-  }
-
-  /** Outside diameter when pressed to solid, ends held from turning [mm]. */
-  public double outsideDiameterAtSolid() {
-    return Coil.meanDiameterAtSolid(meanDiameter, pitch(), wire.diameter()) + wire.diameter();
   }
 
   /**

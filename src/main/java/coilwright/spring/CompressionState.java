@@ -3,6 +3,7 @@ package coilwright.spring;
 import coilwright.material.Wire;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 
 /**
  * A compression spring at all its loads. The numbers that several limits ask for are computed once;
@@ -16,6 +17,7 @@ public final class CompressionState implements State {
   private final double solidLength;
   private final double correctionFactor;
   private final LoadState mostCompressed;
+  private final LoadState extreme;
   private final LoadState solid;
 
   /**
@@ -28,13 +30,23 @@ public final class CompressionState implements State {
     this.spring = spring;
     this.duty = duty;
     this.rate = spring.rate();
-    this.solidLength = spring.solidLength();
+    this.solidLength =
+        duty.method()
+            .solidLength(spring.ends(), spring.activeCoils(), spring.wire(), duty.coating());
     this.correctionFactor = duty.correction().at(spring.springIndex());
-    this.mostCompressed =
-        duty.shortestLength().isPresent()
-            ? at(duty.shortestLength().getAsDouble())
-            : shortest(loads());
+    this.mostCompressed = mostCompressedOf(duty);
+    double overtravel = duty.overtravel().orElse(mostCompressed.length());
+    this.extreme = overtravel < mostCompressed.length() ? at(overtravel) : mostCompressed;
     this.solid = at(solidLength);
+  }
+
+  private LoadState mostCompressedOf(Duty duty) {
+    if (duty.shortestLength().isPresent()) {
+      return at(duty.shortestLength().getAsDouble());
+    }
+    return duty.travel().isPresent()
+        ? at(spring.freeLength() - duty.travel().get().deflection())
+        : shortest(loads());
   }
 
   private static LoadState shortest(List<LoadState> loads) {
@@ -119,18 +131,36 @@ public final class CompressionState implements State {
   public List<LoadState> loads() {
     List<LoadState> states = new ArrayList<>(duty.loads().size());
     for (LoadPoint point : duty.loads()) {
-      states.add(
-          at(
-              point.length().isPresent()
-                  ? point.length().getAsDouble()
-                  : spring.freeLength() - point.force().orElseThrow() / rate));
+      states.add(at(length(point)));
     }
     return states;
+  }
+
+  private double length(LoadPoint point) {
+    if (point.length().isPresent()) {
+      return point.length().getAsDouble();
+    }
+    return spring.freeLength()
+        - (point.deflection().isPresent()
+            ? point.deflection().getAsDouble()
+            : point.force().orElseThrow() / rate);
   }
 
   /** The load at the shortest length. */
   public LoadState mostCompressed() {
     return mostCompressed;
+  }
+
+  /** The overtravel where one is asked beyond the loads, else the load at the shortest length. */
+  public LoadState extreme() {
+    return extreme;
+  }
+
+  /** The spring at the overtravel asked, or empty. */
+  public Optional<LoadState> overtravel() {
+    return duty.overtravel().isPresent()
+        ? Optional.of(at(duty.overtravel().getAsDouble()))
+        : Optional.empty();
   }
 
   /** The spring pressed to solid. */
@@ -140,7 +170,39 @@ public final class CompressionState implements State {
 
   /** Travel left between the most compressed load and solid, of the deflection there [-]. */
   public double clashAllowance() {
-    return (mostCompressed.length() - solidLength) / mostCompressed.deflection();
+    return travelLeft() / mostCompressed.deflection();
+  }
+
+  /** The least sum of gaps that EN 13906-1 keeps at the most compressed load [mm]. */
+  public double leastGapSum() {
+    return GapSum.least(spring.meanDiameter(), spring.wireDiameter(), spring.activeCoils());
+  }
+
+  /** Travel left between the most compressed load and solid [mm]. */
+  public double travelLeft() {
+    return mostCompressed.length() - solidLength;
+  }
+
+  /** Wire diameter over its coating [mm]. */
+  public double coatedDiameter() {
+    return spring.wireDiameter() + 2 * duty.coating();
+  }
+
+  /** Outside diameter over the coating when pressed to solid [mm]. */
+  public double outsideDiameterAtSolid() {
+    return duty.method()
+        .outsideDiameterAtSolid(
+            spring.meanDiameter(), spring.pitch(), spring.wireDiameter(), duty.coating());
+  }
+
+  /** Inside diameter within the coating, free [mm]. */
+  public double clearInsideDiameter() {
+    return spring.meanDiameter() - coatedDiameter();
+  }
+
+  /** What it was asked, and how it was reckoned. */
+  public Duty duty() {
+    return duty;
   }
 
   /** The deflection at which the spring buckles [mm]; positive infinity where it never can. */

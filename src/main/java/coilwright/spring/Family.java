@@ -56,4 +56,14 @@ public interface Family<S extends State> {
    * @return a generous estimate [-], zero where nothing is rounded
    */
   double play(double coils);
+
+  /**
+   * The springs that would be made if nothing had to be kept between the greatest load and solid:
+   * other ones only where the lengths are left open and follow from that.
+   *
+   * @return that family; this one where it is no other
+   */
+  default Family<S> keepingNothing() {
+    return this;
+  }
 }

@@ -18,6 +18,9 @@ public record Rounding(
   /** Mean diameter below which the steps for small springs apply [mm]. */
   public static final double SMALL_BELOW = 5;
 
+  /** A part of a step that is the rounding of the arithmetic [-]. */
+  private static final double SAME = 1e-9;
+
   /** No rounding at all. */
   public static final Rounding NONE = new Rounding(0, 0, 0, 0);
 
@@ -58,10 +61,21 @@ public record Rounding(
    * @return the rounded value [mm]
    */
   public static double toStep(double value, double step) {
-    if (step == 0) {
-      return value;
-    }
-    BigDecimal steps = BigDecimal.valueOf(Math.rint(value / step));
-    return BigDecimal.valueOf(step).multiply(steps).doubleValue();
+    return step == 0 ? value : times(Math.rint(value / step), step);
+  }
+
+  /**
+   * The least multiple of a step that is not below a value, in decimal like {@link #toStep}.
+   *
+   * @param value the value [mm]
+   * @param step the step [mm]; 0 leaves the value as it is
+   * @return the rounded value [mm], below the value by no more than the rounding of the arithmetic
+   */
+  public static double upToStep(double value, double step) {
+    return step == 0 ? value : times(Math.ceil(value / step - SAME), step);
+  }
+
+  private static double times(double steps, double step) {
+    return BigDecimal.valueOf(step).multiply(BigDecimal.valueOf(steps)).doubleValue();
   }
 }

@@ -11,7 +11,24 @@ public final class ShearStress {
   public static final Citation CITATION =
       Citation.remembered(Source.SHIGLEY, "equation 10-7 without its factor");
 
+  /** Where the factor for direct shear is published. */
+  public static final Citation DIRECT_SHEAR =
+      Citation.remembered(Source.SHIGLEY, "equation 10-3, shear stress correction factor");
+
   private ShearStress() {}
+
+  /**
+   * The factor for direct shear alone, Ks = 1 + 0.5/C: what is left of the correction once yielding
+   * has evened out the curvature's share.
+   *
+   * @param springIndex C [-]
+   * @return Ks [-]
+   * @throws IllegalArgumentException if the index is not positive and finite
+   * @see #DIRECT_SHEAR
+   */
+  public static double directShearFactor(double springIndex) {
+    return 1 + 0.5 / Require.positive(springIndex, "spring index", "-");
+  }
 
   /**
    * Uncorrected shear stress, tau = 8 F D / (pi d^3).

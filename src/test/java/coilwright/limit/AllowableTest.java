@@ -99,11 +99,13 @@ class AllowableTest {
   }
 
   private static StressBound atLoad(OptionalDouble share) {
-    return StressBound.atLoad(new StressLimit(true, share), "Wahl");
+    return StressBound.atLoad(
+        new StressLimit(true, share), StressBasis.HANDBOOK, StressCorrection.WAHL, false);
   }
 
   private static StressBound atSolid(OptionalDouble share) {
-    return StressBound.atSolid(new StressLimit(true, share), "Wahl");
+    return StressBound.atSolid(
+        new StressLimit(true, share), StressBasis.HANDBOOK, StressCorrection.WAHL);
   }
 
   /** Eight squared and ground coils of 2 mm wire, 16 mm wide, 60 mm long, pressed to 40 mm. */

@@ -29,7 +29,8 @@ class PublishedAllowableTest {
     double share =
         Allowable.atLoad(
                 new StressLimit(true, OptionalDouble.empty()),
-                SampleWire.grade(allowableClass, OptionalDouble.empty(), OptionalDouble.empty()))
+                SampleWire.grade(allowableClass, OptionalDouble.empty(), OptionalDouble.empty()),
+                StressBasis.HANDBOOK)
             .share();
     assertThat(share * row.inner(STRENGTH, Dimension.STRESS))
         .isCloseTo(row.inner(STRESS, Dimension.STRESS), row.closeness());

@@ -158,8 +158,6 @@ class FileFormTest {
             "loads[1].force (line 5): an alias (*); must be written out",
             "title (line 6): a tag (!); must be left out",
             "envelope (line 7): an anchor (&); must be left out",
-            "envelope.diametral_clearance (line 7): missing; needed with bore or rod; its default"
-                + " is not available yet",
             "envelope.rod (line 8): 0 mm; must be above 0 mm",
             "seats (line 9): an anchor (&); must be left out",
             "limits (line 10): an anchor (&); must be left out");

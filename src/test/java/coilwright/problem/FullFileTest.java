@@ -6,8 +6,8 @@ import coilwright.material.Supply;
 import coilwright.material.WireSeries;
 import coilwright.spring.EndType;
 import coilwright.spring.Hand;
-import coilwright.spring.LoadLine;
 import coilwright.spring.LoadPoint;
+import coilwright.spring.Method;
 import coilwright.spring.Rounding;
 import coilwright.spring.Seating;
 import coilwright.spring.StressCorrection;
@@ -94,11 +94,13 @@ class FullFileTest {
                 List.of(load(32, 18, new Tolerance(1.8, 1.8)), load(22, 45, new Tolerance(3, 2))),
                 OptionalDouble.of(2.7),
                 OptionalDouble.of(38.67),
+                OptionalDouble.empty(),
                 2));
     assertThat(problem.required())
         .contains(
             new Requirement(
-                new LoadLine(1.35, 32 + 18 / 2.7),
+                1.35,
+                of(32 + 18 / 2.7),
                 "two loads at lengths",
                 List.of(LoadPoint.at(32, 9), LoadPoint.at(22, 22.5))));
   }
@@ -122,6 +124,8 @@ class FullFileTest {
                 List.of(),
                 List.of(EndType.SQUARED),
                 Hand.LEFT,
+                false,
+                0,
                 0.5,
                 new Rounding(0.05, 0, 0.05, 0)));
   }
@@ -136,6 +140,8 @@ class FullFileTest {
                 new Band(none, none),
                 of(Math.toRadians(10)),
                 of(0.1),
+                false,
+                Method.HANDBOOK,
                 StressCorrection.WAHL,
                 new StressLimit(true, of(0.4)),
                 new StressLimit(false, none),
@@ -163,6 +169,8 @@ class FullFileTest {
                 List.of(),
                 List.of(EndType.SQUARED_GROUND, EndType.SQUARED),
                 Hand.EITHER,
+                false,
+                0,
                 0.25,
                 new Rounding(0.01, 0.1, 0.001, 0.01)));
     assertThat(plain.ownMaterials()).isEmpty();

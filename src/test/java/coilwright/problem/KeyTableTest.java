@@ -21,7 +21,7 @@ class KeyTableTest {
   @Test
   void theStarterIsAValidProblem() {
     Problem problem = Files.problem(STARTER);
-    assertThat(problem.required().orElseThrow().line().rate()).isEqualTo(2.7);
+    assertThat(problem.required().orElseThrow().rate()).isEqualTo(2.7);
     assertThat(problem.design()).isEmpty();
     assertThat(problem.ownMaterials()).isEmpty();
     assertThat(problem.limits()).isEqualTo(Files.problem(Files.LOADS).limits());

@@ -31,8 +31,8 @@ class LoadLineFactsTest {
     String text = "spring: compression\nloads: " + loads + "\n" + (fact == null ? "" : fact + "\n");
     Requirement required = Files.problem(text).required().orElseThrow();
     assertThat(required.rule()).isEqualTo(rule);
-    assertThat(required.line().rate()).isCloseTo(2.7, within(1e-12));
-    assertThat(required.line().freeLength()).isCloseTo(38 + 2.0 / 3, within(1e-12));
+    assertThat(required.rate()).isCloseTo(2.7, within(1e-12));
+    assertThat(required.freeLength().orElseThrow()).isCloseTo(38 + 2.0 / 3, within(1e-12));
   }
 
   @Test
@@ -50,8 +50,8 @@ class LoadLineFactsTest {
         rate: 10 lbf/in
         """;
     Requirement required = Files.problem(text).required().orElseThrow();
-    assertThat(required.line().rate()).isCloseTo(1.7512683524647637, within(1e-15));
-    assertThat(required.line().freeLength()).isCloseTo(1.4 * 25.4, within(1e-12));
+    assertThat(required.rate()).isCloseTo(1.7512683524647637, within(1e-15));
+    assertThat(required.freeLength().orElseThrow()).isCloseTo(1.4 * 25.4, within(1e-12));
   }
 
   @Test
@@ -78,7 +78,7 @@ class LoadLineFactsTest {
             "rate: 2 N/mm\nfree_length: 38 mm\nsprings_in_parallel: 2");
     Requirement required = problem.required().orElseThrow();
     assertThat(required.rule()).isEqualTo("the rate and the free length");
-    assertThat(required.line().rate()).isEqualTo(1);
+    assertThat(required.rate()).isEqualTo(1);
     assertThat(required.loads())
         .containsExactly(
             new LoadPoint(OptionalDouble.of(22), OptionalDouble.empty()),

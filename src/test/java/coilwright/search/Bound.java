@@ -70,7 +70,7 @@ public enum Bound {
       case FEWEST_COILS, MOST_COILS -> spring.coils();
       case PITCH_ANGLE -> spring.spring().pitchAngle();
       case CLASH_ALLOWANCE -> spring.clashAllowance();
-      case BORE -> spring.spring().outsideDiameterAtSolid();
+      case BORE -> spring.outsideDiameterAtSolid();
       case OUTSIDE_DIAMETER -> spring.spring().outsideDiameter();
       case ROD, INSIDE_DIAMETER -> spring.spring().insideDiameter();
       case CLEARANCE -> 0;

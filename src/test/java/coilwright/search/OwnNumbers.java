@@ -104,6 +104,7 @@ record OwnNumbers(ProblemDraft draft, double coils, CompressionState spring) {
   }
 
   private static ProblemDraft bound(Random random, ProblemDraft draft, CompressionState spring) {
+    draft.with(Bound.CLEARANCE, 0);
     for (Bound bound : Bound.values()) {
       if (bound != Bound.CLEARANCE && random.nextBoolean()) {
         draft.with(bound, bound.valueOf(spring, STRENGTH));

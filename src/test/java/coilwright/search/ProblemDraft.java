@@ -19,6 +19,7 @@ import coilwright.spring.EndType;
 import coilwright.spring.Hand;
 import coilwright.spring.LoadLine;
 import coilwright.spring.LoadPoint;
+import coilwright.spring.Method;
 import coilwright.spring.Rounding;
 import coilwright.spring.Seating;
 import coilwright.spring.StressCorrection;
@@ -49,6 +50,11 @@ public final class ProblemDraft {
   private List<WireSize> sizes = List.of();
   private List<EndType> ends = List.of(EndType.SQUARED_GROUND, EndType.SQUARED);
   private double coilStep = 0.25;
+  private Method method = Method.HANDBOOK;
+  private boolean setRemoved;
+  private double coating;
+  private OptionalDouble overtravel = OptionalDouble.empty();
+  private boolean open;
   private Rounding rounding = new Rounding(0.01, 0.1, 0.001, 0.01);
 
   /** A draft with the default limits of a problem file. */
@@ -78,6 +84,11 @@ public final class ProblemDraft {
     copy.ends = ends;
     copy.coilStep = coilStep;
     copy.rounding = rounding;
+    copy.method = method;
+    copy.setRemoved = setRemoved;
+    copy.coating = coating;
+    copy.overtravel = overtravel;
+    copy.open = open;
     return copy;
   }
 
@@ -171,13 +182,44 @@ public final class ProblemDraft {
     return this;
   }
 
+  /** Whose conventions apply. */
+  public ProblemDraft method(Method rules) {
+    method = rules;
+    return this;
+  }
+
+  /** Pressed solid once before use. */
+  public ProblemDraft setRemoved() {
+    setRemoved = true;
+    return this;
+  }
+
+  /** The thickness of what covers the wire [mm]. */
+  public ProblemDraft coating(double thickness) {
+    coating = thickness;
+    return this;
+  }
+
+  /** A length to survive beyond the loads [mm]. */
+  public ProblemDraft overtravel(double length) {
+    overtravel = OptionalDouble.of(length);
+    return this;
+  }
+
+  /** Asks the loads at their deflections only; the lengths are left open. */
+  public ProblemDraft lengthsOpen() {
+    open = true;
+    return this;
+  }
+
   /** The problem. */
   public Problem problem() {
     return new Problem(
         "draft",
         UnitSystem.METRIC,
         facts(),
-        Optional.of(new Requirement(line, "drafted", loads)),
+        Optional.of(requirement()),
+        overtravel,
         envelope(),
         seats,
         make(),
@@ -188,12 +230,26 @@ public final class ProblemDraft {
         10);
   }
 
+  private Requirement requirement() {
+    if (!open) {
+      OptionalDouble free = OptionalDouble.of(line.freeLength());
+      return new Requirement(line.rate(), free, "drafted", loads);
+    }
+    List<LoadPoint> deflected = new ArrayList<>();
+    for (LoadPoint load : loads) {
+      double force = load.force().orElseThrow();
+      deflected.add(LoadPoint.deflected(force / line.rate(), force));
+    }
+    return new Requirement(line.rate(), OptionalDouble.empty(), "drafted", deflected);
+  }
+
   private LoadFacts facts() {
     List<LoadAsked> asked =
         loads.stream()
             .map(load -> new LoadAsked(load.length(), load.force(), Optional.empty()))
             .toList();
-    return new LoadFacts(asked, OptionalDouble.empty(), OptionalDouble.empty(), 1);
+    OptionalDouble none = OptionalDouble.empty();
+    return new LoadFacts(asked, none, none, none, 1);
   }
 
   private Envelope envelope() {
@@ -219,6 +275,8 @@ public final class ProblemDraft {
         sizes,
         ends,
         Hand.EITHER,
+        setRemoved,
+        coating,
         coilStep,
         rounding);
   }
@@ -229,6 +287,8 @@ public final class ProblemDraft {
         new Band(bound(Bound.FEWEST_COILS), bound(Bound.MOST_COILS)),
         bound(Bound.PITCH_ANGLE),
         bound(Bound.CLASH_ALLOWANCE),
+        method == Method.EN_13906 && !off.contains(Bound.CLASH_ALLOWANCE),
+        method,
         correction,
         stress(Bound.STRESS_AT_LOAD),
         stress(Bound.STRESS_AT_SOLID),
@@ -242,6 +302,22 @@ public final class ProblemDraft {
 
   @Override
   public String toString() {
-    return bounds + " " + buckling + " " + correction + " " + coilStep + " " + rounding;
+    return bounds
+        + " "
+        + buckling
+        + " "
+        + correction
+        + " "
+        + coilStep
+        + " "
+        + rounding
+        + " "
+        + method
+        + (setRemoved ? ", set removed" : "")
+        + (open ? ", lengths open" : "")
+        + ", coating "
+        + coating
+        + ", overtravel "
+        + overtravel;
   }
 }

@@ -30,13 +30,17 @@ class CompressionStateTest {
     assertThat(spring.outsideDiameter()).isEqualTo(COIL + D);
     assertThat(spring.insideDiameter()).isEqualTo(COIL - D);
     assertThat(spring.totalCoils()).isEqualTo(COILS + ends.deadCoils());
-    assertThat(spring.solidLength()).isEqualTo(ends.solidLength(COILS, D));
     assertThat(spring.pitch()).isEqualTo(pitch);
     assertThat(spring.pitchAngle()).isEqualTo(Coil.pitchAngle(pitch, COIL));
     assertThat(spring.wireLength())
         .isEqualTo(Coil.wireLength(COIL, pitch, COILS, ends.deadCoils()));
     assertThat(spring.mass()).isEqualTo(Mass.ofWire(SampleWire.DENSITY, D, spring.wireLength()));
-    assertThat(spring.outsideDiameterAtSolid())
+    CompressionState state =
+        new CompressionState(
+            spring,
+            new Duty(List.of(LoadPoint.at(30, 2)), StressCorrection.WAHL, Seating.PINNED_PINNED));
+    assertThat(state.solidLength()).isEqualTo(ends.solidLength(COILS, D));
+    assertThat(state.outsideDiameterAtSolid())
         .isEqualTo(Coil.meanDiameterAtSolid(COIL, pitch, D) + D);
   }
 
