@@ -1,29 +1,48 @@
 package coilwright.cli;
 
+import coilwright.problem.KeyTable;
 import coilwright.problem.Starter;
+import coilwright.report.SchemaJson;
 import java.io.IOException;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.MissingParameterException;
 import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
+import picocli.CommandLine.Spec;
 
-/** Prints a commented problem file to start from. */
+/** Prints a commented problem file to start from, or the schema of problem files. */
 @Command(
     name = "starter",
     description = "Prints a commented problem file to start from.",
     mixinStandardHelpOptions = true,
     versionProvider = Version.class,
-    footer = {"", "Example:", "  coilwright starter compression --out valve.yaml"})
+    footer = {
+      "",
+      "Example:",
+      "  coilwright starter compression --out valve.yaml",
+      "  coilwright starter --schema --out coilwright.schema.json"
+    })
 final class StarterCommand implements Callable<Integer> {
 
   /** Read so that others are refused; there is only one yet. */
   @Parameters(
       paramLabel = "KIND",
+      arity = "0..1",
       converter = KindConverter.class,
       description = "The kind of spring: compression.")
   private String kind;
 
+  @Option(
+      names = "--schema",
+      description = "Print the JSON Schema of problem files instead, for an editor.")
+  private boolean schema;
+
   @Mixin private ResultOptions result;
+
+  @Spec private CommandSpec spec;
 
   private final Terminal terminal;
 
@@ -33,8 +52,12 @@ final class StarterCommand implements Callable<Integer> {
 
   @Override
   public Integer call() throws IOException {
+    if (kind == null && !schema) {
+      throw new MissingParameterException(
+          spec.commandLine(), spec.positionalParameters().get(0), "KIND is missing");
+    }
     result.refuseBadTarget();
-    result.deliver(Starter.compression(), terminal);
+    result.deliver(schema ? SchemaJson.of(KeyTable.form()) : Starter.compression(), terminal);
     return Status.FOUND;
   }
 }

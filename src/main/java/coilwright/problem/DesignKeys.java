@@ -102,6 +102,13 @@ final class DesignKeys {
       ProblemKey.of(
           "design.coating.thickness", Values.length(), "", "how thick the cover is", "8 um");
 
+  /** The diameters, one of which is given. */
+  static final List<ProblemKey<Double>> DIAMETERS =
+      List.of(MEAN_DIAMETER, OUTSIDE_DIAMETER, INSIDE_DIAMETER);
+
+  /** The coil counts, one of which is given. */
+  static final List<ProblemKey<Double>> COILS = List.of(ACTIVE_COILS, TOTAL_COILS);
+
   /** All of them. */
   static final List<ProblemKey<?>> ROWS =
       List.of(

@@ -16,11 +16,6 @@ import java.util.Optional;
  */
 record DesignReader(MaterialIds ids, Section section, Method method) {
 
-  private static final List<ProblemKey<Double>> DIAMETERS =
-      List.of(DesignKeys.MEAN_DIAMETER, DesignKeys.OUTSIDE_DIAMETER, DesignKeys.INSIDE_DIAMETER);
-  private static final List<ProblemKey<Double>> COILS =
-      List.of(DesignKeys.ACTIVE_COILS, DesignKeys.TOTAL_COILS);
-
   /**
    * Reads the spring.
    *
@@ -33,7 +28,7 @@ record DesignReader(MaterialIds ids, Section section, Method method) {
     Optional<WireSize> wire = section.require(DesignKeys.WIRE_DIAMETER);
     Optional<Double> meanDiameter = wire.flatMap(size -> meanDiameter(size.diameter()));
     if (wire.isEmpty()) {
-      only(DIAMETERS).ifPresent(section::read);
+      only(DesignKeys.DIAMETERS).ifPresent(section::read);
     }
     Optional<EndType> ends = section.require(DesignKeys.ENDS);
     ends.ifPresent(formed -> ClosedEnds.check(formed, method, section.spot(DesignKeys.ENDS)));
@@ -63,7 +58,7 @@ record DesignReader(MaterialIds ids, Section section, Method method) {
   }
 
   private Optional<Double> meanDiameter(double wire) {
-    Optional<ProblemKey<Double>> key = only(DIAMETERS);
+    Optional<ProblemKey<Double>> key = only(DesignKeys.DIAMETERS);
     Optional<Double> mean =
         key.flatMap(section::read)
             .map(given -> key.get() == DesignKeys.OUTSIDE_DIAMETER ? given - wire : given)
@@ -80,7 +75,7 @@ record DesignReader(MaterialIds ids, Section section, Method method) {
   }
 
   private Optional<Double> activeCoils(Optional<EndType> ends) {
-    Optional<ProblemKey<Double>> key = only(COILS);
+    Optional<ProblemKey<Double>> key = only(DesignKeys.COILS);
     Optional<Double> given = key.flatMap(section::read);
     if (key.isEmpty() || key.get() == DesignKeys.ACTIVE_COILS || ends.isEmpty()) {
       return given;

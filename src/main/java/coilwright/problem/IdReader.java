@@ -20,4 +20,9 @@ final class IdReader extends ScalarReader<String> {
   public String accepted() {
     return "a word without blanks, slashes and commas, not all or none";
   }
+
+  @Override
+  public Form form() {
+    return new Form.Text("^(?!(?:all|none)$)[^\\u0000-\\u0020\\u007f/,]+$");
+  }
 }

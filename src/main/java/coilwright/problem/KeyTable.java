@@ -63,6 +63,11 @@ public final class KeyTable {
     return text.toString();
   }
 
+  /** The form of a problem file: every key with what may stand there. */
+  public static Form.Block form() {
+    return Forms.block("");
+  }
+
   private static String cell(String text) {
     return text.replace("|", "\\|");
   }

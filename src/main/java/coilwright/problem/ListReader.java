@@ -63,4 +63,10 @@ final class ListReader<T> implements ValueReader<List<T>> {
   public String accepted() {
     return item.accepted() + ", or a list of such";
   }
+
+  @Override
+  public Form form() {
+    Form one = item.form();
+    return new Form.Either(List.of(one, new Form.Many(one, !(one instanceof Form.Text))));
+  }
 }

@@ -2,6 +2,7 @@ package coilwright.problem;
 
 import coilwright.material.ModulusLaw;
 import coilwright.material.ModulusLaws;
+import java.util.List;
 import java.util.Optional;
 
 /**
@@ -31,5 +32,10 @@ record ModulusReader(StepsReader steps) implements ValueReader<LawGiven<ModulusL
   @Override
   public String accepted() {
     return Values.stress().accepted() + ", or " + steps.accepted();
+  }
+
+  @Override
+  public Form form() {
+    return new Form.Either(List.of(Values.stress().form(), steps.form()));
   }
 }

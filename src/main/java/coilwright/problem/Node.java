@@ -27,6 +27,11 @@ sealed interface Node permits Node.Scalar, Node.Sequence, Node.Mapping, Node.Ref
       text = text.strip();
     }
 
+    /** Whether it is a word by which YAML or JSON writes that there is no value. */
+    boolean isNull() {
+      return text.equals("~") || text.equalsIgnoreCase("null");
+    }
+
     @Override
     public String shown() {
       return isEmpty() ? "nothing" : ShownText.of(text);

@@ -37,4 +37,9 @@ final class NumberReader extends ScalarReader<Double> {
   public String accepted() {
     return whole ? "a whole number" : "a plain number";
   }
+
+  @Override
+  public Form form() {
+    return new Form.Number(range, whole);
+  }
 }

@@ -40,4 +40,9 @@ final class QuantityReader extends ScalarReader<Quantity> {
   public String accepted() {
     return QuantityParser.accepted(dimensions);
   }
+
+  @Override
+  public Form form() {
+    return new Form.Measure(range, QuantityParser.symbols(dimensions));
+  }
 }

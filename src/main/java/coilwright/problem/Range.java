@@ -13,10 +13,10 @@ import java.util.Optional;
  * @param high the upper bound
  * @param highIncluded whether the bound itself is accepted
  */
-record Range(double low, boolean lowIncluded, double high, boolean highIncluded) {
+public record Range(double low, boolean lowIncluded, double high, boolean highIncluded) {
 
   /** Beyond this no product of a formula is safe from overflow; no spring comes near it. */
-  private static final double LARGEST = 1e9;
+  public static final double LARGEST = 1e9;
 
   /** Below this, zero aside, likewise. */
   private static final double SMALLEST = 1e-9;

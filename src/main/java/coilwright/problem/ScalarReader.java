@@ -11,7 +11,7 @@ abstract class ScalarReader<T> implements ValueReader<T> {
 
   @Override
   public final Optional<T> read(Node node, Spot spot) {
-    if (node instanceof Node.Scalar scalar && !scalar.isEmpty()) {
+    if (node instanceof Node.Scalar scalar && !scalar.isEmpty() && !scalar.isNull()) {
       return parse(scalar.text(), spot);
     }
     spot.refuse(node, accepted());

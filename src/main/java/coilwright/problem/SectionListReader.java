@@ -43,4 +43,9 @@ record SectionListReader(String path) implements ValueReader<List<Section>> {
   public boolean omits(Node node) {
     return node instanceof Node.Scalar && node.isEmpty();
   }
+
+  @Override
+  public Form form() {
+    return new Form.Many(Forms.block(path), false);
+  }
 }

@@ -29,6 +29,11 @@ record SectionReader(String path) implements ValueReader<Section> {
     return node.isEmpty();
   }
 
+  @Override
+  public Form form() {
+    return Forms.block(path);
+  }
+
   /**
    * What a block accepts, in words.
    *

@@ -42,4 +42,9 @@ record StepsReader(String path, ProblemKey<Double> upTo, ProblemKey<Double> step
   public String accepted() {
     return "a list of steps {" + upTo.name() + ", " + step.name() + "}";
   }
+
+  @Override
+  public Form form() {
+    return new SectionListReader(path).form();
+  }
 }

@@ -2,6 +2,7 @@ package coilwright.problem;
 
 import coilwright.material.StrengthLaw;
 import coilwright.material.StrengthLaws;
+import java.util.List;
 import java.util.Optional;
 
 /** Reads a tensile strength: a constant, a power law or a table of steps. */
@@ -41,5 +42,14 @@ final class StrengthReader implements ValueReader<LawGiven<StrengthLaw>> {
   @Override
   public String accepted() {
     return Values.stress().accepted() + ", {a, m}, or " + steps().accepted();
+  }
+
+  @Override
+  public Form form() {
+    return new Form.Either(
+        List.of(
+            Values.stress().form(),
+            Forms.block("own_materials[].tensile_strength"),
+            steps().form()));
   }
 }

@@ -1,5 +1,6 @@
 package coilwright.problem;
 
+import java.util.List;
 import java.util.Optional;
 
 /**
@@ -34,5 +35,10 @@ record SwitchReader<T>(ValueReader<T> inner) implements ValueReader<Setting<T>> 
   @Override
   public boolean omits(Node node) {
     return inner.omits(node);
+  }
+
+  @Override
+  public Form form() {
+    return new Form.Either(List.of(inner.form(), new Form.Word(List.of(NONE))));
   }
 }

@@ -25,4 +25,9 @@ final class TextReader extends ScalarReader<String> {
   public String accepted() {
     return accepted;
   }
+
+  @Override
+  public Form form() {
+    return new Form.Text("");
+  }
 }

@@ -2,6 +2,7 @@ package coilwright.problem;
 
 import coilwright.unit.Dimension;
 import coilwright.unit.Quantity;
+import java.util.List;
 import java.util.Optional;
 
 /** Reads a tolerance: the same on both sides of the force, or each side for itself. */
@@ -32,5 +33,10 @@ final class ToleranceReader implements ValueReader<ToleranceAsked> {
   @Override
   public String accepted() {
     return both.accepted() + ", or {plus, minus} of such";
+  }
+
+  @Override
+  public Form form() {
+    return new Form.Either(List.of(both.form(), Forms.block("loads[].tolerance")));
   }
 }

@@ -27,6 +27,9 @@ interface ValueReader<T> {
     return accepted();
   }
 
+  /** What a value that it accepts looks like; nothing that it accepts is left out of the form. */
+  Form form();
+
   /**
    * Whether something that stands in the file counts as left out, as an empty section does.
    *
@@ -55,6 +58,11 @@ interface ValueReader<T> {
       @Override
       public String accepted() {
         return inner.accepted();
+      }
+
+      @Override
+      public Form form() {
+        return inner.form();
       }
     };
   }

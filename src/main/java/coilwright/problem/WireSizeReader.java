@@ -20,4 +20,9 @@ final class WireSizeReader extends ScalarReader<WireSize> {
   public String accepted() {
     return length.accepted();
   }
+
+  @Override
+  public Form form() {
+    return length.form();
+  }
 }

@@ -44,4 +44,9 @@ final class WordReader<T> extends ScalarReader<T> {
   public String accepted() {
     return Words.either(List.copyOf(words.keySet()));
   }
+
+  @Override
+  public Form form() {
+    return new Form.Word(List.copyOf(words.keySet()));
+  }
 }

@@ -86,7 +86,13 @@ public final class QuantityParser {
         .findFirst();
   }
 
-  private static List<String> symbols(List<Dimension> dimensions) {
+  /**
+   * The symbols of the units of several kinds of quantity.
+   *
+   * @param dimensions the kinds
+   * @return the symbols, in order
+   */
+  public static List<String> symbols(List<Dimension> dimensions) {
     return dimensions.stream().flatMap(kind -> kind.units().stream()).map(Unit::symbol).toList();
   }
 }

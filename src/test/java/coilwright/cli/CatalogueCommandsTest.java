@@ -39,4 +39,14 @@ class CatalogueCommandsTest {
     assertThat(run.err()).isEmpty();
     assertThat(run.status()).isIn(Status.FOUND, Status.NOTHING);
   }
+
+  @Test
+  void starterPrintsTheSchemaWithAKindOrWithout() {
+    Run run = Run.of("starter", "--schema").found(Status.FOUND);
+    assertThat(run.json().path("properties").path("loads").path("type").asText())
+        .isEqualTo("array");
+    assertThat(Run.of("starter", "compression", "--schema").found(Status.FOUND).out())
+        .isEqualTo(run.out());
+    Run.of("starter", "torsion", "--schema").refused("KIND: \"torsion\"");
+  }
 }

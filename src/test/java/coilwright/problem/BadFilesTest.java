@@ -53,7 +53,7 @@ class BadFilesTest {
     return new BadFile(part.substring(0, line), text, messages);
   }
 
-  private record BadFile(String name, String text, List<String> messages) {
+  record BadFile(String name, String text, List<String> messages) {
 
     Purpose purpose() {
       return name.startsWith("check") ? Purpose.CHECK : Purpose.SHORTLIST;

@@ -1,0 +1,31 @@
+package coilwright.problem;
+
+import java.util.List;
+
+/**
+ * Keys of one block that stand instead of one another.
+ *
+ * @param keys the keys, two or more
+ * @param needed whether one of them at least must be given
+ * @param exclusive whether one of them at most may be given
+ */
+record Alternatives(List<ProblemKey<?>> keys, boolean needed, boolean exclusive) {
+
+  /** All of them. */
+  static final List<Alternatives> ALL =
+      List.of(
+          new Alternatives(List.of(LoadKeys.LENGTH, LoadKeys.FORCE), true, false),
+          new Alternatives(List.of(MakeKeys.WIRE_SERIES, MakeKeys.WIRE_SIZES), false, true),
+          new Alternatives(List.copyOf(DesignKeys.DIAMETERS), true, true),
+          new Alternatives(List.copyOf(DesignKeys.COILS), true, true));
+
+  /** The path of the block. */
+  String parent() {
+    return keys.get(0).parent();
+  }
+
+  /** Their form. */
+  Form.Choice form() {
+    return new Form.Choice(keys.stream().<String>map(ProblemKey::name).toList(), needed, exclusive);
+  }
+}

@@ -1,0 +1,43 @@
+package coilwright.problem;
+
+import java.util.ArrayList;
+import java.util.List;
+
+/** Makes the forms of blocks from the rows of the table of keys. */
+final class Forms {
+
+  private static final Node NOTHING = new Node.Scalar(Mark.FILE, "");
+
+  private Forms() {}
+
+  /**
+   * The form of a block.
+   *
+   * @param path its path in the table of keys; empty for the file
+   * @return the form
+   */
+  static Form.Block block(String path) {
+    List<Form.Key> keys = new ArrayList<>();
+    KeyTable.children(path).forEach(key -> keys.add(key(key)));
+    List<Form.Choice> choices = new ArrayList<>();
+    for (Alternatives some : Alternatives.ALL) {
+      if (some.parent().equals(path)) {
+        choices.add(some.form());
+      }
+    }
+    return new Form.Block(keys, choices);
+  }
+
+  private static Form.Key key(ProblemKey<?> key) {
+    boolean instead = Alternatives.ALL.stream().anyMatch(some -> some.keys().contains(key));
+    return new Form.Key(
+        key.name(),
+        key.reader().form(),
+        !key.optional() && !instead,
+        key.optional() && key.reader().omits(NOTHING),
+        key.help(),
+        key.reader().written(),
+        key.omitted(),
+        key.examples());
+  }
+}

@@ -1,0 +1,53 @@
+package coilwright.problem;
+
+import java.util.regex.Pattern;
+
+/** The kinds of fault that a schema of single values cannot see, by their messages. */
+enum BeyondSchema {
+  /** A mapping holds each key once, whoever reads it. */
+  REPEATED_KEY(": repeated key;"),
+
+  /** The editor reads the number, not how it is spelt. */
+  SPELLING_OF_A_PLAIN_NUMBER(
+      ": (0x|0o|\\.nan|\\.inf|[^ ]*, with an underscore|[^ ]*, with a leading zero)"),
+
+  /** The editor sees nothing, as in an empty section. */
+  NULL_FOR_A_SECTION("\\): (null|~); must be a (block|list of blocks)"),
+
+  /** Of a range of quantities the schema knows the sign only. */
+  SIZE_OF_A_QUANTITY(
+      ": [0-9.e+-]+ ?[^ ;]+(, too (large|small) a number; |; must be at (most|least) [0-9.]+ [^ ,]+$)"
+          + "|: [1-9][^;]*; must be above .* and (at most|below) "),
+
+  /** Two values, or a value and a default. */
+  VALUES_AGAINST_EACH_OTHER(
+      "; must (not )?be (above|below|at most|at least) (rod|bore|min|max|the |min_inside)"
+          + "|; must differ from|within 0.1 %|; must leave |: zero on both sides;"
+          + "|; must be at most .*where a table of this grade ends"
+          + "| under stress_basis [a-z0-9-]+; | between loads of which |, at which the load line "),
+
+  /** One entry in two units. */
+  SAME_ENTRY_WRITTEN_OTHERWISE("\\[[0-9]+\\] .*; must stand once; it is "),
+
+  /** Which grades there are. */
+  NAMES_OF_GRADES(
+      ", an unknown grade;|, not available yet; must be one of|; must be new;|, an own grade that"
+          + "|: all beside other ids|: excludes every grade"),
+
+  /** What must be given because of what else is given, or of what the file is for. */
+  PRESENCE_BY_OTHER_KEYS(
+      ": missing; needed with|: given beside make|: a design block; |^design .*: missing;"
+          + "|^own_materials\\[[0-9]+\\]\\.(?!id)[a-z_]+ .*: missing; must be a"
+          + "|: the facts do not fix the load line;|: no force to go with it|; must be given; leaving it to");
+
+  private final Pattern words;
+
+  BeyondSchema(String words) {
+    this.words = Pattern.compile(words);
+  }
+
+  /** Whether a message is of this kind. */
+  boolean says(String message) {
+    return words.matcher(message).find();
+  }
+}
