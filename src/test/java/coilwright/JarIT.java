@@ -3,6 +3,7 @@ package coilwright;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import coilwright.cli.Program;
+import coilwright.cli.ShellFiles;
 import coilwright.cli.Terminal;
 import java.io.ByteArrayOutputStream;
 import java.io.IOException;
@@ -64,7 +65,7 @@ class JarIT {
   }
 
   @Test
-  void startScriptGivesTheSameAnswerWithItsArchiveAndWithout() throws Exception {
+  void startScriptGivesTheSameAnswerWithItsArchiveAndWithoutAndIsCompleted() throws Exception {
     Path copy = Files.createDirectory(folder.resolve("moved"));
     Path script = JAR.resolveSibling("coilwright");
     Files.copy(JAR, copy.resolve("coilwright.jar"));
@@ -79,9 +80,29 @@ class JarIT {
                 + " ./linked; do"
                 + " $start shortlist "
                 + EXAMPLE
-                + " | sha256sum; done | uniq | wc -l",
+                + " | sha256sum; done | uniq | wc -l; "
+                + completing("shortlist", "--rank", "ma")
+                + completing("wires", "metr"),
             Map.of());
-    assertThat(ran).isEqualTo(new Ran(0, "1\n", ""));
+    assertThat(ran).isEqualTo(new Ran(0, "1\nmass margin\nmetric\n", ""));
+  }
+
+  /** What bash does when the tab key is pressed behind these words; its options need a terminal. */
+  private static String completing(String... words) {
+    return ". "
+        + JAR.resolveSibling("completion/coilwright")
+        + "; COMP_WORDS=(coilwright "
+        + String.join(" ", words)
+        + "); COMP_CWORD="
+        + words.length
+        + "; COMP_LINE=\"${COMP_WORDS[*]}\"; _complete_coilwright 2>/dev/null;"
+        + " echo \"${COMPREPLY[*]}\"; ";
+  }
+
+  @Test
+  void completionAndManualPagesStandBesideTheJar() {
+    ShellFiles.all()
+        .forEach((name, text) -> assertThat(JAR.resolveSibling(name)).content().isEqualTo(text));
   }
 
   @Test
