@@ -2,6 +2,7 @@ package coilwright.spring;
 
 import coilwright.source.Citation;
 import coilwright.source.Source;
+import coilwright.unit.Require;
 import java.util.Optional;
 
 /** How the end coils of a compression spring are formed. */
@@ -57,8 +58,12 @@ public enum EndType {
    * @param activeCoils n [-]
    * @param wireDiameter d [mm]
    * @return Ls [mm]
+   * @throws IllegalArgumentException if the coils are negative, the diameter is not positive, or
+   *     either is not finite
    */
   public double solidLength(double activeCoils, double wireDiameter) {
+    Require.notNegative(activeCoils, "active coils", "-");
+    Require.positive(wireDiameter, "wire diameter", "mm");
     return (activeCoils + deadCoils + (ground ? 0 : 1)) * wireDiameter;
   }
 
@@ -73,8 +78,12 @@ public enum EndType {
    * @param wireDiameter d [mm]
    * @param activeCoils n [-]
    * @return p [mm]
+   * @throws IllegalArgumentException if an argument is not positive and finite
    */
   public double pitch(double freeLength, double wireDiameter, double activeCoils) {
+    Require.positive(freeLength, "free length", "mm");
+    Require.positive(wireDiameter, "wire diameter", "mm");
+    Require.positive(activeCoils, "active coils", "-");
     if (this == PLAIN_GROUND) {
       return freeLength / (activeCoils + 1);
     }

@@ -37,9 +37,10 @@ public record LoadLine(double rate, double freeLength) {
    *
    * @param length L [mm]
    * @return F [N]
+   * @throws IllegalArgumentException if the length is not finite
    */
   public double forceAt(double length) {
-    return rate * (freeLength - length);
+    return rate * (freeLength - Require.finite(length, "length", "mm"));
   }
 
   /**
@@ -47,8 +48,9 @@ public record LoadLine(double rate, double freeLength) {
    *
    * @param force F [N]
    * @return L [mm]
+   * @throws IllegalArgumentException if the force is not finite
    */
   public double lengthUnder(double force) {
-    return freeLength - force / rate;
+    return freeLength - Require.finite(force, "force", "N") / rate;
   }
 }

@@ -91,6 +91,10 @@ class RefusedArgumentsTest {
             200_000),
         of("load line", "++", a -> new LoadLine(a[0], a[1]), 5, 60),
         of("line of two loads", "....", a -> through(a), 50, 10, 40, 30),
+        of("force at a length", ".", a -> new LoadLine(5, 60).forceAt(a[0]), 50),
+        of("length under a force", ".", a -> new LoadLine(5, 60).lengthUnder(a[0]), 50),
+        of("solid length", "0+", a -> EndType.SQUARED.solidLength(a[0], a[1]), 8, 2),
+        of("pitch", "+++", a -> EndType.PLAIN_GROUND.pitch(a[0], a[1], a[2]), 60, 2, 8),
         of("rounding", "0000", a -> new Rounding(a[0], a[1], a[2], a[3]), 0.1, 0.1, 0.01, 0.01),
         of(
             "spring",
