@@ -50,7 +50,7 @@ final class MaterialKeys {
 
   static final ProblemKey<Double> STRENGTH_A =
       ProblemKey.of(
-          "own_materials[].tensile_strength.a", Values.stress(), "", "a in a/d^m", "2211 MPa");
+          "own_materials[].tensile_strength.a", Values.strength(), "", "a in a/d^m", "2211 MPa");
 
   static final ProblemKey<Double> STRENGTH_M =
       ProblemKey.of(
@@ -71,7 +71,7 @@ final class MaterialKeys {
   static final ProblemKey<Double> STRENGTH_STEP =
       ProblemKey.of(
           "own_materials[].tensile_strength[].strength",
-          Values.stress(),
+          Values.strength(),
           "",
           "tensile strength up to there",
           "2100 MPa");
@@ -93,15 +93,17 @@ final class MaterialKeys {
           "own_materials[].diameters.max", Values.length(), OF_LIKE, "thickest wire", "6 mm");
 
   static final ModulusKeys SHEAR =
-      ModulusKeys.of("own_materials[].shear_modulus", "80 GPa", "81 GPa");
+      ModulusKeys.of(
+          "own_materials[].shear_modulus", Range.within(5_000, 150_000), "80 GPa", "81 GPa");
 
   static final ModulusKeys ELASTIC =
-      ModulusKeys.of("own_materials[].elastic_modulus", "200 GPa", "203 GPa");
+      ModulusKeys.of(
+          "own_materials[].elastic_modulus", Range.within(10_000, 450_000), "200 GPa", "203 GPa");
 
   static final ProblemKey<Double> DENSITY =
       ProblemKey.of(
           "own_materials[].density",
-          Values.quantity(Dimension.DENSITY, Range.ABOVE_ZERO),
+          Values.ofWire(Dimension.DENSITY, Range.within(1_000, 20_000)),
           OF_LIKE,
           "mass per volume",
           "7850 kg/m^3");

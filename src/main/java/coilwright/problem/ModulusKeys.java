@@ -1,6 +1,7 @@
 package coilwright.problem;
 
 import coilwright.material.ModulusLaw;
+import coilwright.unit.Dimension;
 import java.util.List;
 
 /**
@@ -17,11 +18,12 @@ record ModulusKeys(
    * The keys of a modulus.
    *
    * @param path the path of the modulus
+   * @param range what any spring wire has [MPa]
    * @param example a constant
    * @param stepExample the modulus of a step
    * @return the keys
    */
-  static ModulusKeys of(String path, String example, String stepExample) {
+  static ModulusKeys of(String path, Range range, String example, String stepExample) {
     ProblemKey<Double> upTo =
         ProblemKey.of(
             path + "[].up_to",
@@ -30,7 +32,12 @@ record ModulusKeys(
             "greatest wire diameter of the step, itself included",
             "1 mm");
     ProblemKey<Double> step =
-        ProblemKey.of(path + "[].modulus", Values.stress(), "", "modulus up to there", stepExample);
+        ProblemKey.of(
+            path + "[].modulus",
+            Values.ofWire(Dimension.STRESS, range),
+            "",
+            "modulus up to there",
+            stepExample);
     return new ModulusKeys(
         ProblemKey.of(
             path,

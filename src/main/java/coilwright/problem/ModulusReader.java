@@ -26,16 +26,21 @@ record ModulusReader(StepsReader steps) implements ValueReader<LawGiven<ModulusL
       spot.fault(node.shown(), "must be " + accepted());
       return Optional.empty();
     }
-    return Values.stress().read(node, spot).map(ModulusLaws::constant).map(LawGiven::everywhere);
+    return steps
+        .step()
+        .reader()
+        .read(node, spot)
+        .map(ModulusLaws::constant)
+        .map(LawGiven::everywhere);
   }
 
   @Override
   public String accepted() {
-    return Values.stress().accepted() + ", or " + steps.accepted();
+    return steps.step().reader().accepted() + ", or " + steps.accepted();
   }
 
   @Override
   public Form form() {
-    return new Form.Either(List.of(Values.stress().form(), steps.form()));
+    return new Form.Either(List.of(steps.step().reader().form(), steps.form()));
   }
 }

@@ -53,9 +53,11 @@ record OwnGrade(
     Optional<DiameterRange> diameters =
         new OwnDiameters(section, like, taken(strength, shear, elastic))
             .read(List.of(end(strength), end(shear), end(elastic)));
-    if (section.spot().faults().count() == before) {
-      stiffness(
-          law(shear, WireGrade::shearModulus), law(elastic, WireGrade::elasticModulus), diameters);
+    if (section.spot().faults().count() == before && diameters.isPresent()) {
+      OwnLaws laws = new OwnLaws(section, diameters.get());
+      laws.checkStrength(strength);
+      laws.checkStiffness(
+          law(shear, WireGrade::shearModulus), law(elastic, WireGrade::elasticModulus));
     }
     if (section.spot().faults().count() > before || !alone && like.isEmpty()) {
       return Optional.empty();
@@ -89,26 +91,6 @@ record OwnGrade(
 
   private <L> Optional<L> law(Optional<LawGiven<L>> given, Function<WireGrade, L> ofLike) {
     return given.map(LawGiven::law).or(() -> like.map(ofLike));
-  }
-
-  /** Stretching a bar takes more than twisting it: E must be above G wherever both are known. */
-  private void stiffness(
-      Optional<ModulusLaw> shear, Optional<ModulusLaw> elastic, Optional<DiameterRange> diameters) {
-    if (shear.isEmpty() || elastic.isEmpty() || diameters.isEmpty()) {
-      return;
-    }
-    double largest = Math.min(diameters.get().max(), Double.MAX_VALUE);
-    for (double d : new double[] {Math.max(diameters.get().min(), Double.MIN_NORMAL), largest}) {
-      double g = shear.get().at(d);
-      if (!(elastic.get().at(d) > g)) {
-        section
-            .spot(MaterialKeys.ELASTIC.whole())
-            .fault(
-                Range.number(elastic.get().at(d)) + " MPa",
-                "must be above the shear modulus, " + Range.number(g) + " MPa");
-        return;
-      }
-    }
   }
 
   /** Moduli end with the diameters only where the other grade is an own one, with a table. */

@@ -66,6 +66,10 @@ public final class ProblemReader {
         root.read(DesignKeys.DESIGN)
             .flatMap(section -> new DesignReader(ids, section, limits.method()).read());
     design.ifPresent(loads::checkAgainst);
+
+    if (purpose == Purpose.SHORTLIST && root.spot().faults().count() == 0) {
+      CoilStepRule.check(root, make.coilStep(), limits.activeCoils().max());
+    }
     Optional<Section> rank = root.read(RankKeys.RANK);
     RankBy by = rank.flatMap(section -> section.read(RankKeys.BY)).orElse(RankBy.MASS);
     int top = rank.flatMap(section -> section.read(RankKeys.TOP)).orElse(TOP);

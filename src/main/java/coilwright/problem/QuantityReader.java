@@ -11,6 +11,7 @@ import java.util.Optional;
 final class QuantityReader extends ScalarReader<Quantity> {
 
   private final Range range;
+  private final String outside;
   private final List<Dimension> dimensions;
 
   /**
@@ -20,7 +21,19 @@ final class QuantityReader extends ScalarReader<Quantity> {
    * @param dimensions the kinds accepted
    */
   QuantityReader(Range range, Dimension... dimensions) {
+    this(range, "", dimensions);
+  }
+
+  /**
+   * A reader of quantities of one of several kinds.
+   *
+   * @param range what makes sense, in inner units
+   * @param outside what a message says of a quantity outside the range, after a comma; may be empty
+   * @param dimensions the kinds accepted
+   */
+  QuantityReader(Range range, String outside, Dimension... dimensions) {
     this.range = range;
+    this.outside = outside;
     this.dimensions = List.of(dimensions);
   }
 
@@ -32,7 +45,8 @@ final class QuantityReader extends ScalarReader<Quantity> {
     }
     Quantity quantity = parsed.value().get();
     Optional<String> remedy = range.refuses(quantity.inner(), Optional.of(quantity.unit()));
-    remedy.ifPresent(words -> spot.fault(ShownText.of(text), words));
+    String found = ShownText.of(text) + (outside.isEmpty() ? "" : ", " + outside);
+    remedy.ifPresent(words -> spot.fault(found, words));
     return remedy.isPresent() ? Optional.empty() : parsed.value();
   }
 

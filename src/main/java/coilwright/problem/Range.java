@@ -41,6 +41,17 @@ public record Range(double low, boolean lowIncluded, double high, boolean highIn
   }
 
   /**
+   * Values between two bounds, both accepted.
+   *
+   * @param low the lower bound
+   * @param high the upper bound
+   * @return the range
+   */
+  static Range within(double low, double high) {
+    return new Range(low, true, high, true);
+  }
+
+  /**
    * Checks a value.
    *
    * @param value in the inner unit

@@ -21,7 +21,7 @@ final class StrengthReader implements ValueReader<LawGiven<StrengthLaw>> {
     if (node instanceof Node.Mapping) {
       return Section.open(node, spot).flatMap(StrengthReader::power);
     }
-    return Values.stress().read(node, spot).map(StrengthLaws::constant).map(LawGiven::everywhere);
+    return Values.strength().read(node, spot).map(StrengthLaws::constant).map(LawGiven::everywhere);
   }
 
   private static Optional<LawGiven<StrengthLaw>> power(Section section) {
@@ -41,14 +41,14 @@ final class StrengthReader implements ValueReader<LawGiven<StrengthLaw>> {
 
   @Override
   public String accepted() {
-    return Values.stress().accepted() + ", {a, m}, or " + steps().accepted();
+    return Values.strength().accepted() + ", {a, m}, or " + steps().accepted();
   }
 
   @Override
   public Form form() {
     return new Form.Either(
         List.of(
-            Values.stress().form(),
+            Values.strength().form(),
             Forms.block("own_materials[].tensile_strength"),
             steps().form()));
   }

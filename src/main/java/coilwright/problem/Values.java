@@ -7,6 +7,15 @@ import java.util.List;
 /** The readers that several keys share. */
 final class Values {
 
+  /** What is said of a property that no wire has. */
+  static final String NOT_WIRE = "outside what a spring wire can have";
+
+  /**
+   * Tensile strengths [MPa]. This range and those of the moduli and the density leave room around
+   * every metal that springs are wound of, from memory: they only catch a slip of the pen.
+   */
+  static final Range STRENGTH = Range.within(50, 6000);
+
   private Values() {}
 
   /**
@@ -25,9 +34,20 @@ final class Values {
     return quantity(Dimension.LENGTH, Range.ABOVE_ZERO);
   }
 
-  /** A strength or a modulus above zero, in MPa. */
-  static ValueReader<Double> stress() {
-    return quantity(Dimension.STRESS, Range.ABOVE_ZERO);
+  /** A tensile strength, in MPa. */
+  static ValueReader<Double> strength() {
+    return ofWire(Dimension.STRESS, STRENGTH);
+  }
+
+  /**
+   * A property of the wire of an own grade, within what any spring wire has.
+   *
+   * @param dimension its kind
+   * @param range what any spring wire has, in the inner unit
+   * @return reads the value in the inner unit
+   */
+  static ValueReader<Double> ofWire(Dimension dimension, Range range) {
+    return new QuantityReader(range, NOT_WIRE, dimension).map(Quantity::inner);
   }
 
   /** A share of tensile strength: above zero, and not above the strength itself. */

@@ -17,11 +17,12 @@ enum BeyondSchema {
   /** Of a range of quantities the schema knows the sign only. */
   SIZE_OF_A_QUANTITY(
       ": [0-9.e+-]+ ?[^ ;]+(, too (large|small) a number; |; must be at (most|least) [0-9.]+ [^ ,]+$)"
-          + "|: [1-9][^;]*; must be above .* and (at most|below) "),
+          + "|: [1-9][^;]*; must be above .* and (at most|below) "
+          + "|, outside what a spring wire can have; "),
 
   /** Two values, or a value and a default. */
   VALUES_AGAINST_EACH_OTHER(
-      "; must (not )?be (above|below|at most|at least) (rod|bore|min|max|the |min_inside)"
+      "; must (not )?be (above|below|at most|at least) (rod|bore|min|max|the |min_inside|make)"
           + "|; must differ from|within 0.1 %|; must leave |: zero on both sides;"
           + "|; must be at most .*where a table of this grade ends"
           + "| under stress_basis [a-z0-9-]+; | between loads of which |, at which the load line "),
@@ -31,7 +32,7 @@ enum BeyondSchema {
 
   /** Which grades there are. */
   NAMES_OF_GRADES(
-      ", an unknown grade;|, not available yet; must be one of|; must be new;|, an own grade that"
+      ", an unknown grade;|, not in the catalogue yet;|, not available yet; must be one of|; must be new;|, an own grade that"
           + "|: all beside other ids|: excludes every grade"),
 
   /** What must be given because of what else is given, or of what the file is for. */
