@@ -26,7 +26,12 @@ record DesignReader(MaterialIds ids, Section section, Method method) {
     Optional<String> material = section.require(DesignKeys.MATERIAL);
     material.ifPresent(id -> ids.check(id, section.spot(DesignKeys.MATERIAL)));
     Optional<WireSize> wire = section.require(DesignKeys.WIRE_DIAMETER);
-    Optional<Double> meanDiameter = wire.flatMap(size -> meanDiameter(size.diameter()));
+    double coating =
+        section
+            .read(DesignKeys.COATING)
+            .flatMap(inner -> inner.require(DesignKeys.COATING_THICKNESS))
+            .orElse(0.0);
+    Optional<Double> meanDiameter = wire.flatMap(size -> meanDiameter(size.diameter(), coating));
     if (wire.isEmpty()) {
       only(DesignKeys.DIAMETERS).ifPresent(section::read);
     }
@@ -36,11 +41,6 @@ record DesignReader(MaterialIds ids, Section section, Method method) {
     Optional<Double> freeLength = section.require(DesignKeys.FREE_LENGTH);
     Hand hand = section.read(DesignKeys.HAND).orElse(Hand.EITHER);
     boolean setRemoved = section.read(DesignKeys.SET_REMOVED).orElse(false);
-    double coating =
-        section
-            .read(DesignKeys.COATING)
-            .flatMap(inner -> inner.require(DesignKeys.COATING_THICKNESS))
-            .orElse(0.0);
     if (section.spot().faults().count() > before) {
       return Optional.empty();
     }
@@ -57,19 +57,20 @@ record DesignReader(MaterialIds ids, Section section, Method method) {
             coating));
   }
 
-  private Optional<Double> meanDiameter(double wire) {
+  private Optional<Double> meanDiameter(double wire, double coating) {
     Optional<ProblemKey<Double>> key = only(DesignKeys.DIAMETERS);
     Optional<Double> mean =
         key.flatMap(section::read)
             .map(given -> key.get() == DesignKeys.OUTSIDE_DIAMETER ? given - wire : given)
             .map(given -> key.get() == DesignKeys.INSIDE_DIAMETER ? given + wire : given);
-    if (mean.isPresent() && !(mean.get() > wire)) {
+    if (mean.isPresent() && !(mean.get() > wire + 2 * coating)) {
       section
           .spot(key.get())
           .fault(
               section.shown(key.get()),
               "must leave the mean diameter above the wire diameter, "
-                  + section.shown(DesignKeys.WIRE_DIAMETER));
+                  + section.shown(DesignKeys.WIRE_DIAMETER)
+                  + (coating > 0 ? ", and its coating" : ""));
     }
     return mean;
   }

@@ -15,16 +15,23 @@ final class Rejection<S extends State> {
   private final WireSearch<S> search;
   private final Limits left;
   private Conflict conflict;
+  private Set<LimitName> ruledOutBy;
 
   Rejection(WireSearch<S> search) {
     this.search = search;
     this.left = search.left();
   }
 
-  /** The limits counted against the wire: those that alone keep it out, else all in conflict. */
+  /**
+   * The limits counted against the wire: those that alone keep it out, else all in conflict; worked
+   * out once.
+   */
   Set<LimitName> ruledOutBy() {
-    Set<LimitName> decisive = new Decisive<>(search).limits();
-    return decisive.isEmpty() ? conflict().limits() : decisive;
+    if (ruledOutBy == null) {
+      Set<LimitName> decisive = new Decisive<>(search).limits();
+      ruledOutBy = decisive.isEmpty() ? conflict().limits() : decisive;
+    }
+    return ruledOutBy;
   }
 
   /** The limits that cannot hold together; worked out once. */

@@ -58,7 +58,7 @@ public record CompressionFamily(
 
   @Override
   public double mostCoils() {
-    return coilsAt(TIGHTEST_INDEX * wire.diameter());
+    return coilsAt(TIGHTEST_INDEX * coatedDiameter());
   }
 
   /**
@@ -91,7 +91,7 @@ public record CompressionFamily(
   public Optional<CompressionState> rounded(double coils) {
     double exact = meanDiameterAt(coils);
     double meanDiameter = Rounding.toStep(exact, rounding.diameterStepAt(exact));
-    if (!(meanDiameter > wire.diameter())) {
+    if (!(meanDiameter > coatedDiameter())) {
       return Optional.empty();
     }
     double step = rounding.lengthStepAt(exact);
@@ -100,6 +100,10 @@ public record CompressionFamily(
             ? Rounding.toStep(freeLength.getAsDouble(), step)
             : Rounding.upToStep(freeLengthAt(meanDiameter, coils), step);
     return length > 0 ? Optional.of(state(meanDiameter, coils, length)) : Optional.empty();
+  }
+
+  private double coatedDiameter() {
+    return wire.diameter() + 2 * duty.coating();
   }
 
   /** The free length given, or the shortest that the travel allows [mm]. */

@@ -5,6 +5,7 @@ import coilwright.limit.Limit;
 import coilwright.problem.LimitName;
 import coilwright.spring.CompressionFamily;
 import coilwright.spring.CompressionState;
+import coilwright.spring.Family;
 import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.EnumSet;
@@ -31,12 +32,38 @@ record EveryCount(List<Double> held, Set<LimitName> decisive) {
     for (BigDecimal n = step; n.doubleValue() <= last; n = n.add(step)) {
       found.take(wire, n.doubleValue());
     }
+    found.reshaped(wire, last);
     return found;
+  }
+
+  /** Where the lengths are open, springs that keep nothing before solid are other springs. */
+  private void reshaped(Searched wire, double last) {
+    Family<CompressionState> other = wire.family().keepingNothing();
+    if (other == wire.family() || !held.isEmpty()) {
+      return;
+    }
+    List<Limit<CompressionState>> others = new ArrayList<>(wire.limits());
+    if (!others.removeIf(limit -> limit.name() == LimitName.CLASH_ALLOWANCE)) {
+      return;
+    }
+    BigDecimal step = BigDecimal.valueOf(wire.coilStep());
+    for (BigDecimal n = step; n.doubleValue() <= last; n = n.add(step)) {
+      if (other
+          .rounded(n.doubleValue())
+          .filter(spring -> failed(others, spring).isEmpty())
+          .isPresent()) {
+        decisive.add(LimitName.CLASH_ALLOWANCE);
+        return;
+      }
+    }
   }
 
   /** The last count that need be looked at. */
   static double last(CompressionFamily family) {
     double most = family.mostCoils();
+    if (family.freeLength().isEmpty()) {
+      return most;
+    }
     double fitting = family.at(most).mostCompressed().length() / family.wire().diameter();
     return Math.min(most, fitting * BEYOND);
   }

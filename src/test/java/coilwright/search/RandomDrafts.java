@@ -6,6 +6,7 @@ import coilwright.material.WireGrade;
 import coilwright.problem.BucklingRule;
 import coilwright.spring.EndType;
 import coilwright.spring.LoadLine;
+import coilwright.spring.Method;
 import coilwright.spring.Rate;
 import coilwright.spring.Rounding;
 import coilwright.spring.Seating;
@@ -37,15 +38,55 @@ public final class RandomDrafts {
   private LoadLine line;
   private double travel;
   private double stress;
+  private double deepest;
+  private boolean tight;
 
   private RandomDrafts(long seed) {
     this.random = new Random(seed);
   }
 
-  /** As many drafts as asked. */
+  /** As many drafts as asked, by the handbooks' method, for bare wire. */
   public static Stream<ProblemDraft> of(long seed, int count) {
     RandomDrafts drafts = new RandomDrafts(seed);
     return IntStream.range(0, count).mapToObj(i -> drafts.next());
+  }
+
+  /** Drafts by either method, with coatings, set removal, overtravel and assumed clearances. */
+  public static Stream<ProblemDraft> ofAllKinds(long seed, int count) {
+    RandomDrafts drafts = new RandomDrafts(seed);
+    return IntStream.range(0, count).mapToObj(i -> drafts.varied(drafts.next()));
+  }
+
+  /**
+   * The same with the lengths left open. Their coils are tight and few and their steps coarse,
+   * since no length ends a scan of their counts.
+   */
+  public static Stream<ProblemDraft> ofOpenLengths(long seed, int count) {
+    RandomDrafts drafts = new RandomDrafts(seed);
+    drafts.tight = true;
+    return IntStream.range(0, count)
+        .mapToObj(i -> drafts.varied(drafts.next()).lengthsOpen().coilStep(drafts.pick(2.0, 3.0)));
+  }
+
+  private ProblemDraft varied(ProblemDraft draft) {
+    if (chance(0.5)) {
+      draft.method(Method.EN_13906).ends(EndType.SQUARED, EndType.SQUARED_GROUND);
+    }
+    if (chance(0.3)) {
+      draft.setRemoved();
+    }
+    if (chance(0.4)) {
+      draft.coating(wire * between(0.001, 0.05));
+    }
+    if (chance(0.4)) {
+      double solid = ends.solidLength(coils, wire);
+      double shortest = line.freeLength() - deepest;
+      draft.overtravel(solid + (shortest - solid) * between(0.2, 0.99));
+    }
+    if (chance(0.5)) {
+      draft.without(Bound.CLEARANCE);
+    }
+    return draft;
   }
 
   private ProblemDraft next() {
@@ -63,8 +104,8 @@ public final class RandomDrafts {
   /** The spring that exists; it reaches solid at or beyond the stress of an ordinary steel. */
   private void spring() {
     wire = 0.3 * StrictMath.pow(20, random.nextDouble());
-    index = chance(0.2) ? between(1.25, 4) : between(4, 14);
-    coils = 0.25 * (6 + random.nextInt(100));
+    index = chance(0.2) ? between(1.25, 4) : between(4, tight ? 6 : 14);
+    coils = 0.25 * (6 + random.nextInt(tight ? 30 : 100));
     ends = pick(EndType.values());
     double meanDiameter = index * wire;
     double rate = Rate.of(SHEAR_MODULUS, wire, meanDiameter, coils);
@@ -78,12 +119,13 @@ public final class RandomDrafts {
   }
 
   private double[] lengths() {
-    double deepest = line.freeLength() - travel / between(1.01, 1.6);
-    double room = line.freeLength() - deepest;
+    deepest = travel / between(1.01, 1.6);
+    double length = line.freeLength() - deepest;
     return switch (random.nextInt(4)) {
-      case 0 -> new double[] {deepest};
-      case 1 -> new double[] {deepest, deepest + between(0.02, 0.5) * room, deepest + 0.9 * room};
-      default -> new double[] {deepest + between(0.1, 0.9) * room, deepest};
+      case 0 -> new double[] {length};
+      case 1 ->
+          new double[] {length, length + between(0.02, 0.5) * deepest, length + 0.9 * deepest};
+      default -> new double[] {length + between(0.1, 0.9) * deepest, length};
     };
   }
 

@@ -38,9 +38,26 @@ record Searched(
   private static final int DRAFTS = 10;
   private static final Map<Long, List<Searched>> SEARCHED = new ConcurrentHashMap<>();
 
+  private static final long ALL_KINDS = 1000;
+  private static final long OPEN_LENGTHS = 2000;
+
   /** The seeds that tests share: ten random problems each. */
   static LongStream seeds() {
-    return LongStream.range(0, 30);
+    return LongStream.concat(
+        LongStream.range(0, 30),
+        LongStream.concat(
+            LongStream.range(ALL_KINDS, ALL_KINDS + 20),
+            LongStream.range(OPEN_LENGTHS, OPEN_LENGTHS + 10)));
+  }
+
+  /** The drafts of a seed: bare wire by handbook, any kind, or any kind with lengths left open. */
+  static Stream<ProblemDraft> drafts(long seed, int count) {
+    if (seed < ALL_KINDS) {
+      return RandomDrafts.of(seed, count);
+    }
+    return seed < OPEN_LENGTHS
+        ? RandomDrafts.ofAllKinds(seed, count)
+        : RandomDrafts.ofOpenLengths(seed, count);
   }
 
   /** Every wire of the ten problems of a seed, searched once for all tests. */
@@ -54,7 +71,7 @@ record Searched(
   }
 
   private static List<Searched> search(long seed) {
-    List<ProblemDraft> drafts = RandomDrafts.of(seed, DRAFTS).toList();
+    List<ProblemDraft> drafts = drafts(seed, DRAFTS).toList();
     return IntStream.range(0, DRAFTS)
         .boxed()
         .flatMap(i -> wiresOf(seed + "/" + i, drafts.get(i).problem()))
