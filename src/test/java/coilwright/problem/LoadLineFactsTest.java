@@ -26,13 +26,78 @@ class LoadLineFactsTest {
         "[{length: 32 mm, force: 18 N}, {length: 22 mm, force: 45 N}]|rate: 2.6975 N/mm|two loads at lengths",
         "[{length: 32 mm, force: 18 N}, {length: 22 mm, force: 45 N}]|rate: 2.7025 N/mm|two loads at lengths",
         "[{length: 32 mm, force: 18 N}, {length: 27 mm, force: 31.52 N}, {length: 22 mm, force: 45 N}]||two loads at lengths",
+        "[{length: 32 mm, force: 18 N}, {force: 45 N}]|stroke: 10 mm|a load and the stroke between the forces",
+        "[{force: 18 N}, {length: 22 mm, force: 45 N}]|stroke: 10 mm|a load and the stroke between the forces",
+        "[{force: 18 N}, {length: 22 mm, force: 45 N}, {force: 30 N}]|stroke: 10 mm|a load and the stroke between the forces",
+        "[{length: 32 mm, force: 18 N}, {length: 22 mm}]|rate: 2.7 N/mm|a load and the rate",
+        "[{length: 32 mm, force: 18 N}, {force: 45 N}]|rate: 2.7 N/mm|a load and the rate",
+        "[{length: 32 mm, force: 18 N}, {length: 22 mm}]|free_length: 38.666666666666667 mm|a load and the free length",
+        "[{length: 22 mm, force: 45 N}]|stroke: 16.666666666666667 mm|a load and the stroke from the free length to the force",
+        "[{length: 22 mm}]|{rate: 2.7 N/mm, free_length: 38.666666666666667 mm}|the rate and the free length",
+        "[{force: 45 N}]|{rate: 2.7 N/mm, free_length: 38.666666666666667 mm}|the rate and the free length",
+        "[{force: 18 N}, {force: 45 N}]|{stroke: 10 mm, free_length: 38.666666666666667 mm}|the stroke between the forces and the free length",
+        "[{length: 32 mm, force: 18 N}, {length: 22 mm, force: 45 N}]|stroke: 10.009 mm|two loads at lengths",
       })
   void fixesTheLine(String loads, String fact, String rule) {
-    String text = "spring: compression\nloads: " + loads + "\n" + (fact == null ? "" : fact + "\n");
+    String text = "spring: compression\nloads: " + loads + "\n" + lines(fact);
     Requirement required = Files.problem(text).required().orElseThrow();
     assertThat(required.rule()).isEqualTo(rule);
     assertThat(required.rate()).isCloseTo(2.7, within(1e-12));
     assertThat(required.freeLength().orElseThrow()).isCloseTo(38 + 2.0 / 3, within(1e-12));
+  }
+
+  /** One fact, or several in braces, each on a line of its own. */
+  private static String lines(String facts) {
+    return facts == null ? "" : facts.replaceAll("[{}]", "").replace(", ", "\n") + "\n";
+  }
+
+  @ParameterizedTest
+  @CsvSource(
+      delimiter = '|',
+      value = {
+        "[{force: 18 N}, {force: 45 N}]|stroke: 10 mm|the stroke between the forces",
+        "[{force: 45 N}, {force: 18 N}]|stroke: 10 mm|the stroke between the forces",
+        "[{force: 18 N}, {force: 45 N}]|rate: 2.7 N/mm|the rate",
+        "[{force: 18 N}, {force: 45 N}]|{rate: 2.7 N/mm, stroke: 10 mm}|the rate",
+        "[{force: 45 N}]|stroke: 16.666666666666667 mm|the stroke from the free length to the force",
+        "[{force: 45 N}]|rate: 2.7 N/mm|the rate",
+      })
+  void leavesTheLengthsOpen(String loads, String fact, String rule) {
+    String text = "spring: compression\nloads: " + loads + "\n" + lines(fact);
+    Requirement required = Files.problem(text).required().orElseThrow();
+    assertThat(required.rule()).isEqualTo(rule);
+    assertThat(required.rate()).isCloseTo(2.7, within(1e-12));
+    assertThat(required.freeLength()).isEmpty();
+    assertThat(required.line()).isEmpty();
+    assertThat(required.greatestDeflection().orElseThrow()).isCloseTo(45 / 2.7, within(1e-12));
+  }
+
+  @Test
+  void springsSideBySideShareTheForcesOfAStroke() {
+    String text =
+        "spring: compression\nloads: [{force: 18 N}, {force: 45 N}]\nstroke: 10 mm\n"
+            + "springs_in_parallel: 2\n";
+    Requirement required = Files.problem(text).required().orElseThrow();
+    assertThat(required.rate()).isCloseTo(1.35, within(1e-12));
+    assertThat(required.loads().get(1).force().orElseThrow()).isEqualTo(22.5);
+    assertThat(required.loads().get(1).deflection().orElseThrow())
+        .isCloseTo(45 / 2.7, within(1e-12));
+  }
+
+  @Test
+  void whatALoadLeavesOutIsCompleted() {
+    String text =
+        "spring: compression\nloads: [{length: 32 mm, force: 18 N}, {force: 45 N}]\nstroke: 10 mm\n";
+    Requirement required = Files.problem(text).required().orElseThrow();
+    assertThat(required.loads().get(1).length()).isEmpty();
+    assertThat(required.completed().get(1).length().orElseThrow()).isCloseTo(22, within(1e-12));
+  }
+
+  @Test
+  void anOvertravelIsRead() {
+    assertThat(Files.problem(Files.LOADS + "overtravel: {length: 0.8 in}\n").overtravel())
+        .hasValue(0.8 * 25.4);
+    assertThat(Files.problem(Files.LOADS).overtravel()).isEmpty();
   }
 
   @Test
