@@ -7,6 +7,6 @@ import java.util.List;
 final class SeriesConverter extends WordConverter<WireSeries> {
 
   SeriesConverter() {
-    super(List.of(WireSeries.values()), WireSeries::id, "steel-wire-gauge", "brown-sharpe");
+    super(List.of(WireSeries.values()), WireSeries::id);
   }
 }

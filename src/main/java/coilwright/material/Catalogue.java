@@ -5,6 +5,7 @@ import java.io.IOException;
 import java.io.InputStream;
 import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
+import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.HashMap;
 import java.util.List;
@@ -20,6 +21,7 @@ public final class Catalogue {
   private static final String COMMON_TOLERANCE = "tolerance-en-10218-2";
 
   private final UnaryOperator<String> textOf;
+  private List<String> ids = List.of();
   private final Map<String, Table> tables = new HashMap<>();
   private final Map<String, WireGrade> grades = new HashMap<>();
   private final Map<WireSeries, List<WireSize>> sizes = new EnumMap<>(WireSeries.class);
@@ -46,7 +48,30 @@ public final class Catalogue {
    * @throws IllegalStateException naming file, line and column if the file of grades is bad
    */
   public List<String> gradeIds() {
-    return table("grades").rows().stream().map(row -> row.text("id")).toList();
+    if (ids.isEmpty()) {
+      List<String> read = new ArrayList<>();
+      table("grades").rows().forEach(row -> read.add(row.text("id")));
+      ids = List.copyOf(read);
+    }
+    return ids;
+  }
+
+  /**
+   * Ids of the grades that are tried when a problem file names none; no file but that of the grades
+   * is read.
+   *
+   * @param supply whose steel is wanted
+   * @return the ids, in the catalogue's order
+   * @throws IllegalStateException naming file, line and column if the file of grades is bad
+   */
+  public List<String> commonIds(Supply supply) {
+    List<String> common = new ArrayList<>();
+    for (TableRow row : table("grades").rows()) {
+      if (GradeReader.common(row) && GradeReader.supply(row).serves(supply)) {
+        common.add(row.text("id"));
+      }
+    }
+    return common;
   }
 
   /**
@@ -73,7 +98,21 @@ public final class Catalogue {
    * @throws IllegalStateException naming file, line and column if the file of the series is bad
    */
   public List<WireSize> sizes(WireSeries series) {
-    return sizes.computeIfAbsent(series, key -> SizeReader.read(key, table("sizes-" + key.id())));
+    return sizes.computeIfAbsent(series, key -> SizeReader.read(key, rows(key)));
+  }
+
+  /**
+   * Where each size of a series comes from.
+   *
+   * @param series the series
+   * @return one line for each of {@link #sizes}, in the same order
+   */
+  public List<String> sizeSources(WireSeries series) {
+    return rows(series).stream().map(TableRow::place).toList();
+  }
+
+  private List<TableRow> rows(WireSeries series) {
+    return SizeReader.rising(series.files().stream().map(this::table).toList());
   }
 
   /**

@@ -7,8 +7,8 @@ import java.util.List;
 /** Reads rows by diameter out of a catalogue file. */
 final class DiameterRows {
 
-  /** The word for a last step that nothing bounds. */
-  private static final String OPEN = "any";
+  /** The word for a value that nothing bounds. */
+  static final String OPEN = "any";
 
   private DiameterRows() {}
 

@@ -50,8 +50,8 @@ final class GradeReader {
         row.text("name"),
         row.text("standard"),
         row.text("condition"),
-        row.oneOf("supply", Supply.values(), Supply::word),
-        row.oneOf("common", new Boolean[] {true, false}, String::valueOf),
+        supply(row),
+        common(row),
         row.oneOf("allowable_class", AllowableClass.values(), GradeReader::word),
         strength.law(),
         moduli.shear(),
@@ -65,6 +65,16 @@ final class GradeReader {
         OptionalDouble.empty(),
         OptionalDouble.empty(),
         sources);
+  }
+
+  /** Whether the grade of a row is tried when a problem file names none. */
+  static boolean common(TableRow row) {
+    return row.oneOf("common", new Boolean[] {true, false}, String::valueOf);
+  }
+
+  /** Whose steel the grade of a row is. */
+  static Supply supply(TableRow row) {
+    return row.oneOf("supply", Supply.values(), Supply::word);
   }
 
   private static Evidence toleranceBasis(TableRow row) {

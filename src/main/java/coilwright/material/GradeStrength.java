@@ -2,7 +2,6 @@ package coilwright.material;
 
 import coilwright.source.Evidence;
 import coilwright.unit.Dimension;
-import java.util.ArrayList;
 import java.util.List;
 
 /**
@@ -16,81 +15,87 @@ record GradeStrength(StrengthLaw law, DiameterRange diameters, List<GradeSource>
 
   private static final String DIAMETER = "diameter";
   private static final String STRENGTH = "strength";
+  private static final String SMALLEST = "smallest";
 
   /**
    * Reads the strength of a grade by the rule that the file's header names.
    *
    * @param table the file
-   * @param gradeId the grade, which picks the row of a file of formulas
+   * @param gradeId the grade, which picks its rows of a file that holds several
    * @return its strength
    * @throws IllegalStateException naming file, line and column if the file is bad
    */
   static GradeStrength of(Table table, String gradeId) {
     String rule = table.header().entry("rule");
+    boolean several = table.rows().get(0).has("grade");
+    List<TableRow> rows = several ? table.rowsOf("grade", gradeId) : table.rows();
     return switch (rule) {
-      case "interpolate" -> interpolated(table);
-      case "step-up-to-and-including" -> stepped(table);
-      case "formula" -> formula(table, gradeId);
+      case "interpolate" -> interpolated(rows);
+      case "step-up-to-and-including" -> stepped(table.header(), rows);
+      case "formula" -> formula(rows.get(0));
+      case "flat" -> flat(rows.get(0));
       default ->
           throw TableFault.at(
               table.file(),
               1,
               "found rule \""
                   + rule
-                  + "\", accepted: interpolate | step-up-to-and-including | formula");
+                  + "\", accepted: interpolate | step-up-to-and-including | formula | flat");
     };
   }
 
-  private static GradeStrength interpolated(Table table) {
-    List<DiameterRow> rows = DiameterRows.of(table.rows(), DIAMETER, STRENGTH, Dimension.STRESS);
-    double last = rows.get(rows.size() - 1).diameter();
+  private static GradeStrength interpolated(List<TableRow> rows) {
+    List<DiameterRow> points = DiameterRows.of(rows, DIAMETER, STRENGTH, Dimension.STRESS);
+    double last = points.get(points.size() - 1).diameter();
     if (last == Double.POSITIVE_INFINITY) {
-      TableRow row = table.rows().get(rows.size() - 1);
+      TableRow row = rows.get(rows.size() - 1);
       throw row.fault(DIAMETER, "found \"" + row.text(DIAMETER) + "\", accepted: a diameter");
     }
-    DiameterRange range = new DiameterRange(rows.get(0).diameter(), last);
-    return new GradeStrength(new InterpolatedTable(rows), range, sources(table));
+    DiameterRange range = new DiameterRange(points.get(0).diameter(), last);
+    return new GradeStrength(new InterpolatedTable(points), range, StrengthSources.of(rows));
   }
 
-  private static GradeStrength stepped(Table table) {
-    List<DiameterRow> rows = DiameterRows.of(table.rows(), DIAMETER, STRENGTH, Dimension.STRESS);
-    DiameterRange range = new DiameterRange(0, rows.get(rows.size() - 1).diameter());
-    return new GradeStrength(new StepTable(rows), range, sources(table));
+  /** The header may say the smallest diameter; without it the first step holds for all thinner. */
+  private static GradeStrength stepped(TableHeader header, List<TableRow> rows) {
+    List<DiameterRow> steps = DiameterRows.of(rows, DIAMETER, STRENGTH, Dimension.STRESS);
+    double smallest = header.entries().containsKey(SMALLEST) ? smallest(rows.get(0)) : 0;
+    DiameterRange range = new DiameterRange(smallest, steps.get(steps.size() - 1).diameter());
+    return new GradeStrength(new StepTable(steps), range, StrengthSources.of(rows));
   }
 
-  private static GradeStrength formula(Table table, String gradeId) {
-    TableRow row = table.rowsOf("grade", gradeId).get(0);
+  private static double smallest(TableRow row) {
+    double smallest = TableRow.decimal(row.header().entry(SMALLEST));
+    String unit = row.header().unitOf(DIAMETER);
+    double inner = row.unit(DIAMETER, unit, Dimension.LENGTH).toInner(smallest);
+    if (inner <= row.quantity(DIAMETER, Dimension.LENGTH)) {
+      return inner;
+    }
+    throw row.fault(DIAMETER, "the header's smallest diameter must be a number below the first");
+  }
+
+  private static GradeStrength formula(TableRow row) {
+    boolean open = row.text("greatest").equals(DiameterRows.OPEN);
     StrengthLaw law =
         new LogarithmicLaw(
             row.quantity("intercept", Dimension.STRESS),
             row.quantity("slope", Dimension.STRESS),
+            open ? Double.POSITIVE_INFINITY : row.quantity("greatest", Dimension.STRESS),
             row.quantity("rounding", Dimension.STRESS),
             row.evidence());
-    DiameterRange range =
-        new DiameterRange(
-            row.quantity("diameter_min", Dimension.LENGTH),
-            row.quantity("diameter_max", Dimension.LENGTH));
-    GradeSource source = new GradeSource(STRENGTH, row.place(), row.evidence());
-    return new GradeStrength(law, range, List.of(source));
+    return new GradeStrength(law, range(row), StrengthSources.of(row));
   }
 
-  private static List<GradeSource> sources(Table table) {
-    List<GradeSource> sources = new ArrayList<>();
-    for (Evidence evidence : Evidence.values()) {
-      List<TableRow> rows =
-          table.rows().stream().filter(row -> row.evidence() == evidence).toList();
-      if (!rows.isEmpty()) {
-        String place = rows.get(0).place();
-        String part = rows.size() == table.rows().size() ? "" : ", " + span(table, rows);
-        sources.add(new GradeSource(STRENGTH, place + part, evidence));
-      }
-    }
-    return sources;
+  private static GradeStrength flat(TableRow row) {
+    DiameterRange range = range(row);
+    Evidence evidence = row.evidence().and(StrengthSources.ofDiameters(row));
+    DiameterRow step =
+        new DiameterRow(range.max(), row.quantity(STRENGTH, Dimension.STRESS), evidence);
+    return new GradeStrength(new StepTable(List.of(step)), range, StrengthSources.ofFlat(row));
   }
 
-  private static String span(Table table, List<TableRow> rows) {
-    String first = rows.get(0).text(DIAMETER);
-    String last = rows.get(rows.size() - 1).text(DIAMETER);
-    return "rows " + first + " to " + last + " " + table.header().unitOf(DIAMETER);
+  private static DiameterRange range(TableRow row) {
+    return new DiameterRange(
+        row.quantity("diameter_min", Dimension.LENGTH),
+        row.quantity("diameter_max", Dimension.LENGTH));
   }
 }

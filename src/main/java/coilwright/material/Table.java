@@ -66,7 +66,12 @@ record Table(TableHeader header, List<TableRow> rows) {
    * @throws IllegalStateException if there are none
    */
   List<TableRow> rowsOf(String column, String word) {
-    List<TableRow> found = rows.stream().filter(row -> row.text(column).equals(word)).toList();
+    List<TableRow> found = new ArrayList<>();
+    for (TableRow row : rows) {
+      if (row.text(column).equals(word)) {
+        found.add(row);
+      }
+    }
     if (found.isEmpty()) {
       TableRow last = rows.get(rows.size() - 1);
       throw last.fault(column, "the file ends here without a row for \"" + word + "\"");

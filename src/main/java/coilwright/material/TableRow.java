@@ -46,7 +46,7 @@ record TableRow(TableHeader header, int line, List<String> columns, List<String>
   /** A positive decimal number without sign or exponent. */
   double number(String column) {
     String text = text(column);
-    double value = isDecimal(text) ? Double.parseDouble(text) : Double.NaN;
+    double value = decimal(text);
     if (value > 0 && value < Double.POSITIVE_INFINITY) {
       return value;
     }
@@ -119,6 +119,11 @@ record TableRow(TableHeader header, int line, List<String> columns, List<String>
     }
     List<String> accepted = Arrays.stream(values).map(word).toList();
     throw fault(column, "found \"" + text + "\", accepted: " + String.join(" | ", accepted));
+  }
+
+  /** A decimal number without sign or exponent, or NaN where the text is none. */
+  static double decimal(String text) {
+    return isDecimal(text) ? Double.parseDouble(text) : Double.NaN;
   }
 
   private static boolean isDecimal(String text) {

@@ -41,12 +41,7 @@ final class MakeKeys {
   static final ProblemKey<List<WireSeries>> WIRE_SERIES =
       ProblemKey.of(
           "make.wire_series",
-          Values.list(
-              new WordReader<>(
-                  List.of(WireSeries.values()),
-                  WireSeries::id,
-                  "steel-wire-gauge",
-                  "brown-sharpe")),
+          Values.list(new WordReader<>(List.of(WireSeries.values()), WireSeries::id)),
           "the usual one of each grade",
           "whose wire sizes are tried",
           "[metric]");

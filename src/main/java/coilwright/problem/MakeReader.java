@@ -100,7 +100,7 @@ record MakeReader(MaterialIds ids, UnitSystem units, Method method) {
     }
     List<Spot> barred = section.itemSpots(MakeKeys.EXCLUDE_MATERIALS);
     for (int i = 0; i < excluded.size(); i++) {
-      ids.checkExcluded(excluded.get(i), barred.get(i));
+      ids.check(excluded.get(i), barred.get(i));
     }
     if (!materials.isEmpty() && excluded.containsAll(materials)) {
       section

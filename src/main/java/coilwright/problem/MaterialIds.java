@@ -11,36 +11,6 @@ final class MaterialIds {
   /** The word for every grade there is. */
   static final String ALL = "all";
 
-  private static final List<String> LATER =
-      List.of(
-          "music-wire",
-          "hard-drawn",
-          "oil-tempered",
-          "chrome-vanadium",
-          "chrome-silicon",
-          "stainless-302",
-          "stainless-316",
-          "stainless-17-7ph",
-          "phosphor-bronze",
-          "beryllium-copper",
-          "monel-400",
-          "monel-k500",
-          "inconel-600",
-          "inconel-x750",
-          "en-10270-1-sl",
-          "en-10270-1-sm",
-          "en-10270-1-dm",
-          "en-10270-1-sh",
-          "en-10270-1-dh",
-          "en-10270-2-fdc",
-          "en-10270-2-fdcrv",
-          "en-10270-2-fdsicr",
-          "en-10270-2-vdsicr",
-          "en-10270-3-1.4310-ns",
-          "en-10270-3-1.4310-hs",
-          "en-10270-3-1.4401",
-          "en-10270-3-1.4568");
-
   /** How many ids a message lists; enough for every grade of the catalogue. */
   private static final int SHOWN = 40;
 
@@ -85,27 +55,7 @@ final class MaterialIds {
     if (known.contains(id)) {
       return;
     }
-    if (LATER.contains(id)) {
-      spot.fault(ShownText.of(id) + ", " + Later.WORDS, accepted());
-    } else {
-      spot.fault(ShownText.of(id) + ", an unknown grade", accepted(), spot.nearest(id, known));
-    }
-  }
-
-  /**
-   * Reports an id that need not or cannot be excluded.
-   *
-   * @param id as typed
-   * @param spot its place
-   */
-  void checkExcluded(String id, Spot spot) {
-    if (LATER.contains(id) && !known.contains(id)) {
-      spot.fault(
-          ShownText.of(id) + ", not in the catalogue yet",
-          "must be left out; without data it is never tried");
-    } else {
-      check(id, spot);
-    }
+    spot.fault(ShownText.of(id) + ", an unknown grade", accepted(), spot.nearest(id, known));
   }
 
   private String accepted() {

@@ -11,10 +11,15 @@ final class Wires {
   /** The size as its series or the user writes it, with what makes it readable. */
   static String size(Wire wire) {
     String label = wire.size().label();
-    return wire.size()
-        .series()
-        .map(series -> series == WireSeries.METRIC ? label + " mm" : "no. " + label)
-        .orElse(label);
+    return wire.size().series().map(series -> inSeries(series, label)).orElse(label);
+  }
+
+  /** A number of a gauge, or a diameter where the series or its decimal sizes give one. */
+  static String inSeries(WireSeries series, String label) {
+    if (series == WireSeries.METRIC) {
+      return label + " mm";
+    }
+    return label.startsWith("0.") ? label + " in" : "no. " + label;
   }
 
   /** The size with its diameter, where the size does not say it: "no. 24 = 1.397 mm". */

@@ -1,7 +1,6 @@
 package coilwright.search;
 
 import coilwright.material.Catalogue;
-import coilwright.material.Supply;
 import coilwright.material.Wire;
 import coilwright.material.WireGrade;
 import coilwright.material.WireSeries;
@@ -62,14 +61,13 @@ public record WireChoice(List<Wire> wires, int outsideRange, Map<String, Integer
 
   private static List<WireGrade> grades(Problem problem, Catalogue catalogue) {
     Make make = problem.make();
+    boolean named = make.allMaterials() || !make.materials().isEmpty();
     List<WireGrade> offered = new ArrayList<>();
-    for (String id : catalogue.gradeIds()) {
-      if (make.allMaterials() || make.materials().isEmpty() || make.materials().contains(id)) {
+    for (String id : named ? catalogue.gradeIds() : catalogue.commonIds(make.supply())) {
+      boolean wanted = !named || make.allMaterials() || make.materials().contains(id);
+      if (wanted && !make.excludeMaterials().contains(id)) {
         offered.add(catalogue.grade(id));
       }
-    }
-    if (!make.allMaterials() && make.materials().isEmpty()) {
-      offered.removeIf(grade -> !grade.common() || !suppliedBy(grade, make.supply()));
     }
     for (WireGrade own : problem.ownMaterials()) {
       if (make.allMaterials()
@@ -80,10 +78,6 @@ public record WireChoice(List<Wire> wires, int outsideRange, Map<String, Integer
     }
     offered.removeIf(grade -> make.excludeMaterials().contains(grade.id()));
     return offered;
-  }
-
-  private static boolean suppliedBy(WireGrade grade, Supply supply) {
-    return supply == Supply.ANY || grade.supply() == Supply.ANY || grade.supply() == supply;
   }
 
   private static List<WireSize> sizes(Make make, WireGrade grade, Catalogue catalogue) {

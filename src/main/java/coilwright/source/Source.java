@@ -9,12 +9,26 @@ public enum Source {
   /** Quenched and tempered spring wire. */
   ASTM_A229(
       "ASTM A229", "ASTM A229/A229M, Steel Wire, Quenched and Tempered for Mechanical Springs"),
+  /** Quenched and tempered chrome-vanadium spring wire. */
+  ASTM_A231("ASTM A231", "ASTM A231/A231M, Chromium-Vanadium Alloy Steel Spring Wire"),
+  /** Quenched and tempered chrome-silicon spring wire. */
+  ASTM_A401("ASTM A401", "ASTM A401/A401M, Steel Wire, Chromium-Silicon Alloy"),
   /** Stainless spring wire. */
   ASTM_A313("ASTM A313", "ASTM A313/A313M, Stainless Steel Spring Wire"),
+  /** Phosphor bronze wire. */
+  ASTM_B159("ASTM B159", "ASTM B159/B159M, Phosphor Bronze Wire"),
+  /** Beryllium copper wire. */
+  ASTM_B197("ASTM B197", "ASTM B197/B197M, Copper-Beryllium Alloy Wire"),
   /** Patented cold-drawn unalloyed spring wire. */
   EN_10270_1(
       "EN 10270-1",
       "EN 10270-1, Steel wire for mechanical springs, part 1: patented cold drawn unalloyed"),
+  /** Oil-hardened and tempered spring wire. */
+  EN_10270_2(
+      "EN 10270-2",
+      "EN 10270-2, Steel wire for mechanical springs, part 2: oil hardened and tempered"),
+  /** Stainless spring wire. */
+  EN_10270_3("EN 10270-3", "EN 10270-3, Steel wire for mechanical springs, part 3: stainless"),
   /** Wire dimensions and tolerances. */
   EN_10218_2(
       "EN 10218-2",

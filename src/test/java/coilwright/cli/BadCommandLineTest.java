@@ -112,9 +112,10 @@ class BadCommandLineTest {
         "coilwright starter: KIND: \"torsion\" is not available yet; accepted: compression",
         "starter",
         "torsion");
-    Run.of("wires", "brown-sharpe")
+    Run.of("wires", "brown-sharp")
         .refused(
-            "coilwright wires: SERIES: \"brown-sharpe\" is not available yet; accepted: metric");
+            "coilwright wires: SERIES: \"brown-sharp\"; accepted: metric, music-wire-gauge,"
+                + " steel-wire-gauge, brown-sharpe (did you mean brown-sharpe?)");
   }
 
   @Test

@@ -79,7 +79,7 @@ class BadTableTest {
         "column allowable_class");
     refused(
         "grades.csv", "music-wire-gauge,ASTM A228", "music-gauge,ASTM A228", "column usual_series");
-    refused("grades.csv", "hard-drawn,hard", "music-wire,hard", "line 8", "column id", "second");
+    refused("grades.csv", "hard-drawn,hard", "music-wire,hard", "line 10", "column id", "second");
     refused(MODULI, "music-wire,", "piano-wire,", "column grade", "music-wire");
     refused("properties.csv", "music-wire,density,", "hard-drawn,density,", "column id", "density");
     refused(
@@ -102,6 +102,19 @@ class BadTableTest {
   }
 
   @Test
+  void rulesThatNeedMoreThanARow() {
+    String flat = "strength-nickel-alloys.csv";
+    refusedFor("monel-400", flat, ",145,memory,", ",145,,", "column diameters_evidence", "empty");
+    refusedFor("monel-400", flat, ",145,memory,", ",145,no,", "column diameters_evidence", "no");
+    refusedFor("monel-400", flat, "monel-400,", "monel-401,", "column grade", "monel-400");
+    String formula = "strength-en-10270-1.csv";
+    refusedFor("en-10270-1-dh", formula, "820,2800,", "820,most,", "column greatest", "most");
+    String steps = "strength-en-10270-2.csv";
+    refusedFor("en-10270-2-fdc", steps, "smallest: 0.50", "smallest: 0.8", "below the first");
+    refusedFor("en-10270-2-fdc", steps, "smallest: 0.50", "smallest: half", "must be a number");
+  }
+
+  @Test
   void filesThatAreNotThere() {
     Catalogue catalogue = Shipped.with("grades.csv", "strength-astm-a228,", "strength-astm-a22,");
     assertThatIllegalStateException()
@@ -116,9 +129,20 @@ class BadTableTest {
   }
 
   private static void refused(String file, String piece, String replacement, String... words) {
+    refusedFor("music-wire", file, piece, replacement, words);
+  }
+
+  private static void refusedFor(
+      String id, String file, String piece, String replacement, String... words) {
     Catalogue catalogue = Shipped.with(file, piece, replacement);
-    var failure = assertThatIllegalStateException().isThrownBy(() -> catalogue.grade("music-wire"));
+    var failure = assertThatIllegalStateException().isThrownBy(() -> catalogue.grade(id));
     failure.withMessageContaining(".csv, line ").withMessageContainingAll(words);
+  }
+
+  @Test
+  void decimalSizesThatAreGaugeNumbersToo() {
+    seriesRefused("sizes-astm-a228-decimal.csv", "0.028,0.028", "0.029,0.029", "diameter", "rise");
+    seriesRefused("sizes-astm-a228-decimal.csv", "0.028,0.028", "12,0.028", "second time");
   }
 
   private static void seriesRefused(
@@ -126,7 +150,7 @@ class BadTableTest {
     Catalogue catalogue = Shipped.with(file, piece, replacement);
     assertThatIllegalStateException()
         .isThrownBy(() -> catalogue.sizes(WireSeries.MUSIC_WIRE_GAUGE))
-        .withMessageContaining(file + ", line ")
+        .withMessageContaining(".csv, line ")
         .withMessageContainingAll(words);
   }
 }

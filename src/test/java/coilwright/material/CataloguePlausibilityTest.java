@@ -17,6 +17,10 @@ class CataloguePlausibilityTest {
 
   private static final Catalogue CATALOGUE = Catalogue.load();
 
+  /** Grades with one strength for all their diameters: no better table was seen. */
+  private static final List<String> FLAT =
+      List.of("beryllium-copper", "monel-400", "monel-k500", "inconel-600", "inconel-x750");
+
   static Stream<String> grades() {
     return CATALOGUE.gradeIds().stream();
   }
@@ -31,7 +35,8 @@ class CataloguePlausibilityTest {
       assertThat(strength).as("at " + d + " mm").isPositive().isLessThanOrEqualTo(last);
       last = strength;
     }
-    assertThat(last).isLessThan(grade.strength().at(ladder(grade).get(0)));
+    double thinnest = grade.strength().at(ladder(grade).get(0));
+    assertThat(last < thinnest || FLAT.contains(id)).as(id).isTrue();
   }
 
   @ParameterizedTest
@@ -39,26 +44,34 @@ class CataloguePlausibilityTest {
   void strengthIsThatOfSpringWire(String id) {
     WireGrade grade = CATALOGUE.grade(id);
     for (double d : ladder(grade)) {
-      assertThat(grade.strength().at(d)).as("at " + d + " mm").isBetween(900.0, 3200.0);
+      assertThat(grade.strength().at(d)).as("at " + d + " mm").isBetween(700.0, 3200.0);
     }
   }
 
   @ParameterizedTest
   @MethodSource("grades")
-  void moduliCoverTheStrengthAndStandInTheRatioOfSteel(String id) {
+  void moduliCoverTheStrengthAndStandInTheRatioOfMetals(String id) {
     WireGrade grade = CATALOGUE.grade(id);
     for (double d : ladder(grade)) {
       double ratio = grade.shearModulus().at(d) / grade.elasticModulus().at(d);
-      assertThat(ratio).as("G/E at " + d + " mm").isBetween(0.35, 0.42);
-      assertThat(grade.elasticModulus().at(d)).isBetween(190_000.0, 210_000.0);
+      assertThat(ratio).as("G/E at " + d + " mm").isBetween(0.33, 0.42);
+      assertThat(grade.shearModulus().at(d)).isBetween(25_000.0, 250_000.0);
+      assertThat(grade.elasticModulus().at(d)).isBetween(25_000.0, 250_000.0);
+      if (isSteel(grade)) {
+        assertThat(grade.elasticModulus().at(d)).isBetween(180_000.0, 210_000.0);
+        assertThat(grade.shearModulus().at(d)).isBetween(68_000.0, 83_000.0);
+      }
     }
   }
 
   @ParameterizedTest
   @MethodSource("grades")
-  void densityIsThatOfSteelAndCostIsRelativeToHardDrawn(String id) {
+  void densityIsThatOfItsMetalAndCostIsRelativeToHardDrawn(String id) {
     WireGrade grade = CATALOGUE.grade(id);
-    assertThat(grade.density()).isBetween(7700.0, 8050.0);
+    assertThat(grade.density()).isBetween(4000.0, 9500.0);
+    if (isSteel(grade)) {
+      assertThat(grade.density()).isBetween(7700.0, 8050.0);
+    }
     assertThat(grade.costIndex()).isGreaterThanOrEqualTo(CATALOGUE.grade("hard-drawn").costIndex());
   }
 
@@ -117,6 +130,48 @@ class CataloguePlausibilityTest {
     assertThat(wire.evidence()).isEqualTo(Evidence.SEEN);
   }
 
+  @ParameterizedTest
+  @MethodSource("grades")
+  void aGradeWhollyFromMemoryIsNotCommonAndAllItsWireSaysSo(String id) {
+    WireGrade grade = CATALOGUE.grade(id);
+    boolean strengthSeen =
+        grade.sources().stream()
+            .anyMatch(s -> s.what().equals("strength") && s.evidence() == Evidence.SEEN);
+    boolean moduliSeen =
+        grade.sources().stream()
+            .noneMatch(s -> s.what().equals("moduli") && s.evidence() == Evidence.MEMORY);
+    boolean anySeen = !isAllFromMemory(id);
+    assertThat(anySeen && !(strengthSeen && moduliSeen)).as("seen without a seen source").isFalse();
+    assertThat(grade.common() && !anySeen).as("common without a seen size").isFalse();
+  }
+
+  @Test
+  void theseGradesHaveNoSeenWire() {
+    assertThat(grades().filter(CataloguePlausibilityTest::isAllFromMemory))
+        .containsExactlyInAnyOrder(
+            "chrome-silicon",
+            "stainless-17-7ph",
+            "phosphor-bronze",
+            "beryllium-copper",
+            "monel-400",
+            "monel-k500",
+            "inconel-600",
+            "inconel-x750",
+            "en-10270-1-sl",
+            "en-10270-2-fdc",
+            "en-10270-2-fdcrv",
+            "en-10270-2-fdsicr",
+            "en-10270-2-vdsicr",
+            "en-10270-3-1.4310-hs");
+  }
+
+  private static boolean isAllFromMemory(String id) {
+    WireGrade grade = CATALOGUE.grade(id);
+    return CATALOGUE.sizes(grade.usualSeries().get(0)).stream()
+        .filter(size -> grade.diameters().contains(size.diameter()))
+        .allMatch(size -> grade.drawnTo(size).evidence() == Evidence.MEMORY);
+  }
+
   @Test
   void theHighStrengthGradeIsStrongerThroughout() {
     WireGrade high = CATALOGUE.grade("en-10270-1-sh");
@@ -124,6 +179,10 @@ class CataloguePlausibilityTest {
     for (double d : ladder(medium)) {
       assertThat(high.strength().at(d)).isGreaterThan(medium.strength().at(d));
     }
+  }
+
+  private static boolean isSteel(WireGrade grade) {
+    return grade.allowableClass() != AllowableClass.NON_FERROUS;
   }
 
   /** Diameters over the grade's whole range, close enough to meet every row [mm]. */

@@ -23,22 +23,80 @@ class CatalogueTest {
             "music-wire",
             "hard-drawn",
             "oil-tempered",
+            "chrome-vanadium",
+            "chrome-silicon",
             "stainless-302",
+            "stainless-316",
+            "stainless-17-7ph",
+            "phosphor-bronze",
+            "beryllium-copper",
+            "monel-400",
+            "monel-k500",
+            "inconel-600",
+            "inconel-x750",
+            "en-10270-1-sl",
             "en-10270-1-sm",
-            "en-10270-1-sh");
+            "en-10270-1-dm",
+            "en-10270-1-sh",
+            "en-10270-1-dh",
+            "en-10270-2-fdc",
+            "en-10270-2-fdcrv",
+            "en-10270-2-fdsicr",
+            "en-10270-2-vdsicr",
+            "en-10270-3-1.4310-ns",
+            "en-10270-3-1.4310-hs",
+            "en-10270-3-1.4401",
+            "en-10270-3-1.4568");
   }
 
   @Test
   void supplyAndSeriesGoTogether() {
     for (String id : catalogue.gradeIds()) {
-      boolean european = id.startsWith("en-");
       WireGrade grade = catalogue.grade(id);
-      assertThat(grade.common()).as(id).isTrue();
-      assertThat(grade.supply()).as(id).isEqualTo(european ? Supply.EN : Supply.US);
-      assertThat(grade.usualSeries())
-          .as(id)
-          .containsExactly(european ? WireSeries.METRIC : WireSeries.MUSIC_WIRE_GAUGE);
+      if (id.startsWith("en-")) {
+        supplied(grade, Supply.EN, WireSeries.METRIC);
+      } else if (id.equals("music-wire")) {
+        supplied(grade, Supply.US, WireSeries.MUSIC_WIRE_GAUGE);
+      } else if (grade.allowableClass() == AllowableClass.NON_FERROUS) {
+        supplied(grade, Supply.ANY, WireSeries.BROWN_SHARPE);
+      } else {
+        supplied(grade, Supply.US, WireSeries.STEEL_WIRE_GAUGE);
+      }
     }
+  }
+
+  private static void supplied(WireGrade grade, Supply supply, WireSeries series) {
+    assertThat(grade.supply()).as(grade.id()).isEqualTo(supply);
+    assertThat(grade.usualSeries()).as(grade.id()).containsExactly(series);
+  }
+
+  @Test
+  void withoutANameTheCommonGradesOfTheSupplyAreTried() {
+    String[] european = {"en-10270-1-sm", "en-10270-1-sh", "en-10270-3-1.4310-ns"};
+    String[] american = {
+      "music-wire", "hard-drawn", "oil-tempered", "chrome-vanadium", "stainless-302"
+    };
+    assertThat(catalogue.commonIds(Supply.EN)).containsExactly(european);
+    assertThat(catalogue.commonIds(Supply.US)).containsExactly(american);
+    assertThat(catalogue.commonIds(Supply.ANY)).contains(european).contains(american).hasSize(8);
+    for (String id : catalogue.gradeIds()) {
+      boolean common = catalogue.commonIds(Supply.ANY).contains(id);
+      assertThat(catalogue.grade(id).common()).as(id).isEqualTo(common);
+    }
+  }
+
+  @Test
+  void theChoiceOfCommonGradesReadsNoFileOfAGrade() {
+    List<String> opened = new ArrayList<>();
+    Catalogue watched =
+        new Catalogue(
+            file -> {
+              opened.add(file);
+              return Catalogue.shipped(file);
+            });
+    watched.commonIds(Supply.EN);
+    watched.gradeIds();
+    assertThat(opened).containsExactly("grades.csv");
   }
 
   @Test

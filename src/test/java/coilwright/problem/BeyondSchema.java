@@ -32,7 +32,7 @@ enum BeyondSchema {
 
   /** Which grades there are. */
   NAMES_OF_GRADES(
-      ", an unknown grade;|, not in the catalogue yet;|, not available yet; must be one of|; must be new;|, an own grade that"
+      ", an unknown grade;|; must be new;|, an own grade that"
           + "|: all beside other ids|: excludes every grade"),
 
   /** What must be given because of what else is given, or of what the file is for. */
