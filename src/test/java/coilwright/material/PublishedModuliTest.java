@@ -31,6 +31,8 @@ class PublishedModuliTest {
 
   static Stream<Published> examples() {
     return Stream.of(
+            "machinerys-handbook/moduli-conflicts.csv",
+            "trade-tables/moduli.csv",
             "shigley/worked-examples-moduli.csv",
             "shigley/problem-10-3-moduli.csv",
             "mott/worked-examples-moduli.csv",

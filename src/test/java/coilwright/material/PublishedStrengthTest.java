@@ -37,6 +37,7 @@ class PublishedStrengthTest {
     return Stream.of(
             "en-10270-1/minimum-strength-sm.csv",
             "en-10270-1/minimum-strength-dh.csv",
+            "en-10270-1/minimum-strength-sh.csv",
             "astm-a313/minimum-strength-302-si.csv",
             "shigley/worked-examples-strength.csv",
             "shigley/problem-10-3-strength.csv")
@@ -48,7 +49,12 @@ class PublishedStrengthTest {
   }
 
   static Stream<Published> powerLaws() {
-    return Stream.of("shigley/power-laws.csv", "norton/power-laws.csv").flatMap(Published::rows);
+    return Stream.of(
+            "shigley/power-laws.csv",
+            "shigley/power-laws-memory.csv",
+            "norton/power-laws.csv",
+            "norton/power-laws-memory.csv")
+        .flatMap(Published::rows);
   }
 
   static Stream<Published> rationalFits() {

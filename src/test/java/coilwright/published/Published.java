@@ -88,6 +88,8 @@ public record Published(PublishedFile file, Map<String, String> cells) {
 
   /** The columns that tests read, each titled as its name in lower case. */
   public enum Column {
+    /** The id of a wire series. */
+    SERIES,
     /** A size as its series writes it. */
     LABEL,
     /** The id of a grade. */
@@ -102,6 +104,8 @@ public record Published(PublishedFile file, Map<String, String> cells) {
     STRENGTH,
     /** Greatest tensile strength. */
     MAXIMUM,
+    /** What the strength of a row is apart from that of the shipped one. */
+    WIDTH,
     /** E. */
     ELASTIC_MODULUS,
     /** G. */

@@ -74,6 +74,11 @@ public record PublishedFile(
     return entry("group");
   }
 
+  /** The printed table the values come from: as the header names it, or its source and locator. */
+  public String table() {
+    return header.getOrDefault("table", entry("source") + ", " + entry("locator"));
+  }
+
   /** Whether every value of the file was seen; a file that mixes does not say so. */
   public boolean seen() {
     return entry("seen or from memory").equals("seen");
