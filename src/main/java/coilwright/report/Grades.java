@@ -88,12 +88,13 @@ public final class Grades {
   }
 
   private String properties(WireGrade grade) {
-    TextTable table = new TextTable("lrrrrl");
-    table.row("size", "d mm", "Rm MPa", "G MPa", "E MPa", "data");
+    TextTable table = new TextTable("lrrrrrl");
+    table.row("size", "d mm", "+- mm", "Rm MPa", "G MPa", "E MPa", "data");
     for (Wire wire : spread(wires(grade))) {
       table.row(
           Wires.size(wire),
           Numbers.fixed(wire.diameter(), 3),
+          Numbers.fixed(wire.diameterTolerance(), 4),
           Numbers.fixed(wire.tensileStrength(), 0),
           Numbers.fixed(wire.shearModulus(), 0),
           Numbers.fixed(wire.elasticModulus(), 0),
@@ -158,6 +159,7 @@ public final class Grades {
             body.string("wire_series", wire.size().series().orElseThrow().id());
             body.string("wire_size", wire.size().label());
             body.number("wire_diameter_mm", wire.diameter());
+            body.number("wire_diameter_tolerance_mm", wire.diameterTolerance());
             body.number("tensile_strength_mpa", plain(wire.tensileStrength()));
             body.number("shear_modulus_mpa", plain(wire.shearModulus()));
             body.number("elastic_modulus_mpa", plain(wire.elasticModulus()));

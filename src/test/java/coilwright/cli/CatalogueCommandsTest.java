@@ -32,6 +32,50 @@ class CatalogueCommandsTest {
   }
 
   @Test
+  void materialsPrintsEveryGradeWithItsSources() {
+    JsonNode all = Run.of("materials", "--format", "json").json().path("materials");
+    assertThat(all).hasSize(27);
+    String text = Run.of("materials").found(Status.FOUND).out();
+    for (JsonNode grade : all) {
+      assertThat(text).contains(grade.path("id").asText() + "  " + grade.path("name").asText());
+      assertThat(grade.path("sources").findValuesAsText("what"))
+          .as(grade.path("id").asText())
+          .contains("strength", "moduli", "diameter tolerance", "density", "cost index");
+      assertThat(grade.path("wires").findValuesAsText("wire_diameter_tolerance_mm"))
+          .hasSizeGreaterThan(20);
+    }
+  }
+
+  @Test
+  void wiresPrintsEverySizeWithItsSource() {
+    JsonNode sizes = Run.of("wires", "--format", "json").json().path("wires");
+    assertThat(sizes.findValuesAsText("wire_series"))
+        .contains("metric", "music-wire-gauge", "steel-wire-gauge", "brown-sharpe");
+    assertThat(sizes.findValuesAsText("source")).hasSize(sizes.size()).doesNotContain("");
+    assertThat(Run.of("wires", "music-wire-gauge").found(Status.FOUND).out())
+        .contains("0.048  1.219", "[1] trade tables, music wire gauge", "[2] ASTM A228");
+  }
+
+  @Test
+  void everyMemoryGradeIsTriedWhenNamedAndThenSaysSo() {
+    String problem =
+        """
+        spring: compression
+        loads: [{length: 32 mm, force: 18 N}, {length: 22 mm, force: 45 N}]
+        make:
+          materials: [chrome-silicon, phosphor-bronze, monel-400, en-10270-2-fdsicr]
+        """;
+    Run named = Run.reading(problem, "shortlist", "-", "--format", "json", "--top", "500");
+    JsonNode candidates = named.json().path("candidates");
+    assertThat(candidates.findValuesAsText("material"))
+        .contains("chrome-silicon", "phosphor-bronze", "monel-400", "en-10270-2-fdsicr");
+    assertThat(candidates.findValuesAsText("data")).containsOnly("memory");
+    String unnamed = problem.replaceAll("(?s)make:.*", "make: {supply: any}\n");
+    Run common = Run.reading(unnamed, "shortlist", "-", "--format", "json", "--top", "500");
+    assertThat(common.json().path("candidates").findValuesAsText("data")).containsOnly("seen");
+  }
+
+  @Test
   void starterIsAValidProblem() {
     String starter = Run.of("starter", "compression").found(Status.FOUND).out();
     assertThat(starter).startsWith("# ").contains("\nloads:", "\nspring: compression");
