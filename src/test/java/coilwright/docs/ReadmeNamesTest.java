@@ -2,6 +2,8 @@ package coilwright.docs;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import coilwright.material.Catalogue;
+import coilwright.material.WireSeries;
 import coilwright.problem.LimitName;
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.ObjectMapper;
@@ -15,7 +17,7 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.EnumSource;
 
-/** README.md names every key of the JSON output and every limit. */
+/** README.md names every key of the JSON output, every limit, every grade and every series. */
 class ReadmeNamesTest {
 
   @Test
@@ -30,6 +32,15 @@ class ReadmeNamesTest {
   @EnumSource(LimitName.class)
   void everyLimitIsNamed(LimitName name) throws IOException {
     assertThat(Readme.text()).contains("`" + name.text() + "`");
+  }
+
+  @Test
+  void everyGradeAndEverySeriesIsNamed() throws IOException {
+    String readme = Readme.text();
+    Catalogue.load().gradeIds().forEach(id -> assertThat(readme).contains("`" + id + "`"));
+    for (WireSeries series : WireSeries.values()) {
+      assertThat(readme).contains("| `" + series.id() + "` |");
+    }
   }
 
   private static SortedSet<String> keys() throws IOException {
