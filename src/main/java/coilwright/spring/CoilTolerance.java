@@ -16,6 +16,9 @@ public final class CoilTolerance {
       List.of("up_to", "index_4_to_8", "index_8_to_14", "index_14_to_20");
   private static final double[] INDEX_STEPS = {8, 14};
 
+  /** A diameter this little above a row's bound still belongs to the row [-]. */
+  private static final double ROUNDING = 1e-12;
+
   /** Holds the table, so that it is read only once and only when needed. */
   private static final class Grade2 {
     static final ShippedNumbers TABLE =
@@ -40,11 +43,11 @@ public final class CoilTolerance {
    */
   public static double of(double meanDiameter, double wireDiameter) {
     double mean = Require.positive(meanDiameter, "mean diameter", "mm");
-    double index = mean / Require.positive(wireDiameter, "wire diameter", "mm");
+    double index = (1 - ROUNDING) * mean / Require.positive(wireDiameter, "wire diameter", "mm");
     int column = index <= INDEX_STEPS[0] ? 1 : index <= INDEX_STEPS[1] ? 2 : 3;
     List<double[]> rows = Grade2.TABLE.rows();
     for (double[] row : rows) {
-      if (mean <= row[0]) {
+      if ((1 - ROUNDING) * mean <= row[0]) {
         return row[column];
       }
     }
