@@ -4,8 +4,6 @@ import coilwright.material.Catalogue;
 import coilwright.problem.Problem;
 import coilwright.problem.Purpose;
 import coilwright.report.Checked;
-import coilwright.report.CheckedJson;
-import coilwright.report.CheckedText;
 import coilwright.search.CompressionCheck;
 import java.io.IOException;
 import java.util.concurrent.Callable;
@@ -47,10 +45,9 @@ final class CheckCommand implements Callable<Integer> {
     result.refuseBadTarget(input);
     Catalogue catalogue = Catalogue.load();
     Problem problem = input.read(Purpose.CHECK, catalogue);
-    format.refuseUnitsToCome(problem.units());
     Checked checked = new Checked(problem, CompressionCheck.of(problem, catalogue));
-    result.deliver(
-        format.of(() -> CheckedText.of(checked), () -> CheckedJson.of(checked)), terminal);
+    result.deliver(format.of(checked, problem.units()), terminal);
+    format.remark(checked, terminal);
     return checked.check().holds() ? Status.FOUND : Status.NOTHING;
   }
 }

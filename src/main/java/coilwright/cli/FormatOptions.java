@@ -1,8 +1,8 @@
 package coilwright.cli;
 
 import coilwright.problem.UnitSystem;
+import coilwright.report.Result;
 import java.util.List;
-import java.util.function.Supplier;
 import picocli.CommandLine.Option;
 
 /** How a result is written. */
@@ -10,52 +10,57 @@ final class FormatOptions {
 
   @Option(
       names = "--format",
-      paramLabel = "text|json",
+      paramLabel = "text|json|csv",
       defaultValue = "text",
       converter = FormatConverter.class,
-      description = "text (the default) or json.")
+      description = "text (the default), json or csv.")
   private String format;
 
   @Option(
       names = "--units",
-      paramLabel = "metric",
+      paramLabel = "metric|inch",
       converter = UnitsConverter.class,
-      description = "Units of text, over the file's units.")
+      description = "Units of text and csv, over the file's units; json is always metric.")
   private UnitSystem units;
-
-  /**
-   * Refuses text in units that text cannot show yet.
-   *
-   * @param asked the units the problem file asks for
-   */
-  void refuseUnitsToCome(UnitSystem asked) {
-    if (units == null && asked == UnitSystem.INCH && format.equals("text")) {
-      throw Refusal.usage(
-          "coilwright: text in inch units is not available yet; add --units metric or --format json");
-    }
-  }
 
   /**
    * The result in the format asked for, safe to print.
    *
-   * @param text writes it as text
-   * @param json writes it as JSON
+   * @param result the result
+   * @param usual the units where none are asked for
    */
-  String of(Supplier<String> text, Supplier<String> json) {
-    return format.equals("json") ? PlainText.json(json.get()) : PlainText.of(text.get());
+  String of(Result result, UnitSystem usual) {
+    UnitSystem shown = units == null ? usual : units;
+    return switch (format) {
+      case "json" -> PlainText.json(result.json());
+      case "csv" -> PlainText.of(result.csv(shown));
+      default -> PlainText.of(result.text(shown));
+    };
+  }
+
+  /**
+   * Says on standard error what CSV has no room for.
+   *
+   * @param result the result
+   * @param terminal whose standard error is meant
+   */
+  void remark(Result result, Terminal terminal) {
+    if (format.equals("csv")) {
+      result.remarks().forEach(remark -> terminal.complain("note: " + remark + "\n"));
+    }
   }
 
   /** Reads {@code --format}. */
   static final class FormatConverter extends WordConverter<String> {
     FormatConverter() {
-      super(List.of("text", "json"), word -> word, "csv");
+      super(List.of("text", "json", "csv"), word -> word);
     }
   }
 
   /** Reads {@code --units}. */
   static final class UnitsConverter extends WordConverter<UnitSystem> {
     UnitsConverter() {
-      super(List.of(UnitSystem.METRIC), UnitSystem::id, UnitSystem.INCH.id());
+      super(List.of(UnitSystem.values()), UnitSystem::id);
     }
   }
 }

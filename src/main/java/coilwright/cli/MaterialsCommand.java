@@ -1,6 +1,7 @@
 package coilwright.cli;
 
 import coilwright.material.Catalogue;
+import coilwright.problem.UnitSystem;
 import coilwright.report.Grades;
 import coilwright.unit.Spelling;
 import java.io.IOException;
@@ -39,8 +40,7 @@ final class MaterialsCommand implements Callable<Integer> {
     result.refuseBadTarget();
     Catalogue catalogue = Catalogue.load();
     List<String> ids = wanted == null ? catalogue.gradeIds() : known(catalogue.gradeIds());
-    result.deliver(
-        format.of(() -> Grades.text(catalogue, ids), () -> Grades.json(catalogue, ids)), terminal);
+    result.deliver(format.of(new Grades(catalogue, ids), UnitSystem.METRIC), terminal);
     return Status.FOUND;
   }
 

@@ -6,8 +6,6 @@ import coilwright.problem.Purpose;
 import coilwright.problem.RankBy;
 import coilwright.rank.Order;
 import coilwright.report.Shortlist;
-import coilwright.report.ShortlistJson;
-import coilwright.report.ShortlistText;
 import coilwright.search.Answer;
 import coilwright.search.Candidate;
 import coilwright.search.CompressionSearch;
@@ -74,11 +72,10 @@ final class ShortlistCommand implements Callable<Integer> {
     result.refuseBadTarget(input);
     Catalogue catalogue = Catalogue.load();
     Problem asked = input.read(Purpose.SHORTLIST, catalogue);
-    format.refuseUnitsToCome(asked.units());
     RankBy by = rank == null ? asked.rankBy() : rank;
     Shortlist shortlist = shortlist(asked.ranked(by, top == null ? asked.top() : top), catalogue);
-    result.deliver(
-        format.of(() -> ShortlistText.of(shortlist), () -> ShortlistJson.of(shortlist)), terminal);
+    result.deliver(format.of(shortlist, asked.units()), terminal);
+    format.remark(shortlist, terminal);
     return shortlist.answer().feasible().isEmpty() ? Status.NOTHING : Status.FOUND;
   }
 

@@ -2,6 +2,7 @@ package coilwright.cli;
 
 import coilwright.material.Catalogue;
 import coilwright.material.WireSeries;
+import coilwright.problem.UnitSystem;
 import coilwright.report.Sizes;
 import java.io.IOException;
 import java.util.List;
@@ -40,9 +41,7 @@ final class WiresCommand implements Callable<Integer> {
     result.refuseBadTarget();
     Catalogue catalogue = Catalogue.load();
     List<WireSeries> series = wanted == null ? List.of(WireSeries.values()) : known();
-    result.deliver(
-        format.of(() -> Sizes.text(catalogue, series), () -> Sizes.json(catalogue, series)),
-        terminal);
+    result.deliver(format.of(new Sizes(catalogue, series), UnitSystem.METRIC), terminal);
     return Status.FOUND;
   }
 

@@ -41,20 +41,26 @@ final class BucklingBound implements Limit<CompressionState> {
   private static final int MOST_EVALUATIONS = 200;
 
   private final boolean atSolid;
+  private final Check check;
 
-  BucklingBound(boolean atSolid) {
+  /**
+   * A bound.
+   *
+   * @param atSolid whether it is held at solid, or else at the most compressed load
+   * @param overtravel whether there is an overtravel beyond the loads
+   */
+  BucklingBound(boolean atSolid, boolean overtravel) {
     this.atSolid = atSolid;
+    this.check = atSolid ? AT_SOLID : overtravel ? AT_OVERTRAVEL : AT_LOAD;
   }
 
   @Override
-  public LimitName name() {
-    return LimitName.BUCKLING;
+  public Check check() {
+    return check;
   }
 
   @Override
   public Finding judge(CompressionState state) {
-    boolean overtravel = state.duty().overtravel().isPresent();
-    Check check = atSolid ? AT_SOLID : overtravel ? AT_OVERTRAVEL : AT_LOAD;
     double critical = state.criticalDeflection();
     if (critical == Double.POSITIVE_INFINITY) {
       return Finding.cannotFail(check, Buckling.CITATION);

@@ -225,7 +225,8 @@ public final class CompressionLimits {
             || rule == BucklingRule.AT_SOLID
             || rule == BucklingRule.AT_LOAD_UNLESS_GUIDED && !problem.envelope().guides();
     if (judged) {
-      limits.add(new BucklingBound(rule == BucklingRule.AT_SOLID));
+      limits.add(
+          new BucklingBound(rule == BucklingRule.AT_SOLID, problem.overtravel().isPresent()));
     }
   }
 

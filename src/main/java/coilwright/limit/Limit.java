@@ -12,8 +12,13 @@ import coilwright.spring.State;
  */
 public interface Limit<S extends State> {
 
+  /** What the bound asks, apart from any spring: every finding's check. */
+  Check check();
+
   /** The limit's name. Two bounds of one limit share it. */
-  LimitName name();
+  default LimitName name() {
+    return check().limit();
+  }
 
   /**
    * Judges a spring.

@@ -40,8 +40,8 @@ final class NominalLoad implements Limit<CompressionState> {
   }
 
   @Override
-  public LimitName name() {
-    return LimitName.NOMINAL_LOAD;
+  public Check check() {
+    return CHECK;
   }
 
   @Override

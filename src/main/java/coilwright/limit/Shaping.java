@@ -1,6 +1,5 @@
 package coilwright.limit;
 
-import coilwright.problem.LimitName;
 import coilwright.spring.Family;
 import coilwright.spring.State;
 
@@ -14,8 +13,8 @@ import coilwright.spring.State;
 record Shaping<S extends State>(Limit<S> limit) implements Limit<S> {
 
   @Override
-  public LimitName name() {
-    return limit.name();
+  public Check check() {
+    return limit.check();
   }
 
   @Override

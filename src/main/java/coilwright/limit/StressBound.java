@@ -67,8 +67,8 @@ final class StressBound implements Limit<CompressionState> {
   }
 
   @Override
-  public LimitName name() {
-    return check.limit();
+  public Check check() {
+    return check;
   }
 
   @Override

@@ -1,6 +1,5 @@
 package coilwright.limit;
 
-import coilwright.problem.LimitName;
 import coilwright.source.Citation;
 import coilwright.spring.Family;
 import coilwright.spring.State;
@@ -42,11 +41,6 @@ record ValueLimit<S extends State>(
   static <S extends State> ValueLimit<S> fixed(
       Check check, ToDoubleFunction<S> value, double bound, Citation source, boolean straight) {
     return new ValueLimit<>(check, value, state -> bound, source, straight);
-  }
-
-  @Override
-  public LimitName name() {
-    return check.limit();
   }
 
   @Override

@@ -9,7 +9,7 @@ import java.io.IOException;
 import java.util.List;
 
 /** A checked spring as JSON. */
-public final class CheckedJson {
+final class CheckedJson {
 
   private final Checked checked;
 
@@ -17,13 +17,8 @@ public final class CheckedJson {
     this.checked = checked;
   }
 
-  /**
-   * Writes a check.
-   *
-   * @param checked what it shows
-   * @return the document
-   */
-  public static String of(Checked checked) {
+  /** Writes a check. */
+  static String of(Checked checked) {
     return Json.document(new CheckedJson(checked)::writeTo);
   }
 
@@ -36,7 +31,7 @@ public final class CheckedJson {
     }
     json.flag("holds", checked.check().holds());
     json.object("spring", this::spring);
-    json.strings("warnings", Warnings.of(checked).stream().map(Warning::full).toList());
+    json.strings("warnings", Warnings.full(Warnings.of(checked)));
     json.strings("cautions", Cautions.LINES);
   }
 
@@ -60,18 +55,9 @@ public final class CheckedJson {
     }
   }
 
-  /**
-   * A grade without data for the wire has no strength, so nothing else can be said of the spring.
-   */
   private void outOfRange(Json json, Finding finding) throws IOException {
     Design design = checked.problem().design().orElseThrow();
-    json.string("material", design.material());
-    json.string("wire_size", design.wireSize().label());
-    json.string("ends", design.ends().id());
-    json.number("wire_diameter_mm", design.wireSize().diameter());
-    json.number("mean_diameter_mm", design.meanDiameter());
-    json.number("active_coils", design.activeCoils());
-    json.number("free_length_mm", design.freeLength());
+    json.fields(DesignFields.ALL, design);
     json.array("checks", list -> list.braces(body -> CandidateJson.check(body, finding)));
     json.string("limiting_check", finding.check().limit().text());
   }

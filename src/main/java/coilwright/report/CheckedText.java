@@ -11,23 +11,25 @@ import java.util.ArrayList;
 import java.util.List;
 
 /** A checked spring as text: every quantity and every check. */
-public final class CheckedText {
+final class CheckedText {
 
   private final Checked checked;
+  private final OutputUnits units;
   private final Lines lines = new Lines();
 
-  private CheckedText(Checked checked) {
+  private CheckedText(Checked checked, OutputUnits units) {
     this.checked = checked;
+    this.units = units;
   }
 
   /**
    * Writes a check.
    *
    * @param checked what it shows
-   * @return the text
+   * @param units the units shown
    */
-  public static String of(Checked checked) {
-    CheckedText report = new CheckedText(checked);
+  static String of(Checked checked, OutputUnits units) {
+    CheckedText report = new CheckedText(checked, units);
     report.head();
     if (checked.check().spring().isPresent()) {
       report.spring(checked.check().spring().get());
@@ -51,7 +53,7 @@ public final class CheckedText {
     lines.line(verdict());
     lines.line("");
     lines.line("Understood");
-    lines.block(Understood.of(checked.problem(), List.of(checked.check().grade())));
+    lines.block(Understood.of(checked.problem(), List.of(checked.check().grade()), units));
     lines.line("");
   }
 
@@ -78,21 +80,21 @@ public final class CheckedText {
             + state.wire().evidence().word());
     TextTable table = new TextTable("lrl");
     for (Quantity<CompressionState> quantity : CompressionQuantities.SPRING) {
-      table.row(
-          quantity.label(),
-          quantity.text(state, OutputUnits.METRIC),
-          OutputUnits.METRIC.symbol(quantity.dimension()));
+      row(table, quantity, state);
     }
-    table.row("outside diameter at solid", Numbers.fixed(state.outsideDiameterAtSolid(), 3), "mm");
-    double critical = state.criticalDeflection();
-    if (Double.isInfinite(critical)) {
-      table.row("critical deflection", "none", "cannot buckle");
+    row(table, CompressionQuantities.OUTSIDE_DIAMETER_AT_SOLID, state);
+    if (Double.isInfinite(state.criticalDeflection())) {
+      table.row(CompressionQuantities.CRITICAL_DEFLECTION.label(), "none", "cannot buckle");
     } else {
-      table.row("critical deflection", Numbers.fixed(critical, 2), "mm");
+      row(table, CompressionQuantities.CRITICAL_DEFLECTION, state);
     }
     lines.table(table);
     lines.line("");
     loads(state);
+  }
+
+  private void row(TextTable table, Quantity<CompressionState> quantity, CompressionState state) {
+    table.row(quantity.label(), quantity.text(state, units), units.symbol(quantity.dimension()));
   }
 
   private void loads(CompressionState state) {
@@ -100,7 +102,7 @@ public final class CheckedText {
     TextTable table = new TextTable("lrrrrr");
     List<String> head = new ArrayList<>(List.of(""));
     for (Quantity<LoadState> quantity : CompressionQuantities.LOAD) {
-      head.add(quantity.label() + " " + OutputUnits.METRIC.symbol(quantity.dimension()));
+      head.add(quantity.label() + " " + units.symbol(quantity.dimension()));
     }
     table.row(head.toArray(String[]::new));
     for (int i = 0; i < state.loads().size(); i++) {
@@ -112,10 +114,10 @@ public final class CheckedText {
     lines.line("");
   }
 
-  private static String[] cells(String name, LoadState load) {
+  private String[] cells(String name, LoadState load) {
     List<String> cells = new ArrayList<>(List.of(name));
     for (Quantity<LoadState> quantity : CompressionQuantities.LOAD) {
-      cells.add(quantity.text(load, OutputUnits.METRIC));
+      cells.add(quantity.text(load, units));
     }
     return cells.toArray(String[]::new);
   }
@@ -133,7 +135,7 @@ public final class CheckedText {
           number(finding, finding.value()),
           !finding.canFail() ? "" : finding.check().side() == Side.MAX ? "<=" : ">=",
           number(finding, finding.bound()),
-          finding.canFail() ? OutputUnits.METRIC.symbol(finding.check().dimension()) : "",
+          finding.canFail() ? units.symbol(finding.check().dimension()) : "",
           finding.hasMargin() ? Numbers.margin(finding.margin()) : "-",
           "[" + (sources.indexOf(finding.source().text()) + 1) + "]",
           finding.check().definition());
@@ -145,10 +147,9 @@ public final class CheckedText {
     lines.line("");
   }
 
-  private static String number(Finding finding, double value) {
+  private String number(Finding finding, double value) {
     Dimension dimension = finding.check().dimension();
-    return Numbers.fixed(
-        OutputUnits.METRIC.convert(dimension, value), dimension == Dimension.STRESS ? 1 : 2);
+    return units.fixed(dimension, value, dimension == Dimension.STRESS ? 1 : 2);
   }
 
   private void cost(Cost cost) {

@@ -66,14 +66,22 @@ final class CompressionQuantities {
               1,
               LoadState::correctedShearStress));
 
+  /** The outside diameter grown by compression. */
+  static final Quantity<CompressionState> OUTSIDE_DIAMETER_AT_SOLID =
+      length(
+          "outside_diameter_at_solid",
+          "outside diameter at solid",
+          3,
+          CompressionState::outsideDiameterAtSolid);
+
+  /** The deflection at which it would buckle; infinite where it cannot. */
+  static final Quantity<CompressionState> CRITICAL_DEFLECTION =
+      length("critical_deflection", "critical deflection", 2, CompressionState::criticalDeflection);
+
   private CompressionQuantities() {}
 
-  private static Quantity<CompressionState> of(
-      String stem,
-      String label,
-      Dimension dimension,
-      int decimals,
-      ToDoubleFunction<CompressionState> value) {
+  static <T> Quantity<T> of(
+      String stem, String label, Dimension dimension, int decimals, ToDoubleFunction<T> value) {
     return new Quantity<>(stem, label, dimension, decimals, value);
   }
 
@@ -82,14 +90,23 @@ final class CompressionQuantities {
     return of(stem, label, Dimension.LENGTH, decimals, value);
   }
 
-  private static Quantity<CompressionState> number(
-      String stem, String label, int decimals, ToDoubleFunction<CompressionState> value) {
+  static <T> Quantity<T> number(
+      String stem, String label, int decimals, ToDoubleFunction<T> value) {
     return of(stem, label, Dimension.NUMBER, decimals, value);
   }
 
   /** One of {@link #SPRING}, by the stem of its key. */
   static Quantity<CompressionState> of(String stem) {
-    for (Quantity<CompressionState> quantity : SPRING) {
+    return of(SPRING, stem);
+  }
+
+  /** One of {@link #LOAD}, by the stem of its key. */
+  static Quantity<LoadState> ofLoad(String stem) {
+    return of(LOAD, stem);
+  }
+
+  private static <T> Quantity<T> of(List<Quantity<T>> all, String stem) {
+    for (Quantity<T> quantity : all) {
       if (quantity.stem().equals(stem)) {
         return quantity;
       }

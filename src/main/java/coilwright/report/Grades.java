@@ -6,101 +6,50 @@ import coilwright.material.Wire;
 import coilwright.material.WireGrade;
 import coilwright.material.WireSeries;
 import coilwright.material.WireSize;
-import coilwright.unit.Dimension;
+import coilwright.problem.UnitSystem;
 import java.io.IOException;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
+import java.util.function.Function;
 
-/** The wire grades of the catalogue, as text and as JSON. */
-public final class Grades {
-
-  private static final int SIZES_IN_TEXT = 7;
+/** Wire grades of the catalogue. */
+public final class Grades implements Result {
 
   private final Catalogue catalogue;
   private final List<String> ids;
 
-  private Grades(Catalogue catalogue, List<String> ids) {
+  /**
+   * Grades to show.
+   *
+   * @param catalogue the catalogue
+   * @param ids the grades wanted, in order
+   */
+  public Grades(Catalogue catalogue, List<String> ids) {
     this.catalogue = catalogue;
     this.ids = List.copyOf(ids);
   }
 
-  /**
-   * The grades as text: what they are, their properties over a spread of sizes, and the sources.
-   *
-   * @param catalogue the catalogue
-   * @param ids the grades wanted, in order
-   * @return the text
-   */
-  public static String text(Catalogue catalogue, List<String> ids) {
-    return new Grades(catalogue, ids).text();
-  }
-
-  /**
-   * The grades as JSON: the same, over every size of their usual series.
-   *
-   * @param catalogue the catalogue
-   * @param ids the grades wanted, in order
-   * @return the document
-   */
-  public static String json(Catalogue catalogue, List<String> ids) {
-    Grades grades = new Grades(catalogue, ids);
-    return Json.document(
-        json -> {
-          json.count("format", ShortlistJson.FORMAT);
-          json.array("materials", grades::materials);
-        });
-  }
-
-  private String text() {
+  /** What they are, their properties over a spread of sizes, and the sources. */
+  @Override
+  public String text(UnitSystem units) {
+    OutputUnits shown = OutputUnits.ofText(units);
     StringBuilder text = new StringBuilder();
     for (String id : ids) {
-      text.append(text.isEmpty() ? "" : "\n").append(block(catalogue.grade(id)));
+      WireGrade grade = catalogue.grade(id);
+      text.append(text.isEmpty() ? "" : "\n").append(GradeText.of(grade, wires(grade), shown));
     }
     return text.toString();
   }
 
-  private String block(WireGrade grade) {
-    TextTable facts = new TextTable("ll");
-    facts.row("standard", grade.standard() + ", " + grade.condition());
-    facts.row(
-        "supply", grade.supply().word() + (grade.common() ? ", tried when no grade is named" : ""));
-    facts.row("class", grade.allowableClass().words());
-    facts.row(
-        "diameters",
-        (grade.diameters().min() > 0
-                ? Numbers.fixed(grade.diameters().min(), 3) + " to "
-                : "up to ")
-            + Numbers.fixed(grade.diameters().max(), 3)
-            + " mm; series "
-            + String.join(", ", grade.usualSeries().stream().map(WireSeries::id).toList()));
-    facts.row("density", Numbers.fixed(grade.density(), 0) + " kg/m^3");
-    facts.row(
-        "service",
-        grade.maxServiceTemperature().isPresent()
-            ? "up to " + Numbers.fixed(grade.maxServiceTemperature().getAsDouble(), 0) + " degC"
-            : "no temperature cited");
-    facts.row("cost index", Numbers.fixed(grade.costIndex(), 1) + " (hard-drawn is 1.0)");
-    for (GradeSource source : grade.sources()) {
-      facts.row(
-          "source", source.what() + ": " + source.text() + " (" + source.evidence().word() + ")");
-    }
-    return grade.id() + "  " + grade.name() + "\n" + facts.text("  ") + properties(grade);
-  }
-
-  private String properties(WireGrade grade) {
-    TextTable table = new TextTable("lrrrrrl");
-    table.row("size", "d mm", "+- mm", "Rm MPa", "G MPa", "E MPa", "data");
-    for (Wire wire : spread(wires(grade))) {
-      table.row(
-          Wires.size(wire),
-          Numbers.fixed(wire.diameter(), 3),
-          Numbers.fixed(wire.diameterTolerance(), 4),
-          Numbers.fixed(wire.tensileStrength(), 0),
-          Numbers.fixed(wire.shearModulus(), 0),
-          Numbers.fixed(wire.elasticModulus(), 0),
-          wire.evidence().word());
-    }
-    return table.text("  ");
+  /** The same, over every size of their usual series. */
+  @Override
+  public String json() {
+    return Json.document(
+        json -> {
+          json.count("format", ShortlistJson.FORMAT);
+          json.array("materials", this::materials);
+        });
   }
 
   private List<Wire> wires(WireGrade grade) {
@@ -115,17 +64,6 @@ public final class Grades {
     return wires;
   }
 
-  private static List<Wire> spread(List<Wire> wires) {
-    if (wires.size() <= SIZES_IN_TEXT) {
-      return wires;
-    }
-    List<Wire> spread = new ArrayList<>();
-    for (int i = 0; i < SIZES_IN_TEXT; i++) {
-      spread.add(wires.get(i * (wires.size() - 1) / (SIZES_IN_TEXT - 1)));
-    }
-    return spread;
-  }
-
   private void materials(Json json) throws IOException {
     for (String id : ids) {
       json.braces(body -> material(body, catalogue.grade(id)));
@@ -133,21 +71,8 @@ public final class Grades {
   }
 
   private void material(Json json, WireGrade grade) throws IOException {
-    json.string("id", grade.id());
-    json.string("name", grade.name());
-    json.string("standard", grade.standard());
-    json.string("condition", grade.condition());
-    json.string("supply", grade.supply().word());
-    json.flag("common", grade.common());
-    json.string("allowable_class", grade.allowableClass().words());
-    json.number("min_wire_diameter_mm", grade.diameters().min());
-    json.number("max_wire_diameter_mm", grade.diameters().max());
-    json.number("density_kg_per_m3", grade.density());
-    if (grade.maxServiceTemperature().isPresent()) {
-      json.number("max_service_temperature_degc", grade.maxServiceTemperature().getAsDouble());
-    }
-    json.number("cost_index", grade.costIndex());
-    json.strings("usual_series", grade.usualSeries().stream().map(WireSeries::id).toList());
+    json.fields(GradeFields.GRADE, grade);
+    json.strings("usual_series", series(grade));
     json.array("wires", list -> wires(list, grade));
     json.array("sources", list -> sources(list, grade));
   }
@@ -156,30 +81,59 @@ public final class Grades {
     for (Wire wire : wires(grade)) {
       json.braces(
           body -> {
-            body.string("wire_series", wire.size().series().orElseThrow().id());
-            body.string("wire_size", wire.size().label());
-            body.number("wire_diameter_mm", wire.diameter());
-            body.number("wire_diameter_tolerance_mm", wire.diameterTolerance());
-            body.number("tensile_strength_mpa", plain(wire.tensileStrength()));
-            body.number("shear_modulus_mpa", plain(wire.shearModulus()));
-            body.number("elastic_modulus_mpa", plain(wire.elasticModulus()));
-            body.string("data", wire.evidence().word());
+            body.fields(GradeFields.SIZE, wire.size());
+            body.fields(GradeFields.WIRE, wire);
           });
     }
-  }
-
-  private static double plain(double stress) {
-    return OutputUnits.plain(Dimension.STRESS, stress);
   }
 
   private static void sources(Json json, WireGrade grade) throws IOException {
     for (GradeSource source : grade.sources()) {
-      json.braces(
-          body -> {
-            body.string("what", source.what());
-            body.string("source", source.text());
-            body.string("data", source.evidence().word());
-          });
+      json.braces(body -> body.fields(GradeFields.SOURCE, source));
     }
+  }
+
+  /**
+   * A row of CSV.
+   *
+   * @param grade the grade
+   * @param wire one of its wires; empty in the only row of a grade that is stocked in no series
+   */
+  private record Row(WireGrade grade, Optional<Wire> wire) {}
+
+  /** One row a wire, with what its grade is in every row. */
+  @Override
+  public String csv(UnitSystem units) {
+    List<Row> rows = new ArrayList<>();
+    for (String id : ids) {
+      WireGrade grade = catalogue.grade(id);
+      List<Wire> wires = wires(grade);
+      wires.forEach(wire -> rows.add(new Row(grade, Optional.of(wire))));
+      if (wires.isEmpty()) {
+        rows.add(new Row(grade, Optional.empty()));
+      }
+    }
+    Function<Row, Optional<WireGrade>> grade = row -> Optional.of(row.grade());
+    return new Columns<Row>(OutputUnits.ofData(units))
+        .addPart("", GradeFields.GRADE, grade)
+        .addPart("", List.of(GradeFields.list("usual_series", Grades::series)), grade)
+        .addPart("", GradeFields.SIZE, row -> row.wire().map(Wire::size))
+        .addPart("", GradeFields.WIRE, Row::wire)
+        .addPart("", List.of(GradeFields.list("sources", Grades::sources)), grade)
+        .table(rows);
+  }
+
+  /** Ids of the series that a grade is usually stocked in. */
+  static List<String> series(WireGrade grade) {
+    return grade.usualSeries().stream().map(WireSeries::id).toList();
+  }
+
+  /** Where its data come from, each kind in a line. */
+  static List<String> sources(WireGrade grade) {
+    List<String> sources = new ArrayList<>();
+    for (GradeSource source : grade.sources()) {
+      sources.add(source.what() + ": " + source.text() + " (" + source.evidence().word() + ")");
+    }
+    return sources;
   }
 }

@@ -122,6 +122,13 @@ final class Json {
     generator.writeBooleanField(key, value);
   }
 
+  /** Every field of a subject, under its own key. */
+  <T> void fields(List<? extends Field<? super T>> fields, T subject) throws IOException {
+    for (Field<? super T> field : fields) {
+      field.writeTo(this, subject);
+    }
+  }
+
   /** A key with null. */
   void nothing(String key) throws IOException {
     generator.writeNullField(key);

@@ -1,22 +1,38 @@
 package coilwright.report;
 
+import coilwright.problem.UnitSystem;
 import coilwright.unit.Dimension;
 import coilwright.unit.Unit;
-import java.util.EnumMap;
-import java.util.Map;
-import java.util.function.Function;
 
 /** The unit in which each kind of quantity is written, and how a key names it. */
 enum OutputUnits {
-  /** Millimetre, newton, gram: all JSON, and metric text. */
-  METRIC(OutputUnits::metric);
+  /** Millimetre, newton, gram: all JSON, and metric text and CSV. */
+  METRIC,
+  /** Inch, pound-force, ksi, ounce: inch text. */
+  INCH,
+  /** Inch, pound-force, psi, pound: inch CSV. */
+  INCH_DATA;
 
-  private final Map<Dimension, Unit> units = new EnumMap<>(Dimension.class);
+  private final Unit[] units = new Unit[Dimension.values().length];
 
-  OutputUnits(Function<Dimension, String> symbols) {
-    for (Dimension dimension : Dimension.values()) {
-      units.put(dimension, dimension.unit(symbols.apply(dimension)).orElseThrow());
+  /** The units of text. */
+  static OutputUnits ofText(UnitSystem system) {
+    return system == UnitSystem.INCH ? INCH : METRIC;
+  }
+
+  /** The units of CSV. */
+  static OutputUnits ofData(UnitSystem system) {
+    return system == UnitSystem.INCH ? INCH_DATA : METRIC;
+  }
+
+  /** Units are looked up when first needed: a run needs few. */
+  private Unit unit(Dimension dimension) {
+    Unit known = units[dimension.ordinal()];
+    if (known == null) {
+      known = dimension.unit(this == METRIC ? metric(dimension) : inch(dimension)).orElseThrow();
+      units[dimension.ordinal()] = known;
     }
+    return known;
   }
 
   private static String metric(Dimension dimension) {
@@ -34,40 +50,90 @@ enum OutputUnits {
     };
   }
 
+  private String inch(Dimension dimension) {
+    return switch (dimension) {
+      case LENGTH -> "in";
+      case FORCE -> "lbf";
+      case RATE -> "lbf/in";
+      case STRESS -> this == INCH ? "ksi" : "psi";
+      case DENSITY -> "lb/in^3";
+      case MASS -> this == INCH ? "oz" : "lb";
+      default -> metric(dimension);
+    };
+  }
+
   /** How the unit of a dimension is written; empty for plain numbers. */
   String symbol(Dimension dimension) {
-    return units.get(dimension).symbol();
+    return unit(dimension).symbol();
   }
 
   /** From the dimension's inner unit to the one written. */
   double convert(Dimension dimension, double value) {
-    return units.get(dimension).fromInner(value);
+    return unit(dimension).fromInner(value);
   }
 
-  /** What a key ends in: "_n_per_mm"; empty for plain numbers and shares. */
-  static String suffix(Dimension dimension) {
+  /** A number with as many decimals as show the same step of it, near enough, as in metric text. */
+  String fixed(Dimension dimension, double value, int metricDecimals) {
+    return Numbers.fixed(convert(dimension, value), metricDecimals + finer(dimension));
+  }
+
+  /** The same, trailing zeros dropped. */
+  String number(Dimension dimension, double value, int metricDecimals) {
+    return Numbers.brief(convert(dimension, value), Math.max(0, metricDecimals + finer(dimension)));
+  }
+
+  /** The same with its unit: "0.063 in". */
+  String brief(Dimension dimension, double value, int metricDecimals) {
+    String number = number(dimension, value, metricDecimals);
+    String symbol = symbol(dimension);
+    return symbol.isEmpty() ? number : number + " " + symbol;
+  }
+
+  private int finer(Dimension dimension) {
+    if (this == METRIC) {
+      return 0;
+    }
     return switch (dimension) {
-      case LENGTH -> "_mm";
-      case FORCE -> "_n";
-      case RATE -> "_n_per_mm";
-      case STRESS -> "_mpa";
-      case ANGLE -> "_deg";
-      case FREQUENCY -> "_hz";
-      case DENSITY -> "_kg_per_m3";
-      case MASS -> "_g";
-      case SHARE, NUMBER -> "";
+      case LENGTH, FORCE, STRESS -> 1;
+      case RATE -> -1;
+      case MASS -> 2;
+      case DENSITY -> 3;
+      default -> 0;
     };
   }
 
-  /** A value as JSON writes it: in the unit its key names; shares and numbers plain. */
-  static double plain(Dimension dimension, double value) {
-    return dimension == Dimension.SHARE ? value : METRIC.convert(dimension, value);
+  /** What a key ends in: "_lbf_per_in"; empty for plain numbers and shares. */
+  String keySuffix(Dimension dimension) {
+    return switch (dimension) {
+      case SHARE, NUMBER -> "";
+      case ANGLE -> "_deg";
+      case FREQUENCY -> "_hz";
+      case LENGTH -> this == METRIC ? "_mm" : "_in";
+      case FORCE -> this == METRIC ? "_n" : "_lbf";
+      case RATE -> this == METRIC ? "_n_per_mm" : "_lbf_per_in";
+      case STRESS -> this == METRIC ? "_mpa" : "_psi";
+      case DENSITY -> this == METRIC ? "_kg_per_m3" : "_lb_per_in3";
+      case MASS -> this == METRIC ? "_g" : "_lb";
+    };
   }
 
-  /** The unit that a JSON value is in, as a check names it; "-" for plain numbers and shares. */
-  static String plainSymbol(Dimension dimension) {
-    return dimension == Dimension.SHARE || dimension == Dimension.NUMBER
-        ? "-"
-        : METRIC.symbol(dimension);
+  /** A value as its key names it; shares and numbers plain. */
+  double data(Dimension dimension, double value) {
+    return dimension == Dimension.SHARE ? value : convert(dimension, value);
+  }
+
+  /** The unit that such a value is in, as a check names it; "-" for plain numbers and shares. */
+  String dataSymbol(Dimension dimension) {
+    return dimension == Dimension.SHARE || dimension == Dimension.NUMBER ? "-" : symbol(dimension);
+  }
+
+  /** What a JSON key ends in. */
+  static String suffix(Dimension dimension) {
+    return METRIC.keySuffix(dimension);
+  }
+
+  /** A value as JSON writes it. */
+  static double plain(Dimension dimension, double value) {
+    return METRIC.data(dimension, value);
   }
 }

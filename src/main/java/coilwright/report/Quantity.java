@@ -1,6 +1,7 @@
 package coilwright.report;
 
 import coilwright.unit.Dimension;
+import java.io.IOException;
 import java.util.function.ToDoubleFunction;
 
 /**
@@ -10,24 +11,31 @@ import java.util.function.ToDoubleFunction;
  * @param label the words in text
  * @param dimension what kind of quantity it is
  * @param decimals how many decimals text shows in metric units
- * @param of the number, in the dimension's inner unit; NaN where it does not apply
+ * @param of the number, in the dimension's inner unit; NaN or infinite where it does not apply
  * @param <T> what has the number
  */
 record Quantity<T>(
-    String stem, String label, Dimension dimension, int decimals, ToDoubleFunction<T> of) {
+    String stem, String label, Dimension dimension, int decimals, ToDoubleFunction<T> of)
+    implements Field<T> {
 
-  /** The JSON key. */
-  String key() {
-    return stem + OutputUnits.suffix(dimension);
+  @Override
+  public String key(OutputUnits units) {
+    return stem + units.keySuffix(dimension);
   }
 
-  /** The value as JSON writes it. */
-  double plain(T subject) {
-    return OutputUnits.plain(dimension, of.applyAsDouble(subject));
+  @Override
+  public void writeTo(Json json, T subject) throws IOException {
+    json.number(
+        key(OutputUnits.METRIC), OutputUnits.METRIC.data(dimension, of.applyAsDouble(subject)));
+  }
+
+  @Override
+  public String cell(T subject, OutputUnits units) {
+    return Csv.number(units.data(dimension, of.applyAsDouble(subject)));
   }
 
   /** The value as text writes it, without its unit. */
   String text(T subject, OutputUnits units) {
-    return Numbers.fixed(units.convert(dimension, of.applyAsDouble(subject)), decimals);
+    return units.fixed(dimension, of.applyAsDouble(subject), decimals);
   }
 }

@@ -3,10 +3,12 @@ package coilwright.report;
 import coilwright.material.Wire;
 import coilwright.material.WireGrade;
 import coilwright.problem.Problem;
+import coilwright.problem.UnitSystem;
 import coilwright.search.Answer;
 import coilwright.search.Candidate;
 import coilwright.search.WireChoice;
 import coilwright.spring.CompressionState;
+import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -25,11 +27,36 @@ public record Shortlist(
     WireChoice choice,
     Answer<CompressionState> answer,
     boolean everyCount,
-    List<Candidate<CompressionState>> shown) {
+    List<Candidate<CompressionState>> shown)
+    implements Result {
 
   /** Copies the list. */
   public Shortlist {
     shown = List.copyOf(shown);
+  }
+
+  @Override
+  public String text(UnitSystem units) {
+    return ShortlistText.of(this, OutputUnits.ofText(units));
+  }
+
+  @Override
+  public String json() {
+    return ShortlistJson.of(this);
+  }
+
+  @Override
+  public String csv(UnitSystem units) {
+    return ShortlistCsv.of(this, OutputUnits.ofData(units));
+  }
+
+  @Override
+  public List<String> remarks() {
+    List<String> remarks = new ArrayList<>(Warnings.full(Warnings.of(this)));
+    if (answer.feasible().isEmpty()) {
+      remarks.add("no spring meets the problem; --format text says why");
+    }
+    return remarks;
   }
 
   /** The grades tried, in order. Told apart by their id: comparing whole grades is slow work. */

@@ -8,7 +8,7 @@ import java.io.IOException;
 import java.util.Map;
 
 /** A shortlist as JSON. */
-public final class ShortlistJson {
+final class ShortlistJson {
 
   /** The version of the output: raised when a meaning changes. */
   static final int FORMAT = 1;
@@ -19,13 +19,8 @@ public final class ShortlistJson {
     this.shortlist = shortlist;
   }
 
-  /**
-   * Writes a shortlist.
-   *
-   * @param shortlist what it shows
-   * @return the document
-   */
-  public static String of(Shortlist shortlist) {
+  /** Writes a shortlist. */
+  static String of(Shortlist shortlist) {
     return Json.document(new ShortlistJson(shortlist)::writeTo);
   }
 
@@ -37,7 +32,7 @@ public final class ShortlistJson {
     json.array("candidates", this::candidates);
     json.array("rejected", this::rejected);
     json.array("conflicts", this::conflicts);
-    json.strings("warnings", Warnings.of(shortlist).stream().map(Warning::full).toList());
+    json.strings("warnings", Warnings.full(Warnings.of(shortlist)));
     json.strings("cautions", Cautions.LINES);
   }
 

@@ -13,7 +13,7 @@ import java.util.Map;
 import java.util.OptionalDouble;
 
 /** A shortlist as text. */
-public final class ShortlistText {
+final class ShortlistText {
 
   private static final int NEAREST = 5;
 
@@ -30,6 +30,7 @@ public final class ShortlistText {
           column("cost", "cost_index"));
 
   private final Shortlist shortlist;
+  private final OutputUnits units;
   private final Lines lines = new Lines();
 
   /** A number of the spring under a short head. */
@@ -39,18 +40,19 @@ public final class ShortlistText {
     return new Column(head, CompressionQuantities.of(stem));
   }
 
-  private ShortlistText(Shortlist shortlist) {
+  private ShortlistText(Shortlist shortlist, OutputUnits units) {
     this.shortlist = shortlist;
+    this.units = units;
   }
 
   /**
    * Writes a shortlist.
    *
    * @param shortlist what it shows
-   * @return the text
+   * @param units the units shown
    */
-  public static String of(Shortlist shortlist) {
-    ShortlistText report = new ShortlistText(shortlist);
+  static String of(Shortlist shortlist, OutputUnits units) {
+    ShortlistText report = new ShortlistText(shortlist, units);
     report.head();
     if (shortlist.answer().feasible().isEmpty()) {
       report.nothing();
@@ -66,7 +68,7 @@ public final class ShortlistText {
     lines.line(Understood.title(shortlist.problem()));
     lines.line("");
     lines.line("Understood");
-    lines.block(Understood.of(shortlist.problem(), shortlist.grades()));
+    lines.block(Understood.of(shortlist.problem(), shortlist.grades(), units));
     lines.line("");
   }
 
@@ -97,14 +99,14 @@ public final class ShortlistText {
 
   private void heads(TextTable table) {
     List<String> names = new ArrayList<>(List.of("#", "material", "wire", "ends"));
-    List<String> units = new ArrayList<>(List.of("", "", "", ""));
+    List<String> symbols = new ArrayList<>(List.of("", "", "", ""));
     for (Column column : COLUMNS) {
       names.add(column.head());
-      units.add(OutputUnits.METRIC.symbol(column.quantity().dimension()));
+      symbols.add(units.symbol(column.quantity().dimension()));
     }
     names.addAll(List.of("stress", "limited by"));
-    units.addAll(List.of("margin", ""));
-    table.row(names.toArray(String[]::new)).row(units.toArray(String[]::new));
+    symbols.addAll(List.of("margin", ""));
+    table.row(names.toArray(String[]::new)).row(symbols.toArray(String[]::new));
   }
 
   private String each() {
@@ -139,16 +141,16 @@ public final class ShortlistText {
     };
   }
 
-  private static void row(TextTable table, int rank, Candidate<CompressionState> candidate) {
+  private void row(TextTable table, int rank, Candidate<CompressionState> candidate) {
     Wire wire = candidate.state().wire();
     String memory = wire.evidence() == Evidence.MEMORY ? " (memory)" : "";
     List<String> cells = new ArrayList<>();
     cells.add(Integer.toString(rank));
     cells.add(wire.grade().id() + memory);
-    cells.add(Wires.sizeWithDiameter(wire));
+    cells.add(Wires.sizeWithDiameter(wire, units));
     cells.add(candidate.state().endForm());
     for (Column column : COLUMNS) {
-      cells.add(column.quantity().text(candidate.state(), OutputUnits.METRIC));
+      cells.add(column.quantity().text(candidate.state(), units));
     }
     OptionalDouble margin = candidate.leastMargin();
     cells.add(margin.isPresent() ? Numbers.margin(margin.getAsDouble()) : "-");
@@ -174,7 +176,7 @@ public final class ShortlistText {
     lines.line("Nearest, and what would have to change");
     for (WayOut way : nearest) {
       lines.line("  " + Reasons.of(way.conflict()));
-      lines.line("    " + way.text());
+      lines.line("    " + way.text(units));
     }
     lines.line("");
   }

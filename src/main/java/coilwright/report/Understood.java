@@ -11,7 +11,9 @@ import coilwright.problem.Problem;
 import coilwright.problem.Requirement;
 import coilwright.problem.Tolerance;
 import coilwright.spring.EndType;
+import coilwright.spring.Rounding;
 import coilwright.spring.Seating;
+import coilwright.unit.Dimension;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
@@ -21,11 +23,13 @@ final class Understood {
 
   private final Problem problem;
   private final List<WireGrade> grades;
+  private final OutputUnits units;
   private final TextTable table = new TextTable("ll");
 
-  private Understood(Problem problem, List<WireGrade> grades) {
+  private Understood(Problem problem, List<WireGrade> grades, OutputUnits units) {
     this.problem = problem;
     this.grades = grades;
+    this.units = units;
   }
 
   /**
@@ -33,9 +37,10 @@ final class Understood {
    *
    * @param problem the problem
    * @param grades the grades tried, or the one checked
+   * @param units the units shown
    */
-  static String of(Problem problem, List<WireGrade> grades) {
-    Understood words = new Understood(problem, grades);
+  static String of(Problem problem, List<WireGrade> grades, OutputUnits units) {
+    Understood words = new Understood(problem, grades, units);
     words.loads();
     words.space(problem.envelope());
     if (problem.design().isEmpty()) {
@@ -53,15 +58,15 @@ final class Understood {
             ? "; stroke " + length(problem.facts().stroke().getAsDouble())
             : "";
     String shared = parallel > 1 ? ", shared by " + parallel + " springs side by side" : "";
-    List<String> loads = problem.facts().loads().stream().map(Understood::load).toList();
+    List<String> loads = problem.facts().loads().stream().map(this::load).toList();
     table.row("loads", String.join("; ", loads) + stroke + shared);
     if (problem.required().isPresent()) {
       Requirement required = problem.required().get();
       table.row(
           parallel > 1 ? "each spring" : "load line",
           "rate "
-              + Numbers.brief(required.rate(), 4)
-              + " N/mm, "
+              + units.brief(Dimension.RATE, required.rate(), 4)
+              + ", "
               + (required.freeLength().isPresent()
                   ? "free length " + length(required.freeLength().getAsDouble())
                   : "lengths as short as the limits allow")
@@ -73,10 +78,10 @@ final class Understood {
         .ifPresent(length -> table.row("overtravel", "to " + length(length) + ", no force asked"));
   }
 
-  private static String load(LoadAsked load) {
+  private String load(LoadAsked load) {
     List<String> words = new ArrayList<>();
-    load.force().ifPresent(force -> words.add(Numbers.brief(force, 3) + " N"));
-    load.tolerance().map(Understood::tolerance).ifPresent(words::add);
+    load.force().ifPresent(force -> words.add(units.brief(Dimension.FORCE, force, 3)));
+    load.tolerance().map(this::tolerance).ifPresent(words::add);
     load.length().ifPresent(length -> words.add("at " + length(length)));
     if (load.force().isEmpty()) {
       words.add("(force found)");
@@ -87,16 +92,17 @@ final class Understood {
     return String.join(" ", words);
   }
 
-  private static String tolerance(Tolerance tolerance) {
+  private String tolerance(Tolerance tolerance) {
     return "(+"
-        + Numbers.brief(tolerance.plus(), 3)
+        + units.number(Dimension.FORCE, tolerance.plus(), 3)
         + " -"
-        + Numbers.brief(tolerance.minus(), 3)
-        + " N accepted, not judged)";
+        + units.brief(Dimension.FORCE, tolerance.minus(), 3)
+        + " accepted, not judged)";
   }
 
-  private static String length(double value) {
-    return Numbers.brief(value, 3) + " mm";
+  /** With a digit more in inches, so that an inch file's lengths come back as they were typed. */
+  private String length(double value) {
+    return units.brief(Dimension.LENGTH, value, units == OutputUnits.METRIC ? 3 : 4);
   }
 
   private void space(Envelope space) {
@@ -116,7 +122,7 @@ final class Understood {
     table.row("space", words.isEmpty() ? "no bound given" : String.join(", ", words));
   }
 
-  private static void bound(List<String> words, String name, OptionalDouble value) {
+  private void bound(List<String> words, String name, OptionalDouble value) {
     value.ifPresent(given -> words.add(name + " " + length(given)));
   }
 
@@ -133,7 +139,7 @@ final class Understood {
       table.row("set", "removed: pressed solid once before use");
     }
     if (make.coating() > 0) {
-      table.row("coating", Numbers.brief(make.coating(), 4) + " mm thick");
+      table.row("coating", units.brief(Dimension.LENGTH, make.coating(), 4) + " thick");
     }
     table.row(
         "steps",
@@ -154,13 +160,14 @@ final class Understood {
         : String.join(", ", make.wireSeries().stream().map(WireSeries::id).toList());
   }
 
-  private static String step(double step, double small) {
+  private String step(double step, double small) {
     if (step == 0 && small == 0) {
       return "not rounded";
     }
+    String shown = units.brief(Dimension.LENGTH, step, 6);
     return step == small
-        ? Numbers.brief(step, 6) + " mm"
-        : Numbers.brief(step, 6) + " mm (a tenth below 5 mm mean diameter)";
+        ? shown
+        : shown + " (a tenth below " + length(Rounding.SMALL_BELOW) + " mean diameter)";
   }
 
   private void seats() {

@@ -27,6 +27,11 @@ final class Warnings {
     return shared(checked.problem(), checked.check().spring().stream().toList(), false);
   }
 
+  /** Each in a line, with the ids it concerns. */
+  static List<String> full(List<Warning> warnings) {
+    return warnings.stream().map(Warning::full).toList();
+  }
+
   private static Warning leftOut(String id, int sizes) {
     String many =
         sizes == 1

@@ -108,23 +108,23 @@ record WayOut(Conflict conflict, double coils, List<Finding> failing) {
   }
 
   /** "at 11 coils: stress at load 975 MPa, allowed 873 MPa". */
-  String text() {
+  String text(OutputUnits units) {
     if (Double.isInfinite(shortfall())) {
       return "at no coil count would changing the limits be enough";
     }
     String at = "at " + Numbers.brief(coils, 2) + " coils: ";
     return failing.isEmpty()
         ? at + "only rounding stands in the way; try finer steps"
-        : at + String.join("; ", failing.stream().map(WayOut::need).toList());
+        : at + String.join("; ", failing.stream().map(each -> need(each, units)).toList());
   }
 
-  private static String need(Finding finding) {
+  private static String need(Finding finding, OutputUnits units) {
     Dimension dimension = finding.check().dimension();
     return judged(finding.check().limit())
         + " "
-        + number(dimension, finding.value())
+        + number(units, dimension, finding.value())
         + (finding.check().side() == Side.MAX ? ", allowed " : ", needed ")
-        + number(dimension, finding.bound());
+        + number(units, dimension, finding.bound());
   }
 
   /** The number that a limit judges, where its name alone would mislead. */
@@ -137,10 +137,7 @@ record WayOut(Conflict conflict, double coils, List<Finding> failing) {
     };
   }
 
-  private static String number(Dimension dimension, double value) {
-    String unit = OutputUnits.METRIC.symbol(dimension);
-    int decimals = dimension == Dimension.STRESS ? 0 : 2;
-    String number = Numbers.brief(OutputUnits.METRIC.convert(dimension, value), decimals);
-    return unit.isEmpty() ? number : number + " " + unit;
+  private static String number(OutputUnits units, Dimension dimension, double value) {
+    return units.brief(dimension, value, dimension == Dimension.STRESS ? 0 : 2);
   }
 }

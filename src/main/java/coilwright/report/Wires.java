@@ -2,6 +2,7 @@ package coilwright.report;
 
 import coilwright.material.Wire;
 import coilwright.material.WireSeries;
+import coilwright.unit.Dimension;
 
 /** Wires in words. */
 final class Wires {
@@ -23,9 +24,12 @@ final class Wires {
   }
 
   /** The size with its diameter, where the size does not say it: "no. 24 = 1.397 mm". */
-  static String sizeWithDiameter(Wire wire) {
+  static String sizeWithDiameter(Wire wire, OutputUnits units) {
     String size = size(wire);
-    return size.endsWith(" mm") ? size : size + " = " + Numbers.fixed(wire.diameter(), 3) + " mm";
+    String unit = " " + units.symbol(Dimension.LENGTH);
+    return size.endsWith(unit)
+        ? size
+        : size + " = " + units.fixed(Dimension.LENGTH, wire.diameter(), 3) + unit;
   }
 
   /** Size and material: "1.40 mm music-wire". */

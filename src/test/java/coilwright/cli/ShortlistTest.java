@@ -42,10 +42,12 @@ class ShortlistTest {
   }
 
   @Test
-  void textInInchUnitsIsRefusedUntilItCanBeShown() {
+  void theFilesUnitsHoldUnlessTheOptionSaysOtherwise() {
     String inch = "units: inch\n" + Run.VALVE;
-    piped(inch).refused("inch units is not available yet; add --units metric or --format json");
-    assertThat(piped(inch, "--units", "metric").found(Status.FOUND).out()).contains("load line");
+    assertThat(piped(inch).found(Status.FOUND).out()).contains("bore 0.70866 in");
+    assertThat(piped(inch, "--units", "metric").found(Status.FOUND).out()).contains("bore 18 mm");
+    assertThat(piped(Run.VALVE, "--units=inch").found(Status.FOUND).out())
+        .contains("bore 0.70866 in");
     assertThat(piped(inch, "--format", "json").found(Status.FOUND).json().path("format").asInt())
         .isEqualTo(1);
   }

@@ -19,7 +19,7 @@ class StreamsTest {
 
   @Test
   void sameBytesTwice() {
-    for (String format : new String[] {"text", "json"}) {
+    for (String format : new String[] {"text", "json", "csv"}) {
       String[] args = {"shortlist", "-", "--all", "--format", format};
       assertThat(Run.reading(Run.VALVE, args).bytes())
           .isEqualTo(Run.reading(Run.VALVE, args).bytes());

@@ -1,0 +1,30 @@
+package coilwright.report;
+
+import coilwright.problem.Design;
+import coilwright.unit.Dimension;
+import java.util.List;
+import java.util.function.ToDoubleFunction;
+
+/**
+ * What is left to say of a spring whose grade has no data for its wire: without a strength nothing
+ * else can be judged.
+ */
+final class DesignFields {
+
+  /** In the order of the output. */
+  static final List<Field<Design>> ALL =
+      List.of(
+          Word.users("material", Design::material),
+          Word.users("wire_size", design -> design.wireSize().label()),
+          Word.ours("ends", design -> design.ends().id()),
+          length("wire_diameter", design -> design.wireSize().diameter()),
+          length("mean_diameter", Design::meanDiameter),
+          CompressionQuantities.number("active_coils", "", 2, Design::activeCoils),
+          length("free_length", Design::freeLength));
+
+  private DesignFields() {}
+
+  private static Quantity<Design> length(String stem, ToDoubleFunction<Design> of) {
+    return CompressionQuantities.of(stem, "", Dimension.LENGTH, 3, of);
+  }
+}
