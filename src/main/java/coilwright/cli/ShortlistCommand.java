@@ -51,7 +51,7 @@ final class ShortlistCommand implements Callable<Integer> {
       names = "--top",
       paramLabel = "N",
       converter = CountConverter.class,
-      description = "How many springs at most, over the file's rank.top.")
+      description = "How many springs at most, or lines of text, over the file's rank.top.")
   private Integer top;
 
   @Option(
@@ -83,7 +83,7 @@ final class ShortlistCommand implements Callable<Integer> {
     WireChoice choice = WireChoice.of(problem, catalogue);
     Answer<CompressionState> answer = CompressionSearch.run(problem, choice);
     List<Candidate<CompressionState>> ranked = Order.ranked(answer, problem.rankBy(), all);
-    int most = all && top == null ? ranked.size() : Math.min(problem.top(), ranked.size());
-    return new Shortlist(problem, choice, answer, all, ranked.subList(0, most));
+    int most = all && top == null ? ranked.size() : problem.top();
+    return new Shortlist(problem, choice, answer, all, ranked, most, catalogue);
   }
 }

@@ -131,6 +131,29 @@ public final class Catalogue {
   }
 
   /**
+   * Whether a buyer may take one grade for another: they are the same, or a pair that the table of
+   * equivalents names. Pairs do not chain.
+   *
+   * @param id a grade
+   * @param other another
+   * @return whether they are equivalent
+   * @throws IllegalStateException naming file, line and column if the file of equivalents is bad
+   */
+  public boolean equivalent(String id, String other) {
+    if (id.equals(other)) {
+      return true;
+    }
+    for (TableRow row : table("equivalents").rows()) {
+      String first = row.text("grade");
+      String second = row.text("other");
+      if (first.equals(id) && second.equals(other) || first.equals(other) && second.equals(id)) {
+        return true;
+      }
+    }
+    return false;
+  }
+
+  /**
    * A table as the file holds it.
    *
    * @param name the file's name without ".csv"

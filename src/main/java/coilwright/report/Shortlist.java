@@ -1,5 +1,6 @@
 package coilwright.report;
 
+import coilwright.material.Catalogue;
 import coilwright.material.Wire;
 import coilwright.material.WireGrade;
 import coilwright.problem.Problem;
@@ -20,19 +21,28 @@ import java.util.Map;
  * @param choice the wires it offers
  * @param answer what the search found
  * @param everyCount whether every feasible coil count is listed, or the best of each wire
- * @param shown the candidates listed, best first
+ * @param ranked all candidates that may be listed, best first
+ * @param most how many of them, or lines of text, are shown
+ * @param catalogue knows which grades are equivalent
  */
 public record Shortlist(
     Problem problem,
     WireChoice choice,
     Answer<CompressionState> answer,
     boolean everyCount,
-    List<Candidate<CompressionState>> shown)
+    List<Candidate<CompressionState>> ranked,
+    int most,
+    Catalogue catalogue)
     implements Result {
 
   /** Copies the list. */
   public Shortlist {
-    shown = List.copyOf(shown);
+    ranked = List.copyOf(ranked);
+  }
+
+  /** The candidates that JSON and CSV hold, best first. */
+  List<Candidate<CompressionState>> shown() {
+    return ranked.subList(0, Math.min(most, ranked.size()));
   }
 
   @Override

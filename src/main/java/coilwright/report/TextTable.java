@@ -27,13 +27,22 @@ final class TextTable {
     return this;
   }
 
+  /** Adds a line of words across the columns. */
+  TextTable words(String words) {
+    rows.add(new String[] {words});
+    return this;
+  }
+
   /** The rows as lines, each begun by an indent and ended by a line feed. */
   String text(String indent) {
     int[] widths = widths();
     StringBuilder text = new StringBuilder();
     for (String[] row : rows) {
       StringBuilder line = new StringBuilder(indent);
-      for (int i = 0; i < row.length; i++) {
+      if (acrossColumns(row)) {
+        line.append(row[0]);
+      }
+      for (int i = 0; i < row.length && !acrossColumns(row); i++) {
         line.append(i == 0 ? "" : "  ").append(cell(row[i], widths[i], right[i]));
       }
       text.append(line.toString().stripTrailing()).append('\n');
@@ -44,11 +53,15 @@ final class TextTable {
   private int[] widths() {
     int[] widths = new int[right.length];
     for (String[] row : rows) {
-      for (int i = 0; i < row.length; i++) {
+      for (int i = 0; i < row.length && !acrossColumns(row); i++) {
         widths[i] = Math.max(widths[i], row[i].length());
       }
     }
     return widths;
+  }
+
+  private boolean acrossColumns(String[] row) {
+    return row.length < right.length;
   }
 
   private static String cell(String text, int width, boolean right) {

@@ -2,7 +2,7 @@ package coilwright.report;
 
 import coilwright.problem.BucklingRule;
 import coilwright.problem.Problem;
-import coilwright.search.Candidate;
+import coilwright.rank.Ranked;
 import coilwright.source.Evidence;
 import coilwright.spring.CompressionState;
 import java.util.ArrayList;
@@ -16,15 +16,20 @@ final class Warnings {
 
   /** The warnings of a shortlist. */
   static List<Warning> of(Shortlist shortlist) {
+    return of(shortlist, Ranked.of(shortlist.shown()));
+  }
+
+  /** The warnings of a shortlist that shows some springs. */
+  static List<Warning> of(Shortlist shortlist, List<Ranked<CompressionState>> shown) {
     List<Warning> warnings = new ArrayList<>();
     shortlist.choice().fromMemory().forEach((id, sizes) -> warnings.add(leftOut(id, sizes)));
-    warnings.addAll(shared(shortlist.problem(), shortlist.shown(), true));
+    warnings.addAll(shared(shortlist.problem(), shown, true));
     return warnings;
   }
 
   /** The warnings of one checked spring. */
   static List<Warning> of(Checked checked) {
-    return shared(checked.problem(), checked.check().spring().stream().toList(), false);
+    return shared(checked.problem(), Ranked.of(checked.check().spring().stream().toList()), false);
   }
 
   /** Each in a line, with the ids it concerns. */
@@ -44,7 +49,7 @@ final class Warnings {
   }
 
   private static List<Warning> shared(
-      Problem problem, List<Candidate<CompressionState>> springs, boolean ranked) {
+      Problem problem, List<Ranked<CompressionState>> springs, boolean ranked) {
     List<Warning> warnings = new ArrayList<>();
     warn(
         warnings,
@@ -65,15 +70,15 @@ final class Warnings {
   private static void warn(
       List<Warning> warnings,
       String what,
-      List<Candidate<CompressionState>> springs,
+      List<Ranked<CompressionState>> springs,
       boolean ranked,
       Predicate<CompressionState> concerns) {
     List<String> ids = new ArrayList<>();
     List<Integer> rows = new ArrayList<>();
-    for (int i = 0; i < springs.size(); i++) {
-      if (concerns.test(springs.get(i).state())) {
-        ids.add(CompressionQuantities.id(springs.get(i)));
-        rows.add(i + 1);
+    for (Ranked<CompressionState> spring : springs) {
+      if (concerns.test(spring.candidate().state())) {
+        ids.add(CompressionQuantities.id(spring.candidate()));
+        rows.add(spring.rank());
       }
     }
     if (!ids.isEmpty()) {
