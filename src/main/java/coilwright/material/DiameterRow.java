@@ -11,13 +11,13 @@ import java.util.List;
  * @param value the strength or modulus there [MPa], or the tolerance [mm]
  * @param evidence whether the row was seen or is remembered
  */
-record DiameterRow(double diameter, double value, Evidence evidence) {
+public record DiameterRow(double diameter, double value, Evidence evidence) {
 
   /** What two diameters may differ by, as a share, and still be one: a rounding of a conversion. */
   static final double SAME = 1e-9;
 
   /** Refuses what is not positive; only the diameter may be infinite. */
-  DiameterRow {
+  public DiameterRow {
     if (!(diameter > 0)) {
       throw new IllegalArgumentException("wire diameter: " + diameter + " mm must be positive");
     }

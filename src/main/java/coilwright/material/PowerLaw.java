@@ -10,10 +10,10 @@ import coilwright.unit.Require;
  * @param m exponent m [-]; zero or above
  * @param evidence whether A and m were seen or are remembered
  */
-record PowerLaw(double a, double m, Evidence evidence) implements StrengthLaw {
+public record PowerLaw(double a, double m, Evidence evidence) implements StrengthLaw {
 
   /** Refuses a strength that is not positive and an exponent below zero. */
-  PowerLaw {
+  public PowerLaw {
     Require.positive(a, "strength at 1 mm", "MPa");
     Require.notNegative(m, "exponent", "-");
   }

@@ -9,10 +9,10 @@ import java.util.List;
  *
  * @param rows the steps, rising; the last may reach to infinity
  */
-record StepTable(List<DiameterRow> rows) implements StrengthLaw, ModulusLaw {
+public record StepTable(List<DiameterRow> rows) implements StrengthLaw, ModulusLaw {
 
   /** Refuses rows that do not rise. */
-  StepTable {
+  public StepTable {
     rows = DiameterRow.rising(rows);
   }
 

@@ -67,7 +67,7 @@ record OwnGrade(
             id,
             id,
             Source.PROBLEM_FILE.shortTitle(),
-            like.map(grade -> "like " + grade.id()).orElse(""),
+            like.map(Like::words).orElse(""),
             Supply.ANY,
             true,
             like.map(WireGrade::allowableClass).orElse(AllowableClass.NON_FERROUS),

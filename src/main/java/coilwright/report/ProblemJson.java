@@ -199,20 +199,7 @@ final class ProblemJson implements Json.Part {
 
   private void ownMaterials(Json json) throws IOException {
     for (WireGrade grade : problem.ownMaterials()) {
-      json.braces(
-          body -> {
-            body.string("id", grade.id());
-            body.object(
-                "diameters",
-                range -> {
-                  range.number("min_mm", grade.diameters().min());
-                  range.number("max_mm", grade.diameters().max());
-                });
-            body.number("density_kg_per_m3", grade.density());
-            body.number("cost_index", grade.costIndex());
-            optional(body, "stress_at_load", grade.stressAtLoad());
-            optional(body, "stress_at_solid", grade.stressAtSolid());
-          });
+      json.braces(new OwnGradeJson(grade));
     }
   }
 

@@ -1,5 +1,5 @@
 /**
- * Results as text and JSON.
+ * Results as text, JSON and CSV.
  *
  * <p>Its nouns are {@link coilwright.report.Shortlist} and {@link coilwright.report.Checked}, what
  * a command shows. It may import {@code rank} and the rooms below it, and the writer of JSON; it

@@ -3,6 +3,7 @@ package coilwright.docs;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.SortedMap;
 import java.util.SortedSet;
@@ -10,7 +11,10 @@ import java.util.TreeMap;
 import java.util.TreeSet;
 import java.util.stream.Stream;
 
-/** The files under results/: the output of every file under problems/, as text and as JSON. */
+/**
+ * The files under results/: the output of every file under problems/, as text and as JSON, and of
+ * some as CSV.
+ */
 final class Results {
 
   private static final Path PROBLEMS = Path.of("problems");
@@ -18,6 +22,10 @@ final class Results {
 
   /** Written by the benchmark profile; its figures depend on the machine. */
   private static final Path BENCHMARKS = FOLDER.resolve("benchmarks.md");
+
+  /** Problems that CSV is shown of: a shortlist, a check, and a shortlist in inches. */
+  private static final List<String> AS_CSV =
+      List.of("check-valve", "check-valve-offer", "mist-nozzle");
 
   private Results() {}
 
@@ -44,15 +52,22 @@ final class Results {
     return files;
   }
 
-  /** The text and the JSON file of a problem. */
+  /** The files of a problem: text and JSON, and CSV where it is shown. */
   static List<Path> filesOf(Path problem) {
     String name = PROBLEMS.relativize(problem).toString();
     String stem = name.substring(0, name.lastIndexOf('.'));
-    return List.of(FOLDER.resolve(stem + ".txt"), FOLDER.resolve(stem + ".json"));
+    List<Path> files = new ArrayList<>();
+    files.add(FOLDER.resolve(stem + ".txt"));
+    files.add(FOLDER.resolve(stem + ".json"));
+    if (AS_CSV.contains(stem)) {
+      files.add(FOLDER.resolve(stem + ".csv"));
+    }
+    return files;
   }
 
   private static String content(Path problem, Path file) throws IOException {
-    String format = file.toString().endsWith(".json") ? "json" : "text";
+    String ending = file.toString().substring(file.toString().lastIndexOf('.') + 1);
+    String format = ending.equals("txt") ? "text" : ending;
     Printed printed = Printed.by(command(problem), problem.toString(), "--format", format);
     if (printed.out().isEmpty()) {
       throw new IllegalStateException(problem + " gives no result: " + printed.err());
