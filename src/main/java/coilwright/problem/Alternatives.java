@@ -1,6 +1,7 @@
 package coilwright.problem;
 
 import java.util.List;
+import java.util.stream.Stream;
 
 /**
  * Keys of one block that stand instead of one another.
@@ -13,11 +14,15 @@ record Alternatives(List<ProblemKey<?>> keys, boolean needed, boolean exclusive)
 
   /** All of them. */
   static final List<Alternatives> ALL =
-      List.of(
-          new Alternatives(List.of(LoadKeys.LENGTH, LoadKeys.FORCE), true, false),
-          new Alternatives(List.of(MakeKeys.WIRE_SERIES, MakeKeys.WIRE_SIZES), false, true),
-          new Alternatives(List.copyOf(DesignKeys.DIAMETERS), true, true),
-          new Alternatives(List.copyOf(DesignKeys.COILS), true, true));
+      Stream.concat(
+              Stream.of(
+                  new Alternatives(List.of(LoadKeys.LENGTH, LoadKeys.FORCE), true, false),
+                  new Alternatives(List.of(MakeKeys.WIRE_SERIES, MakeKeys.WIRE_SIZES), false, true),
+                  new Alternatives(List.copyOf(DesignKeys.DIAMETERS), true, true),
+                  new Alternatives(List.copyOf(DesignKeys.COILS), true, true)),
+              MaterialKeys.TAKEN.stream()
+                  .map(key -> new Alternatives(List.of(MaterialKeys.LIKE, key), true, false)))
+          .toList();
 
   /** The path of the block. */
   String parent() {

@@ -132,6 +132,19 @@ final class MaterialKeys {
           "likewise at solid",
           "45 %");
 
+  /**
+   * What is taken from another grade where it is not given; without such a grade, all of it must.
+   */
+  static final List<ProblemKey<?>> TAKEN =
+      List.of(
+          TENSILE_STRENGTH,
+          SHEAR.whole(),
+          ELASTIC.whole(),
+          DENSITY,
+          COST_INDEX,
+          STRESS_AT_LOAD,
+          STRESS_AT_SOLID);
+
   /** All of them. */
   static final List<ProblemKey<?>> ROWS = rows();
 

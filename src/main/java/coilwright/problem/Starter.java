@@ -1,11 +1,14 @@
 package coilwright.problem;
 
 import java.util.List;
+import java.util.stream.Stream;
 
 /** Problem files to start from, made from the rows of the table of keys. */
 public final class Starter {
 
   private static final int COMMENT_COLUMN = 42;
+
+  private static final String OFF = "# ";
 
   private final StringBuilder text = new StringBuilder();
 
@@ -13,54 +16,64 @@ public final class Starter {
 
   /**
    * A commented problem file for a compression spring, in YAML: valid for a shortlist as it stands,
-   * with every key in it. Keys that may be left out stand behind "# ".
+   * with every key in it. Keys that may be left out stand behind a "# " of their own; in front of a
+   * block that is left out each line has another, at its beginning.
    */
   public static String compression() {
     Starter starter = new Starter();
     starter.text.append("# The loads a compression spring must carry, and the space it has.\n");
-    starter.text.append("# Drop the \"# \" before a key to use it.\n\n");
-    starter.keys("", "", false);
+    starter.text.append(
+        "# To use a key, drop the \"# \" before it; to use a block, drop the \"# \"");
+    starter.text.append(" at the beginning of all its lines.\n");
+    starter.text.append("# For check, use the block design, and drop the block make.\n\n");
+    starter.keys("", "", "");
     return starter.text.toString();
   }
 
-  private void keys(String parent, String indent, boolean off) {
+  private void keys(String parent, String before, String indent) {
     for (ProblemKey<?> key : KeyTable.children(parent)) {
-      boolean on = !key.optional() || HeadKeys.ROWS.contains(key);
       if (key.examples().isEmpty()) {
-        block(key, indent, off || needsMore(key));
+        block(key, indent);
       } else {
-        line(indent, off || !on, entry(key, 0), comment(key));
+        line(before + indent, isOn(key), entry(key, 0), comment(key));
       }
     }
   }
 
-  /** Whether a block may be left out, but not what belongs into it. */
-  private static boolean needsMore(ProblemKey<?> block) {
-    return block.optional()
-        && KeyTable.children(block.path()).stream().anyMatch(key -> !key.optional());
+  /** Whether a key is in use where its block is: the file would not be valid without it. */
+  private static boolean isOn(ProblemKey<?> key) {
+    return !key.optional()
+        || HeadKeys.ROWS.contains(key)
+        || Alternatives.ALL.stream().anyMatch(some -> some.needed() && some.keys().get(0) == key);
   }
 
-  private void block(ProblemKey<?> key, String indent, boolean off) {
+  private void block(ProblemKey<?> key, String indent) {
     List<ProblemKey<?>> itemKeys = KeyTable.children(key.path() + "[]");
-    boolean offList = !itemKeys.isEmpty() && key.optional();
+    String before = key.optional() && needsMore(key) ? OFF : "";
     text.append('\n');
-    line(indent, off || offList, key.name() + ":", key.help());
+    line(before + indent, true, key.name() + ":", key.help());
     if (itemKeys.isEmpty()) {
-      keys(key.path(), indent + "  ", off);
+      keys(key.path(), before, indent + "  ");
     } else {
-      items(itemKeys, indent + "  ", offList);
+      items(itemKeys, before + indent + "  ");
     }
   }
 
+  /** Whether something in a block must be given. */
+  private static boolean needsMore(ProblemKey<?> block) {
+    return Stream.of("", "[]")
+        .flatMap(list -> KeyTable.children(block.path() + list).stream())
+        .anyMatch(key -> !key.optional());
+  }
+
   /** The items of a list: the first with every key, each further one with what it adds. */
-  private void items(List<ProblemKey<?>> keys, String indent, boolean off) {
+  private void items(List<ProblemKey<?>> keys, String before) {
     int count = keys.stream().mapToInt(key -> key.examples().size()).max().orElse(0);
     for (int item = 0; item < count; item++) {
       String lead = "- ";
       for (ProblemKey<?> key : keys) {
         if (item < key.examples().size()) {
-          String comment = item == 0 ? comment(key) : "";
-          line(indent, off || key.optional(), lead + entry(key, item), comment);
+          line(before + lead, isOn(key), entry(key, item), item == 0 ? comment(key) : "");
           lead = "  ";
         }
       }
@@ -79,11 +92,11 @@ public final class Starter {
     return key.help() + (shown ? " (the default)" : "; left out: " + key.omitted());
   }
 
-  private void line(String indent, boolean off, String entry, String comment) {
-    String start = indent + (off ? "# " : "") + entry;
+  private void line(String before, boolean on, String entry, String comment) {
+    String start = before + (on ? "" : OFF) + entry;
     text.append(start);
     if (!comment.isEmpty()) {
-      text.append(" ".repeat(Math.max(1, COMMENT_COLUMN - start.length()))).append("# ");
+      text.append(" ".repeat(Math.max(1, COMMENT_COLUMN - start.length()))).append(OFF);
     }
     text.append(comment).append('\n');
   }

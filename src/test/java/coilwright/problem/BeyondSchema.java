@@ -38,7 +38,6 @@ enum BeyondSchema {
   /** What must be given because of what else is given, or of what the file is for. */
   PRESENCE_BY_OTHER_KEYS(
       ": missing; needed with|: given beside make|: a design block; |^design .*: missing;"
-          + "|^own_materials\\[[0-9]+\\]\\.(?!id)[a-z_]+ .*: missing; must be a"
           + "|: the facts do not fix the load line;|: no force to go with it|; must be given; leaving it to");
 
   private final Pattern words;

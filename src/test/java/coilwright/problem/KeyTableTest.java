@@ -3,56 +3,13 @@ package coilwright.problem;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.util.List;
-import java.util.function.Predicate;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
 
-/** The rows of the table of keys against the starter file, the reader and the README's table. */
+/** The rows of the table of keys against the reader and the README's table. */
 class KeyTableTest {
-
-  /** Rows that exclude one another in one file. */
-  private static final List<String> INSTEAD =
-      List.of("wire_series:", "outside_diameter:", "inside_diameter:", "total_coils:");
-
-  private static final String STARTER = Starter.compression();
-
-  @Test
-  void theStarterIsAValidProblem() {
-    Problem problem = Files.problem(STARTER);
-    assertThat(problem.required().orElseThrow().rate()).isEqualTo(2.7);
-    assertThat(problem.design()).isEmpty();
-    assertThat(problem.ownMaterials()).isEmpty();
-    assertThat(problem.limits()).isEqualTo(Files.problem(Files.LOADS).limits());
-    assertThat(problem.make()).isEqualTo(Files.problem(Files.LOADS).make());
-  }
-
-  @Test
-  void theStarterIsValidWithEveryKeyInUse() {
-    Problem problem = Files.problem(inUse(block -> !block.startsWith("# design:")));
-    assertThat(problem.ownMaterials()).hasSize(3);
-    assertThat(problem.make().wireSizes()).hasSize(2);
-    assertThat(problem.envelope().guides()).isTrue();
-  }
-
-  @Test
-  void theStarterIsValidForACheckWithEveryKeyInUse() {
-    assertThat(Files.checked(inUse(block -> !block.startsWith("make:"))).design()).isPresent();
-  }
-
-  @Test
-  void theStarterShowsEveryKey() {
-    for (ProblemKey<?> key : KeyTable.ROWS) {
-      assertThat(STARTER).as(key.path()).containsPattern("[ {]" + key.name() + ":|\n" + key.name());
-    }
-  }
-
-  @Test
-  void theStarterIsPlainAsciiWithinReason() {
-    assertThat(STARTER).matches("(?s)[\\x20-\\x7E\\n]*");
-    assertThat(STARTER.lines()).allMatch(line -> line.length() <= 160);
-  }
 
   @ParameterizedTest
   @MethodSource("examples")
@@ -109,20 +66,5 @@ class KeyTableTest {
             Mark.FILE, List.of(new Node.Entry(Mark.FILE, name, new Node.Scalar(Mark.FILE, "x"))));
     UnknownKeys.report(mapping, new Spot(Mark.FILE, parent.replace("[]", "[0]"), faults));
     return faults.count() > 0;
-  }
-
-  /** The starter with every "# " before a key dropped, without blocks and keys that exclude. */
-  private static String inUse(Predicate<String> wanted) {
-    StringBuilder text = new StringBuilder();
-    for (String block : STARTER.split("\n\n")) {
-      if (wanted.test(block)) {
-        block
-            .lines()
-            .filter(line -> INSTEAD.stream().noneMatch(line::contains))
-            .map(line -> line.replaceFirst("^( *)# ([- ]*[a-z_]+:)", "$1$2"))
-            .forEach(line -> text.append(line).append('\n'));
-      }
-    }
-    return text.toString();
   }
 }
