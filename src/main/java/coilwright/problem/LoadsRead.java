@@ -14,6 +14,9 @@ import java.util.OptionalDouble;
  */
 record LoadsRead(List<LoadEntry> loads, LoadFacts facts, Optional<Requirement> required) {
 
+  private static final List<ProblemKey<?>> FACTS =
+      List.of(LoadKeys.RATE, LoadKeys.FREE_LENGTH, LoadKeys.STROKE);
+
   /**
    * Reads the loads and the other facts and reports those that contradict each other.
    *
@@ -51,7 +54,8 @@ record LoadsRead(List<LoadEntry> loads, LoadFacts facts, Optional<Requirement> r
       return Optional.of(perSpring(fixed.get(), facts));
     }
     Agreement.belowFreeLength(loads, facts.freeLength());
-    if (purpose == Purpose.SHORTLIST && root.spot().faults().count() == before) {
+    boolean asked = purpose == Purpose.SHORTLIST && FACTS.stream().noneMatch(root::misspells);
+    if (asked && root.spot().faults().count() == before) {
       root.spot(LoadKeys.LOADS)
           .fault(
               "the facts do not fix the load line",

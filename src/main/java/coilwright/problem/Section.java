@@ -65,6 +65,16 @@ final class Section {
   }
 
   /**
+   * Whether a key is, as far as can be told, given misspelt, which has been reported.
+   *
+   * @param key the key
+   * @return true if it is
+   */
+  boolean misspells(ProblemKey<?> key) {
+    return !has(key) && meant.contains(key.name());
+  }
+
+  /**
    * Reads a key that may be left out.
    *
    * @param <T> the kind of its value
