@@ -15,8 +15,7 @@ import java.util.function.Function;
 /** Wire sizes of the catalogue by series. */
 public final class Sizes implements Result {
 
-  private static final List<Field<Sourced>> SOURCE =
-      List.of(Word.ours("source", Sourced::source));
+  private static final List<Field<Sourced>> SOURCE = List.of(Word.ours("source", Sourced::source));
 
   private final Catalogue catalogue;
   private final List<WireSeries> wanted;
@@ -56,11 +55,7 @@ public final class Sizes implements Result {
     List<String> notes = new ArrayList<>();
     TextTable table = new TextTable("rrrll");
     table.row(
-        "size",
-        first.symbol(Dimension.LENGTH),
-        second.symbol(Dimension.LENGTH),
-        "data",
-        "source");
+        "size", first.symbol(Dimension.LENGTH), second.symbol(Dimension.LENGTH), "data", "source");
     for (Sourced sourced : of(series)) {
       if (!notes.contains(sourced.source())) {
         notes.add(sourced.source());
@@ -120,8 +115,6 @@ public final class Sizes implements Result {
 
   private List<Sourced> of(WireSeries series) {
     Iterator<String> sources = catalogue.sizeSources(series).iterator();
-    return catalogue.sizes(series).stream()
-        .map(size -> new Sourced(size, sources.next()))
-        .toList();
+    return catalogue.sizes(series).stream().map(size -> new Sourced(size, sources.next())).toList();
   }
 }

@@ -98,10 +98,11 @@ class CsvTest {
   @Test
   void wiresAndMaterials() {
     assertThat(Run.of("wires", "metric", "--format=csv").found(Status.FOUND).out())
-        .startsWith("wire_series,wire_size,wire_diameter_mm,data\nmetric,0.05,0.05,seen\n");
+        .startsWith(
+            "wire_series,wire_size,wire_diameter_mm,data,source\nmetric,0.05,0.05,seen,\"EN 10270-1,");
     assertThat(Run.of("wires", "music-wire-gauge", "--format=csv", "--units=inch").out())
-        .startsWith("wire_series,wire_size,wire_diameter_in,data\n")
-        .contains("\nmusic-wire-gauge,6/0,0.004,seen\n");
+        .startsWith("wire_series,wire_size,wire_diameter_in,data,source\n")
+        .contains("\nmusic-wire-gauge,6/0,0.004,seen,");
     JsonNode grade = Run.of("materials", "stainless-302", "--format=json").json();
     CsvRows csv = csv(Run.of("materials", "stainless-302", "--format=csv"));
     JsonNode wires = grade.path("materials").path(0).path("wires");

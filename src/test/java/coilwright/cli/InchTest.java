@@ -87,7 +87,7 @@ class InchTest {
         .contains("rate 16.667 lbf/in, free length 1.49 in, from two loads at lengths")
         .contains("wire       0.063 in, 1.4 mm, 0.0551 in")
         .contains("mean diameter 0.0005 in (a tenth below 0.19685 in mean diameter)")
-        .contains("  0.063 in", "  1.4 mm = 0.0551 in ");
+        .contains("  0.063 in", "also: #2 music-wire, 1.4 mm = 0.0551 in,");
     assertThat(text.replace("1.4 mm", "")).doesNotContainPattern("[0-9] (mm|N|MPa|g)\\b");
   }
 
@@ -103,10 +103,10 @@ class InchTest {
         .contains("allowed 0.118 in")
         .doesNotContainPattern("\\b(N|MPa|g)\\b");
     assertThat(Run.of("materials", "music-wire", "--units=inch").out())
-        .contains("0.0040 to 0.2500 in", "0.284 lb/in^3", "up to 250 degF", "d in  Rm ksi")
+        .contains("0.0040 to 0.2500 in", "0.284 lb/in^3", "up to 250 degF", "d in    +- in  Rm ksi")
         .doesNotContainPattern("\\b(mm|MPa|degC|m\\^3)\\b");
     assertThat(Run.of("wires", "music-wire-gauge", "--units=inch").out())
-        .contains("  size      in     mm  data\n   6/0  0.0040  0.102  seen\n");
+        .contains("   size      in     mm  data  source\n    6/0  0.0040  0.102  seen  [1]\n");
   }
 
   private static void converted(String problem, String... args) {
