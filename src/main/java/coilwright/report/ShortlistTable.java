@@ -2,6 +2,7 @@ package coilwright.report;
 
 import coilwright.limit.Finding;
 import coilwright.material.Wire;
+import coilwright.problem.Problem;
 import coilwright.rank.Alike;
 import coilwright.rank.Line;
 import coilwright.rank.Ranked;
@@ -9,6 +10,7 @@ import coilwright.rank.Varied;
 import coilwright.search.Candidate;
 import coilwright.source.Evidence;
 import coilwright.spring.CompressionState;
+import coilwright.unit.Dimension;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
@@ -31,8 +33,13 @@ final class ShortlistTable {
           column("mass", "mass"),
           column("cost", "cost_index"));
 
+  private static final String FOUND =
+      " L1 and on are the lengths found, in the order of the loads.";
+  private static final int AFTER_FREE_LENGTH = 5;
+
   private final Shortlist shortlist;
   private final OutputUnits units;
+  private final List<Column> columns;
   private final Varied<CompressionState> varied;
   private final List<Line<CompressionState>> shown;
 
@@ -46,12 +53,31 @@ final class ShortlistTable {
   ShortlistTable(Shortlist shortlist, OutputUnits units) {
     this.shortlist = shortlist;
     this.units = units;
+    this.columns = new ArrayList<>(COLUMNS);
+    this.columns.addAll(AFTER_FREE_LENGTH, lengthsFound(shortlist.problem()));
     List<Ranked<CompressionState>> ranked = Ranked.of(shortlist.ranked());
     this.varied =
         shortlist.everyCount()
             ? new Varied<>(alone(ranked), List.of())
             : Varied.of(Alike.lines(ranked, shortlist.catalogue()::equivalent));
     this.shown = varied.lines().subList(0, Math.min(shortlist.most(), varied.lines().size()));
+  }
+
+  /** The loaded lengths, where they are part of the answer. */
+  private static List<Column> lengthsFound(Problem problem) {
+    List<Column> lengths = new ArrayList<>();
+    if (problem.required().orElseThrow().freeLength().isEmpty()) {
+      for (int i = 0; i < problem.facts().loads().size(); i++) {
+        lengths.add(lengthAt(i));
+      }
+    }
+    return lengths;
+  }
+
+  private static Column lengthAt(int load) {
+    String head = "L" + (load + 1);
+    return new Column(
+        head, new Quantity<>(head, head, Dimension.LENGTH, 2, s -> s.loads().get(load).length()));
   }
 
   private static List<Line<CompressionState>> alone(List<Ranked<CompressionState>> ranked) {
@@ -77,7 +103,7 @@ final class ShortlistTable {
   void addTo(Lines lines) {
     lines.line(count() + listed());
     lines.line("");
-    TextTable table = new TextTable("rlll" + "r".repeat(COLUMNS.size()) + "rl");
+    TextTable table = new TextTable("rlll" + "r".repeat(columns.size()) + "rl");
     heads(table);
     for (Line<CompressionState> line : shown) {
       row(table, line.lead());
@@ -94,7 +120,7 @@ final class ShortlistTable {
         "  n active and nt total coils, D mean and De outside diameter, L0 free and Ls solid length;");
     lines.line(
         "  cost is a proxy in grams of hard-drawn wire, its indices from memory; margins are shares");
-    lines.line("  of the bound." + each());
+    lines.line("  of the bound." + (columns.size() > COLUMNS.size() ? FOUND : "") + each());
     lines.line("");
   }
 
@@ -129,7 +155,7 @@ final class ShortlistTable {
   private void heads(TextTable table) {
     List<String> names = new ArrayList<>(List.of("#", "material", "wire", "ends"));
     List<String> symbols = new ArrayList<>(List.of("", "", "", ""));
-    for (Column column : COLUMNS) {
+    for (Column column : columns) {
       names.add(column.head());
       symbols.add(units.symbol(column.quantity().dimension()));
     }
@@ -146,7 +172,7 @@ final class ShortlistTable {
     cells.add(material(wire));
     cells.add(Wires.sizeWithDiameter(wire, units));
     cells.add(candidate.state().endForm());
-    for (Column column : COLUMNS) {
+    for (Column column : columns) {
       cells.add(column.quantity().text(candidate.state(), units));
     }
     OptionalDouble margin = candidate.leastMargin();
