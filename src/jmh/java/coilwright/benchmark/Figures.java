@@ -1,9 +1,7 @@
 package coilwright.benchmark;
 
+import coilwright.docs.Section;
 import java.io.IOException;
-import java.nio.charset.StandardCharsets;
-import java.nio.file.Files;
-import java.nio.file.Path;
 import java.util.Collection;
 import java.util.Locale;
 import java.util.Map;
@@ -13,7 +11,7 @@ import org.openjdk.jmh.runner.Runner;
 import org.openjdk.jmh.runner.RunnerException;
 import org.openjdk.jmh.runner.options.OptionsBuilder;
 
-/** Measures everything in one run and writes the figures to results/benchmarks.md. */
+/** Measures everything in one run and writes the figures to their part of results/benchmarks.md. */
 public final class Figures {
 
   private static final String PROBLEMS = "src/jmh/resources/benchmark/";
@@ -37,9 +35,7 @@ public final class Figures {
       runs.append(line(problem, "java -jar", WholeRuns.ofJar(file)));
       runs.append(line(problem, "start script", WholeRuns.ofScript(file)));
     }
-    Files.write(
-        Path.of("results", "benchmarks.md"),
-        text(milliseconds(results), runs.toString()).getBytes(StandardCharsets.UTF_8));
+    new Section("Search and whole runs").write(text(milliseconds(results), runs.toString()));
   }
 
   private static Map<String, Double> milliseconds(Collection<RunResult> results) {
@@ -55,10 +51,9 @@ public final class Figures {
 
   private static String text(Map<String, Double> times, String runs) {
     StringBuilder text = new StringBuilder();
-    text.append("# Benchmarks\n\n");
     text.append("Command: `mvn -B -ntp -P benchmark verify -DskipTests`\n\n");
-    text.append("Machine: ").append(machine()).append("\n\n");
-    text.append("## Warm search of the whole catalogue, one core, heap 256 MB\n\n");
+    text.append("Machine: ").append(Section.machine()).append("\n\n");
+    text.append("### Warm search of the whole catalogue, one core, heap 256 MB\n\n");
     text.append("A spring computed at its loads is one state; root finding is included, and so\n");
     text.append("is working out every conflict, which a text list with candidates never reads.\n");
     text.append("Typical, loose and infeasible try every grade in the series it is stocked in; ");
@@ -69,7 +64,7 @@ public final class Figures {
     for (String problem : new String[] {"typical", "loose", "infeasible", "wide"}) {
       text.append(row(problem, times));
     }
-    text.append("\n## Whole runs in turns, 21 pairs, at most 256 MB of heap\n\n");
+    text.append("\n### Whole runs in turns, 21 pairs, at most 256 MB of heap\n\n");
     text.append("| problem | started by | bare Java start, median ms | `shortlist`, median ms |");
     text.append(" median ratio of neighbours |\n|---|---|---|---|---|\n");
     return text.append(runs).toString();
@@ -108,16 +103,6 @@ public final class Figures {
             number("%.0f", 1000 * WholeRuns.median(runs.shortlist())),
             number("%.1f", runs.ratio()))
         + " |\n";
-  }
-
-  private static String machine() {
-    return System.getProperty("os.name")
-        + " "
-        + System.getProperty("os.arch")
-        + ", "
-        + Runtime.getRuntime().availableProcessors()
-        + " processors, Java "
-        + System.getProperty("java.vm.version");
   }
 
   private static String number(String pattern, double value) {

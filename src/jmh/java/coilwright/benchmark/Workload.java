@@ -11,6 +11,7 @@ import coilwright.search.Answer;
 import coilwright.search.Candidate;
 import coilwright.search.CoilStep;
 import coilwright.search.CompressionSearch;
+import coilwright.search.CountingFamily;
 import coilwright.search.Search;
 import coilwright.search.WireChoice;
 import coilwright.spring.CompressionState;

@@ -1,4 +1,4 @@
-package coilwright.benchmark;
+package coilwright.search;
 
 import coilwright.material.Wire;
 import coilwright.spring.Family;
@@ -13,7 +13,8 @@ import java.util.concurrent.atomic.AtomicLong;
  * @param count where they are counted
  * @param <S> the state of the kind of spring
  */
-record CountingFamily<S extends State>(Family<S> family, AtomicLong count) implements Family<S> {
+public record CountingFamily<S extends State>(Family<S> family, AtomicLong count)
+    implements Family<S> {
 
   @Override
   public S at(double coils) {
