@@ -57,4 +57,10 @@ public record CountingFamily<S extends State>(Family<S> family, AtomicLong count
   public double play(double coils) {
     return family.play(coils);
   }
+
+  @Override
+  public Family<S> keepingNothing() {
+    Family<S> other = family.keepingNothing();
+    return other == family ? this : new CountingFamily<>(other, count);
+  }
 }
