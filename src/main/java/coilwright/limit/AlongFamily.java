@@ -84,8 +84,17 @@ final class AlongFamily {
     return deflection * meaning.factor(end.correction(), index) * index;
   }
 
-  /** The deflection of the extreme load [mm], where the lengths follow from the travel. */
+  /** The stress [MPa] at some deflection [mm]. */
+  double shearStress(double coils, double deflection, StressMeaning meaning) {
+    double wire = end.spring().wireDiameter();
+    return 8 * end.rate() / (Math.PI * wire * wire) * stress(coils, deflection, meaning);
+  }
+
+  /** The deflection of the extreme load [mm]. */
   double deflectionAtExtreme(double coils) {
+    if (!lengthsOpen()) {
+      return end.extreme().deflection();
+    }
     double asked = end.duty().travel().orElseThrow().deflection();
     double overtravel = end.duty().overtravel().orElse(Double.POSITIVE_INFINITY);
     return Math.max(asked, freeLengthAt(coils) - overtravel);

@@ -93,6 +93,25 @@ final class BucklingBound implements Limit<CompressionState> {
     return new double[] {wide, justBeyond, worst(along, justBeyond, solid), solid};
   }
 
+  @Override
+  public double expected(Family<CompressionState> family, double from, double to) {
+    AlongFamily along = new AlongFamily(family);
+    return ClosedForm.solve(coils -> share(along, coils), 1 + Finding.TOLERANCE, from, to);
+  }
+
+  /** Deflection over the critical one; zero where the spring can never buckle. */
+  private double share(AlongFamily along, double coils) {
+    double deflection = atSolid ? along.deflectionToSolid(coils) : along.deflectionAtExtreme(coils);
+    CompressionSpring spring = along.any().spring();
+    return deflection
+        / Buckling.criticalDeflection(
+            along.meanDiameterAt(coils),
+            along.freeLengthAt(coils),
+            along.any().seating().factor(),
+            spring.wire().shearModulus(),
+            spring.wire().elasticModulus());
+  }
+
   /** The coil count up to which the coil is wide enough never to buckle. */
   private static double stableUpTo(AlongFamily along, Family<CompressionState> family) {
     UnivariateFunction tooNarrow =

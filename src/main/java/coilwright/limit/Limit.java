@@ -40,6 +40,19 @@ public interface Limit<S extends State> {
   }
 
   /**
+   * Where between two coil counts the bound is expected from a closed form, to look there first. It
+   * never decides on which side the limit holds.
+   *
+   * @param family the family
+   * @param from a coil count on one side of the bound [-]
+   * @param to a greater one on the other side [-]
+   * @return the coil count [-]; NaN where no closed form is at hand
+   */
+  default double expected(Family<S> family, double from, double to) {
+    return Double.NaN;
+  }
+
+  /**
    * Whether the margin goes with the coil count in a straight line, as lengths of coils that touch
    * do. Else it is taken to go with a power of it, as diameters and stresses do. It tells where to
    * look for a bound first, never on which side the limit holds.

@@ -11,6 +11,11 @@ import java.util.List;
  */
 public final class Reach {
 
+  /**
+   * Just below and just above where a root is expected: nearer to each other than a root is known.
+   */
+  private static final double[] BESIDE = {1 - 4e-11, 1 + 4e-11};
+
   private Reach() {}
 
   /**
@@ -107,6 +112,23 @@ public final class Reach {
         high = middle;
       }
     }
-    return new Bracket<>(limit, trail, trail.countAt(low), trail.countAt(high)).root();
+    return around(limit, trail, trail.countAt(low), trail.countAt(high), holdsAtFrom);
+  }
+
+  /** Closes in on the root from both sides of where it is expected, where a closed form says so. */
+  private static <S extends State> double around(
+      Limit<S> limit, Trail<S> trail, double from, double to, boolean holdsAtFrom) {
+    double low = from;
+    double high = to;
+    double expected = limit.expected(trail, from, to);
+    for (double side : BESIDE) {
+      double coils = expected * side;
+      if (coils > low && coils < high) {
+        boolean before = holds(limit, trail, coils) == holdsAtFrom;
+        low = before ? coils : low;
+        high = before ? high : coils;
+      }
+    }
+    return new Bracket<>(limit, trail, low, high).root();
   }
 }

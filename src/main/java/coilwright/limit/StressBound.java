@@ -81,6 +81,25 @@ final class StressBound implements Limit<CompressionState> {
         allowable.source());
   }
 
+  /** The stress by its closed form along the family, against the bound and what holds it still. */
+  @Override
+  public double expected(Family<CompressionState> family, double from, double to) {
+    AlongFamily along = new AlongFamily(family);
+    double allowable =
+        choice.of(limit, family.wire().grade(), basis).share() * family.wire().tensileStrength();
+    return ClosedForm.solve(
+        coils -> along.shearStress(coils, deflection(along, coils), basis.meaning()),
+        allowable * (1 + Finding.TOLERANCE),
+        from,
+        to);
+  }
+
+  private double deflection(AlongFamily along, double coils) {
+    return name() == LimitName.STRESS_AT_SOLID
+        ? along.deflectionToSolid(coils)
+        : along.deflectionAtExtreme(coils);
+  }
+
   /** At solid the force goes with the deflection left, which falls straight to none. */
   @Override
   public boolean straight() {
