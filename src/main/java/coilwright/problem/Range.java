@@ -16,7 +16,7 @@ import java.util.Optional;
 public record Range(double low, boolean lowIncluded, double high, boolean highIncluded) {
 
   /** Beyond this no product of a formula is safe from overflow; no spring comes near it. */
-  public static final double LARGEST = 1e9;
+  private static final double LARGEST = 1e9;
 
   /** Below this, zero aside, likewise. */
   private static final double SMALLEST = 1e-9;

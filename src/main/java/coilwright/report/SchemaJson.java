@@ -82,9 +82,7 @@ public final class SchemaJson {
 
   private void range(Range range) throws IOException {
     json.number(range.lowIncluded() ? "minimum" : "exclusiveMinimum", range.low());
-    if (!range.highIncluded() || range.high() < Range.LARGEST) {
-      json.number(range.highIncluded() ? "maximum" : "exclusiveMaximum", range.high());
-    }
+    json.number(range.highIncluded() ? "maximum" : "exclusiveMaximum", range.high());
   }
 
   private void text(String pattern) throws IOException {

@@ -117,6 +117,79 @@ class BadCommandLineTest {
   }
 
   @Test
+  void optionsOfTheStarter() {
+    refused("coilwright starter: --schema: takes no value; give it alone", "starter", "--schema=x");
+    refused(
+        "coilwright starter: --schema: given twice; give it once",
+        "starter",
+        "--schema",
+        "--schema");
+    refused(
+        "coilwright starter: --shema: no such option; did you mean --schema?",
+        "starter",
+        "--shema");
+    refused(
+        "coilwright starter: --format: no such option; accepted: --force, --help, --out, --schema,"
+            + " --version",
+        "starter",
+        "compression",
+        "--format",
+        "json");
+    refused(
+        "coilwright starter: KIND: \"extension\" is not available yet; accepted: compression",
+        "starter",
+        "extension",
+        "--schema");
+    refused(
+        "coilwright starter: KIND is missing; give the kind of spring: compression",
+        "starter",
+        "--force");
+    refused(
+        "coilwright: --schema: no option here; put it behind the command and its file",
+        "--schema",
+        "starter");
+    shortlist(
+        "--schema: no such option; accepted: --all, --force, --format, --help, --out, --rank,"
+            + " --top, --units, --version",
+        "--schema");
+  }
+
+  @Test
+  void valuesOfFormatAndUnits() {
+    shortlist("--format: \"CSV\"; accepted: text, json, csv (did you mean csv?)", "--format=CSV");
+    shortlist(
+        "--format: \"cvs\"; accepted: text, json, csv (did you mean csv?)", "--format", "cvs");
+    shortlist(
+        "--format: \"text,csv\"; accepted: text, json, csv (did you mean text?)",
+        "--format",
+        "text,csv");
+    shortlist("--units: \"inches\"; accepted: metric, inch (did you mean inch?)", "--units=inches");
+    shortlist("--units: \"mm\"; accepted: metric, inch", "--units", "mm");
+    shortlist("--units: \"\"; accepted: metric, inch", "--units=");
+    shortlist("--units: given twice; give it once", "--units=inch", "--units=metric");
+    shortlist("--units: its value is missing; give metric or inch", "--units");
+    refused(
+        "coilwright check: --units: \"in\"; accepted: metric, inch (did you mean inch?)",
+        "check",
+        FILE,
+        "--units",
+        "in");
+    refused(
+        "coilwright check: --format: given twice; give it once",
+        "check",
+        FILE,
+        "--format=csv",
+        "--format=csv");
+    refused(
+        "coilwright materials: --format: \"yaml\"; accepted: text, json, csv",
+        "materials",
+        "--format",
+        "yaml");
+    refused(
+        "coilwright wires: --units: its value is missing; give metric or inch", "wires", "--units");
+  }
+
+  @Test
   void namesOfThings() {
     refused("coilwright starter: KIND is missing; give the kind of spring: compression", "starter");
     refused(

@@ -7,17 +7,18 @@ enum BeyondSchema {
   /** A mapping holds each key once, whoever reads it. */
   REPEATED_KEY(": repeated key;"),
 
-  /** The editor reads the number, not how it is spelt. */
-  SPELLING_OF_A_PLAIN_NUMBER(
-      ": (0x|0o|\\.nan|\\.inf|[^ ]*, with an underscore|[^ ]*, with a leading zero)"),
+  /** The editor reads the number or the truth value, not how it is spelt. */
+  SPELLING_OF_A_PLAIN_VALUE(
+      ": (True|0x|0o|\\.nan|\\.inf|[^ ]*, with an underscore|[^ ]*, with a leading zero)"),
 
   /** The editor sees nothing, as in an empty section. */
   NULL_FOR_A_SECTION("\\): (null|~); must be a (block|list of blocks)"),
 
-  /** Of a range of quantities the schema knows the sign only. */
+  /** Of the range of a quantity, or of a number in quotes, the schema knows the sign only. */
   SIZE_OF_A_QUANTITY(
-      ": [0-9.e+-]+ ?[^ ;]+(, too (large|small) a number; |; must be at (most|least) [0-9.]+ [^ ,]+$)"
+      ": [0-9.e+-]+ ?[^ ;]*(, too (large|small) a number; |; must be at (most|least) [0-9.]+ [^ ,]+$)"
           + "|: [1-9][^;]*; must be above .* and (at most|below) "
+          + "|: [0-9e]+; must be at most [0-9]+$"
           + "|, outside what a spring wire can have; "),
 
   /** Two values, or a value and a default. */
