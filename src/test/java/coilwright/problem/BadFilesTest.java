@@ -25,7 +25,7 @@ class BadFilesTest {
 
   @Test
   void thereAreMany() throws IOException {
-    assertThat(cases()).hasSizeGreaterThan(85);
+    assertThat(cases()).hasSizeGreaterThan(180);
   }
 
   static Stream<BadFile> cases() throws IOException {
