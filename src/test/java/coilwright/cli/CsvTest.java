@@ -14,9 +14,19 @@ class CsvTest {
   private static final String TWINS =
       Run.VALVE.replace("spring:", "springs_in_parallel: 2\nspring:");
 
+  private static final String OVERTRAVEL = Run.VALVE + "overtravel: {length: 21 mm}\n";
+
+  private static final String BY_EN = OVERTRAVEL + "limits: {stress_basis: en-13906}\n";
+
+  private static final String STROKE =
+      Run.VALVE
+          .replace("{length: 32 mm, force: 18 N, tolerance: 10 %}", "{force: 18 N}")
+          .replace("{length: 22 mm, force: 45 N, tolerance: 10 %}", "{force: 45 N}")
+          .replace("envelope:", "stroke: 10 mm\nenvelope:");
+
   @Test
   void aShortlistIsItsJsonFlattened() {
-    for (String problem : new String[] {Run.VALVE, TWINS, Run.VALVE + "seats: fixed-free\n"}) {
+    for (String problem : new String[] {Run.VALVE, TWINS, OVERTRAVEL, BY_EN, STROKE}) {
       JsonNode candidates = shortlist(problem, "--all", "--format=json").json().path("candidates");
       CsvRows csv = csv(shortlist(problem, "--all", "--format=csv"));
       assertThat(csv.rows()).hasSize(candidates.size()).hasSizeGreaterThan(3);
@@ -30,7 +40,8 @@ class CsvTest {
   void aCheckIsItsJsonFlattened() {
     String thick = Run.DESIGN.replace("wire_diameter: 1.3 mm", "wire_diameter: 7 mm");
     String wide = thick.replace("mean_diameter: 10.53 mm", "mean_diameter: 60 mm");
-    for (String problem : new String[] {Run.DESIGN, Run.WEAK, wide}) {
+    String beyond = Run.DESIGN + "overtravel: {length: 21 mm}\n";
+    for (String problem : new String[] {Run.DESIGN, Run.WEAK, beyond, wide}) {
       JsonNode json = Run.reading(problem, "check", "-", "--format=json").json();
       CsvRows csv = csv(Run.reading(problem, "check", "-", "--format=csv"));
       assertThat(csv.rows()).hasSize(1);

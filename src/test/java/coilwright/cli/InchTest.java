@@ -43,7 +43,8 @@ class InchTest {
   @Test
   void everyNumberOfAShortlistIsTheMetricOneConverted() {
     String twins = Run.VALVE.replace("spring:", "springs_in_parallel: 2\nspring:");
-    for (String problem : new String[] {Run.VALVE, twins}) {
+    String beyond = Run.VALVE + "overtravel: {length: 21 mm}\n";
+    for (String problem : new String[] {Run.VALVE, twins, beyond}) {
       converted(problem, "shortlist", "-", "--all");
     }
   }
