@@ -28,8 +28,8 @@ import org.openjdk.jmh.annotations.Warmup;
 @Threads(1)
 public class SearchBenchmark {
 
-  /** Which problem: typical, loose, infeasible, or typical over both series for every grade. */
-  @Param({"typical", "loose", "infeasible", "wide"})
+  /** Which problem: see the comment at the head of each file. */
+  @Param({"typical", "loose", "infeasible", "whole", "stroke"})
   public String problem;
 
   private Workload workload;
