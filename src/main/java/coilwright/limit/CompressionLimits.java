@@ -9,7 +9,6 @@ import coilwright.source.Citation;
 import coilwright.source.Source;
 import coilwright.spring.CompressionState;
 import coilwright.spring.EndType;
-import coilwright.spring.Family;
 import coilwright.spring.GapSum;
 import coilwright.spring.LoadPoint;
 import coilwright.spring.Method;
@@ -110,31 +109,8 @@ public final class CompressionLimits {
   }
 
   private void pitchAngle(double greatest) {
-    limits.add(
-        new ValueLimit<>(
-            new Check(LimitName.PITCH_ANGLE, Side.MAX, Dimension.ANGLE, "free state"),
-            state -> state.spring().pitchAngle(),
-            state -> greatest,
-            source(OptionalDouble.of(greatest), USUAL.maxPitchAngle(), PRACTICE),
-            false,
-            CompressionLimits::steepest));
-  }
-
-  /**
-   * The pitch angle falls along a family, but for plain and ground ends it rises up to half a coil:
-   * it goes with the cube root of n over n + 1. Where the lengths follow from the travel, the pitch
-   * falls to the wire's and then the coil's narrowing tells.
-   */
-  private static double[] steepest(Family<CompressionState> family) {
-    AlongFamily along = new AlongFamily(family);
-    if (along.lengthsOpen()) {
-      return Extremes.between(
-          family.fewestCoils(),
-          family.mostCoils(),
-          coils -> along.pitchAt(coils) / along.meanDiameterAt(coils));
-    }
-    boolean rises = family.endForm().equals(EndType.PLAIN_GROUND.id());
-    return rises ? new double[] {0.5} : new double[0];
+    Citation source = source(OptionalDouble.of(greatest), USUAL.maxPitchAngle(), PRACTICE);
+    limits.add(new PitchAngleBound(greatest, source));
   }
 
   private void band(

@@ -32,8 +32,9 @@ public final class Reach {
 
   /**
    * The coil counts of unrounded springs that hold a limit, without looking for a bound that does
-   * not matter: where the limit has a single bound and holds at the near end of a range, it holds
-   * throughout the range, and its bound is taken for open.
+   * not matter: where the limit has a single bound and holds at the near end of a range, or leaves
+   * a single interval and holds at both ends, it holds throughout the range, and its bounds are
+   * taken for open.
    *
    * @param limit the limit
    * @param trail the family, with the states computed so far
@@ -52,6 +53,9 @@ public final class Reach {
       changes += i > 0 && held[i] != held[i - 1] ? 1 : 0;
     }
     if (changes == 1 && holds(limit, trail, held[0] ? upper : lower)) {
+      return CoilSet.ALL;
+    }
+    if (changes == 2 && !held[0] && holds(limit, trail, lower) && holds(limit, trail, upper)) {
       return CoilSet.ALL;
     }
     return changes == 0 ? held[0] ? CoilSet.ALL : CoilSet.EMPTY : union(limit, trail, cuts, held);

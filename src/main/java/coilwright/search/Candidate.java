@@ -54,6 +54,17 @@ public record Candidate<S extends State>(S state, List<Finding> findings) {
     return true;
   }
 
+  /** The limits it fails. */
+  Set<LimitName> failed() {
+    Set<LimitName> failed = EnumSet.noneOf(LimitName.class);
+    for (Finding finding : findings) {
+      if (!finding.holds()) {
+        failed.add(finding.check().limit());
+      }
+    }
+    return failed;
+  }
+
   /** The smallest margin over the stress checks [-]; empty where no stress is judged. */
   public OptionalDouble leastMargin() {
     double least = Double.POSITIVE_INFINITY;

@@ -44,16 +44,16 @@ final class Decisive<S extends State> {
 
   /**
    * The limits that may decide: of two that cross only these, for without another they still cross;
-   * else those that leave less than all, or any that rounding may break.
+   * else those that leave less than all, and those that some rounded spring fails alone.
    */
   private Set<LimitName> suspects() {
-    if (search.practical().isEmpty()) {
-      Set<LimitName> crossing = Limits.crossing(left.practical());
-      return crossing.isEmpty() ? left.exact().keySet() : crossing;
+    Set<LimitName> crossing = Limits.crossing(left.practical());
+    if (search.practical().isEmpty() && !crossing.isEmpty()) {
+      return crossing;
     }
-    Set<LimitName> every = EnumSet.noneOf(LimitName.class);
-    search.limits().forEach(limit -> every.add(limit.name()));
-    return every;
+    Set<LimitName> suspects = EnumSet.copyOf(search.failedAlone());
+    suspects.addAll(left.exact().keySet());
+    return suspects;
   }
 
   private boolean holdsWithout(LimitName name) {

@@ -8,8 +8,10 @@ import coilwright.problem.LimitName;
 import coilwright.spring.Family;
 import coilwright.spring.State;
 import java.util.ArrayList;
+import java.util.EnumSet;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 
 /**
  * Searches one wire: what every limit leaves of its family, the practical counts in what they leave
@@ -23,6 +25,7 @@ final class WireSearch<S extends State> {
   private final CoilStep step;
   private final Limits left;
   private final CoilSet practical;
+  private final Set<LimitName> failedAlone = EnumSet.noneOf(LimitName.class);
 
   WireSearch(Family<S> family, List<Limit<S>> limits, CoilStep step) {
     this.source = family;
@@ -42,9 +45,23 @@ final class WireSearch<S extends State> {
   private List<Candidate<S>> candidates() {
     List<Candidate<S>> held = new ArrayList<>();
     for (double coils : step.in(practical)) {
-      judged(coils).filter(Candidate::holds).ifPresent(held::add);
+      judged(coils).ifPresent(spring -> take(spring, held));
     }
     return held;
+  }
+
+  private void take(Candidate<S> spring, List<Candidate<S>> held) {
+    Set<LimitName> failed = spring.failed();
+    if (failed.isEmpty()) {
+      held.add(spring);
+    } else if (failed.size() == 1) {
+      failedAlone.addAll(failed);
+    }
+  }
+
+  /** The limits that some practical spring judged so far fails as the only one. */
+  Set<LimitName> failedAlone() {
+    return failedAlone;
   }
 
   /** The part of a set in which the family has springs. */
