@@ -49,8 +49,12 @@ class ResultsTest {
     "flap-return.yaml, 0",
     "pump-diaphragm.yaml, 0",
     "mist-nozzle.yaml, 0",
+    "backwash-valve.yaml, 0",
+    "float-valve.yaml, 0",
+    "plunger-pump.yaml, 0",
     "check-valve-offer.yaml, 3",
-    "infeasible/lid-counterbalance.yaml, 3"
+    "infeasible/lid-counterbalance.yaml, 3",
+    "infeasible/cold-frame-prop.yaml, 3"
   })
   void aProblemEndsWithItsStatus(String name, int status) throws IOException {
     Path problem = Path.of("problems").resolve(name);
