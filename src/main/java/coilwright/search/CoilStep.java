@@ -7,18 +7,28 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.function.DoublePredicate;
 
-/**
- * The practical coil counts: the positive multiples of a step, reckoned in decimal.
- *
- * @param size the step [-]
- */
-public record CoilStep(double size) {
+/** The practical coil counts: the positive multiples of a step, reckoned in decimal. */
+public final class CoilStep {
 
   private static final double TOLERANCE = 1e-9;
 
-  /** Refuses a step that is not positive and finite. */
-  public CoilStep {
-    Require.positive(size, "coil step", "-");
+  private final double size;
+  private final BigDecimal decimal;
+
+  /**
+   * A step.
+   *
+   * @param size the step [-]
+   * @throws IllegalArgumentException if it is not positive and finite
+   */
+  public CoilStep(double size) {
+    this.size = Require.positive(size, "coil step", "-");
+    this.decimal = BigDecimal.valueOf(size);
+  }
+
+  /** The step [-]. */
+  public double size() {
+    return size;
   }
 
   /**
@@ -81,6 +91,6 @@ public record CoilStep(double size) {
   }
 
   private double times(long k) {
-    return BigDecimal.valueOf(size).multiply(BigDecimal.valueOf(k)).doubleValue();
+    return decimal.multiply(BigDecimal.valueOf(k)).doubleValue();
   }
 }

@@ -4,7 +4,9 @@ import coilwright.limit.CoilSet;
 import coilwright.limit.Finding;
 import coilwright.problem.LimitName;
 import coilwright.spring.State;
+import java.util.ArrayList;
 import java.util.EnumMap;
+import java.util.EnumSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
@@ -14,6 +16,7 @@ final class Rejection<S extends State> {
 
   private final WireSearch<S> search;
   private final Limits left;
+  private Reason reason;
   private Conflict conflict;
   private Set<LimitName> ruledOutBy;
 
@@ -29,27 +32,47 @@ final class Rejection<S extends State> {
   Set<LimitName> ruledOutBy() {
     if (ruledOutBy == null) {
       Set<LimitName> decisive = new Decisive<>(search).limits();
-      ruledOutBy = decisive.isEmpty() ? conflict().limits() : decisive;
+      ruledOutBy = decisive.isEmpty() ? reason().names() : decisive;
     }
     return ruledOutBy;
   }
 
-  /** The limits that cannot hold together; worked out once. */
+  /** The limits that cannot hold together, each with all that it leaves; worked out once. */
   Conflict conflict() {
     if (conflict == null) {
-      conflict = inConflict();
+      List<Conflict.Part> parts = new ArrayList<>();
+      for (Conflict.Part part : reason().parts()) {
+        parts.add(reason().rounded() ? part : whole(part));
+      }
+      conflict = new Conflict(search.family().wire(), search.family().endForm(), parts);
     }
     return conflict;
   }
 
-  private Conflict inConflict() {
-    List<Conflict.Part> parts = new Explanation(sets()).parts();
-    if (parts.isEmpty()) {
-      parts = new Explanation(afterRounding()).parts();
-    } else {
-      parts = parts.stream().map(this::whole).toList();
+  /**
+   * Why there is none.
+   *
+   * @param parts the limits, each with what was looked for of it
+   * @param rounded whether only rounding keeps the wire out
+   */
+  private record Reason(List<Conflict.Part> parts, boolean rounded) {
+
+    Set<LimitName> names() {
+      Set<LimitName> names = EnumSet.noneOf(LimitName.class);
+      parts.forEach(part -> names.add(part.limit()));
+      return names;
     }
-    return new Conflict(search.family().wire(), search.family().endForm(), parts);
+  }
+
+  private Reason reason() {
+    if (reason == null) {
+      List<Conflict.Part> parts = new Explanation(sets()).parts();
+      reason =
+          parts.isEmpty()
+              ? new Reason(new Explanation(afterRounding()).parts(), true)
+              : new Reason(parts, false);
+    }
+    return reason;
   }
 
   /** A part with all that its limit leaves by itself, bounds included that others outdo. */
