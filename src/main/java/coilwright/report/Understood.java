@@ -46,6 +46,10 @@ final class Understood {
     if (problem.design().isEmpty()) {
       words.make(problem.make());
     }
+    words.treatment();
+    if (problem.design().isEmpty()) {
+      words.steps(problem.make());
+    }
     words.seats();
     new UnderstoodLimits(problem, grades).addTo(words.table);
     return words.table.text("  ");
@@ -135,12 +139,19 @@ final class Understood {
             + (assumed ? " (assumed: common grades, supply " + make.supply().word() + ")" : ""));
     table.row("wire", wire(make));
     table.row("ends", String.join(", ", make.ends().stream().map(EndType::id).toList()));
-    if (make.setRemoved()) {
+  }
+
+  /** What is done to the spring, of a list and of a checked spring alike. */
+  private void treatment() {
+    if (problem.setRemoved()) {
       table.row("set", "removed: pressed solid once before use");
     }
-    if (make.coating() > 0) {
-      table.row("coating", units.brief(Dimension.LENGTH, make.coating(), 4) + " thick");
+    if (problem.coating() > 0) {
+      table.row("coating", units.brief(Dimension.LENGTH, problem.coating(), 4) + " thick");
     }
+  }
+
+  private void steps(Make make) {
     table.row(
         "steps",
         "coils "

@@ -26,6 +26,15 @@ class CheckTest {
   }
 
   @Test
+  void theTreatmentOfTheSpringIsSaidBack() {
+    assertThat(Run.reading(Run.DESIGN, "check", "-").out()).doesNotContain("  set ", "  coating ");
+    String treated = Run.DESIGN + "  set_removed: true\n  coating: {thickness: 8 um}\n";
+    assertThat(Run.reading(treated, "check", "-").found(Status.FOUND).out())
+        .containsPattern("(?m)^  set +removed: pressed solid once before use$")
+        .containsPattern("(?m)^  coating +0\\.008 mm thick$");
+  }
+
+  @Test
   void loadBeyondSolidIsStatusThree() {
     String tight = Run.DESIGN.replace("length: 22 mm", "length: 12 mm");
     Run run = Run.reading(tight, "check", "-", "--format=json").found(Status.NOTHING);
