@@ -23,7 +23,7 @@ final class MaterialsCommand implements Callable<Integer> {
   @Parameters(
       paramLabel = "ID",
       arity = "0..*",
-      description = "Grades to print; all where none is named.")
+      description = "Grades to print in every size; all where none is named, text in some sizes.")
   private List<String> wanted;
 
   @Mixin private FormatOptions format;
@@ -40,7 +40,8 @@ final class MaterialsCommand implements Callable<Integer> {
     result.refuseBadTarget();
     Catalogue catalogue = Catalogue.load();
     List<String> ids = wanted == null ? catalogue.gradeIds() : known(catalogue.gradeIds());
-    result.deliver(format.of(new Grades(catalogue, ids), UnitSystem.METRIC), terminal);
+    result.deliver(
+        format.of(new Grades(catalogue, ids, wanted != null), UnitSystem.METRIC), terminal);
     return Status.FOUND;
   }
 

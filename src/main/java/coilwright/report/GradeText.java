@@ -11,7 +11,7 @@ import java.util.OptionalDouble;
 /** A wire grade as text. */
 final class GradeText {
 
-  private static final int SIZES_IN_TEXT = 7;
+  private static final int SIZES_OF_A_SPREAD = 7;
 
   private final WireGrade grade;
   private final OutputUnits units;
@@ -22,15 +22,25 @@ final class GradeText {
   }
 
   /**
-   * What it is, its properties over a spread of sizes, and the sources.
+   * What it is, the sources, and its properties over its sizes.
    *
    * @param grade the grade
    * @param wires its wires in every size of its usual series
+   * @param everySize whether all of them are shown; if not, a spread and a line that says so
    * @param units the units shown
    */
-  static String of(WireGrade grade, List<Wire> wires, OutputUnits units) {
+  static String of(WireGrade grade, List<Wire> wires, boolean everySize, OutputUnits units) {
     GradeText text = new GradeText(grade, units);
-    return grade.id() + "  " + grade.name() + "\n" + text.facts() + text.properties(wires);
+    List<Wire> shown = everySize ? wires : spread(wires);
+    String left =
+        shown.size() < wires.size()
+            ? "  "
+                + shown.size()
+                + " of "
+                + wires.size()
+                + " sizes; name the grade to see them all\n"
+            : "";
+    return grade.id() + "  " + grade.name() + "\n" + text.facts() + text.properties(shown) + left;
   }
 
   private String facts() {
@@ -79,7 +89,7 @@ final class GradeText {
         "G" + stress,
         "E" + stress,
         "data");
-    for (Wire wire : spread(wires)) {
+    for (Wire wire : wires) {
       table.row(
           Wires.size(wire),
           units.fixed(Dimension.LENGTH, wire.diameter(), 3),
@@ -93,12 +103,12 @@ final class GradeText {
   }
 
   private static List<Wire> spread(List<Wire> wires) {
-    if (wires.size() <= SIZES_IN_TEXT) {
+    if (wires.size() <= SIZES_OF_A_SPREAD) {
       return wires;
     }
     List<Wire> spread = new ArrayList<>();
-    for (int i = 0; i < SIZES_IN_TEXT; i++) {
-      spread.add(wires.get(i * (wires.size() - 1) / (SIZES_IN_TEXT - 1)));
+    for (int i = 0; i < SIZES_OF_A_SPREAD; i++) {
+      spread.add(wires.get(i * (wires.size() - 1) / (SIZES_OF_A_SPREAD - 1)));
     }
     return spread;
   }

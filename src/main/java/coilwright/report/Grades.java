@@ -18,26 +18,30 @@ public final class Grades implements Result {
 
   private final Catalogue catalogue;
   private final List<String> ids;
+  private final boolean everySize;
 
   /**
    * Grades to show.
    *
    * @param catalogue the catalogue
    * @param ids the grades wanted, in order
+   * @param everySize whether text shows every size of the usual series, and not a spread of them
    */
-  public Grades(Catalogue catalogue, List<String> ids) {
+  public Grades(Catalogue catalogue, List<String> ids, boolean everySize) {
     this.catalogue = catalogue;
     this.ids = List.copyOf(ids);
+    this.everySize = everySize;
   }
 
-  /** What they are, their properties over a spread of sizes, and the sources. */
+  /** What they are, the sources, and their properties over the sizes wanted. */
   @Override
   public String text(UnitSystem units) {
     OutputUnits shown = OutputUnits.ofText(units);
     StringBuilder text = new StringBuilder();
     for (String id : ids) {
       WireGrade grade = catalogue.grade(id);
-      text.append(text.isEmpty() ? "" : "\n").append(GradeText.of(grade, wires(grade), shown));
+      text.append(text.isEmpty() ? "" : "\n")
+          .append(GradeText.of(grade, wires(grade), everySize, shown));
     }
     return text.toString();
   }

@@ -22,6 +22,16 @@ class CatalogueCommandsTest {
   }
 
   @Test
+  void textOfANamedGradeHasEverySizeAndTextOfAllASpread() {
+    int sizes = Run.of("materials", "music-wire", "--format=csv").out().split("\n").length - 1;
+    String named = Run.of("materials", "music-wire").found(Status.FOUND).out();
+    assertThat(named.lines().filter(line -> line.endsWith("  seen"))).hasSize(sizes);
+    assertThat(named).doesNotContain("name the grade");
+    assertThat(Run.of("materials").found(Status.FOUND).out())
+        .contains("  7 of " + sizes + " sizes; name the grade to see them all\n");
+  }
+
+  @Test
   void wires() {
     assertThat(Run.of("wires").found(Status.FOUND).out()).contains("metric", "music-wire-gauge");
     assertThat(Run.of("wires", "metric").found(Status.FOUND).out())
