@@ -58,6 +58,17 @@ public record WireGrade(
     sources = List.copyOf(sources);
   }
 
+  /** Whether the density was seen; all its sources count. */
+  public Evidence densityEvidence() {
+    Evidence evidence = Evidence.SEEN;
+    for (GradeSource source : sources) {
+      if (source.what().equals(GradeProperty.DENSITY)) {
+        evidence = evidence.and(source.evidence());
+      }
+    }
+    return evidence;
+  }
+
   /**
    * This grade drawn to a size.
    *

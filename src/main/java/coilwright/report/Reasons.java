@@ -1,6 +1,7 @@
 package coilwright.report;
 
 import coilwright.limit.CoilSet;
+import coilwright.material.Wire;
 import coilwright.search.Conflict;
 import java.util.ArrayList;
 import java.util.List;
@@ -20,7 +21,8 @@ final class Reasons {
   }
 
   private static String wire(Conflict conflict) {
-    return Wires.text(conflict.wire()) + ", " + conflict.endForm() + " ends";
+    Wire wire = conflict.wire();
+    return Wires.size(wire) + " " + Wires.markedGrade(wire) + ", " + conflict.endForm() + " ends";
   }
 
   private static String coils(CoilSet set) {

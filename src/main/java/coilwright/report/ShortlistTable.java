@@ -8,7 +8,6 @@ import coilwright.rank.Line;
 import coilwright.rank.Ranked;
 import coilwright.rank.Varied;
 import coilwright.search.Candidate;
-import coilwright.source.Evidence;
 import coilwright.spring.CompressionState;
 import coilwright.unit.Dimension;
 import java.util.ArrayList;
@@ -169,7 +168,7 @@ final class ShortlistTable {
     Wire wire = candidate.state().wire();
     List<String> cells = new ArrayList<>();
     cells.add(Integer.toString(spring.rank()));
-    cells.add(material(wire));
+    cells.add(Wires.markedGrade(wire));
     cells.add(Wires.sizeWithDiameter(wire, units));
     cells.add(candidate.state().endForm());
     for (Column column : columns) {
@@ -179,10 +178,6 @@ final class ShortlistTable {
     cells.add(margin.isPresent() ? Numbers.margin(margin.getAsDouble()) : "-");
     cells.add(candidate.limiting().map(ShortlistTable::limiting).orElse("-"));
     table.row(cells.toArray(String[]::new));
-  }
-
-  private static String material(Wire wire) {
-    return wire.grade().id() + (wire.evidence() == Evidence.MEMORY ? " (memory)" : "");
   }
 
   private static String limiting(Finding finding) {
@@ -203,7 +198,7 @@ final class ShortlistTable {
   private String other(CompressionState lead, Ranked<CompressionState> other) {
     CompressionState state = other.candidate().state();
     List<String> words = new ArrayList<>();
-    words.add("#" + other.rank() + " " + material(state.wire()));
+    words.add("#" + other.rank() + " " + Wires.markedGrade(state.wire()));
     words.add(Wires.sizeWithDiameter(state.wire(), units));
     if (state.coils() != lead.coils()) {
       words.add("n " + CompressionQuantities.of("active_coils").text(state, units));

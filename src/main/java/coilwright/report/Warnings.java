@@ -5,6 +5,7 @@ import coilwright.problem.Problem;
 import coilwright.rank.Ranked;
 import coilwright.source.Evidence;
 import coilwright.spring.CompressionState;
+import coilwright.spring.Method;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.function.Predicate;
@@ -59,6 +60,18 @@ final class Warnings {
         state -> state.wire().evidence() == Evidence.MEMORY);
     warn(
         warnings,
+        "density from memory, on which mass, cost and surge frequency rest",
+        springs,
+        ranked,
+        state -> state.wire().grade().densityEvidence() == Evidence.MEMORY);
+    warn(
+        warnings,
+        "diameter tolerance not seen for the grade but taken for it, on which the solid length rests",
+        springs,
+        ranked,
+        state -> takenTolerance(problem, state));
+    warn(
+        warnings,
         "would buckle without the bore or rod that guides it, and rubs there",
         springs,
         ranked,
@@ -84,6 +97,14 @@ final class Warnings {
     if (!ids.isEmpty()) {
       warnings.add(new Warning(what, ids, ranked ? rows : List.of()));
     }
+  }
+
+  /**
+   * The solid length by EN 13906-1 is that of the greatest wire; the handbook takes the nominal.
+   */
+  private static boolean takenTolerance(Problem problem, CompressionState state) {
+    return problem.limits().method() == Method.EN_13906
+        && state.wire().diameterToleranceEvidence() == Evidence.MEMORY;
   }
 
   private static boolean buckles(Problem problem, CompressionState state) {

@@ -2,6 +2,7 @@ package coilwright.report;
 
 import coilwright.material.Wire;
 import coilwright.material.WireSeries;
+import coilwright.source.Evidence;
 import coilwright.unit.Dimension;
 
 /** Wires in words. */
@@ -30,6 +31,11 @@ final class Wires {
     return size.endsWith(unit)
         ? size
         : size + " = " + units.fixed(Dimension.LENGTH, wire.diameter(), 3) + unit;
+  }
+
+  /** The material, marked where strength, moduli or size are from memory. */
+  static String markedGrade(Wire wire) {
+    return wire.grade().id() + (wire.evidence() == Evidence.MEMORY ? " (memory)" : "");
   }
 
   /** Size and material: "1.40 mm music-wire". */

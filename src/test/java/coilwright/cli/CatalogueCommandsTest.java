@@ -3,6 +3,8 @@ package coilwright.cli;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import com.fasterxml.jackson.databind.JsonNode;
+import java.util.ArrayList;
+import java.util.List;
 import org.junit.jupiter.api.Test;
 
 /** What materials, wires and starter print. */
@@ -83,6 +85,66 @@ class CatalogueCommandsTest {
     String unnamed = problem.replaceAll("(?s)make:.*", "make: {supply: any}\n");
     Run common = Run.reading(unnamed, "shortlist", "-", "--format", "json", "--top", "500");
     assertThat(common.json().path("candidates").findValuesAsText("data")).containsOnly("seen");
+  }
+
+  @Test
+  void aWireFromMemorySaysSoWhereNothingFitsToo() {
+    String problem = Run.CRAMPED.replace("[music-wire]", "[music-wire, chrome-silicon]");
+    assertThat(Run.reading(problem, "shortlist", "-").found(Status.NOTHING).out())
+        .contains(" music-wire, ", " chrome-silicon (memory), ")
+        .doesNotContain("music-wire (memory)");
+    Run json = Run.reading(problem, "shortlist", "-", "--format=json").found(Status.NOTHING);
+    for (JsonNode conflict : json.json().path("conflicts")) {
+      String material = conflict.path("material").asText();
+      assertThat(conflict.path("reason").asText().contains(" (memory), "))
+          .isEqualTo(material.equals("chrome-silicon"));
+    }
+  }
+
+  @Test
+  void densityFromMemoryIsSaidOfTheSpringsWithIt() {
+    String both = loose("music-wire, en-10270-3-1.4310-ns");
+    assertThat(warnings(both))
+        .anyMatch(
+            line ->
+                line.startsWith("density from memory, on which mass, cost and surge frequency rest")
+                    && line.contains("1.4310-ns/")
+                    && !line.contains("music-wire/"));
+    String own =
+        loose("lot")
+            + "own_materials: [{id: lot, like: en-10270-3-1.4310-ns, density: 7900 kg/m^3}]\n";
+    assertThat(warnings(own)).noneMatch(line -> line.contains("density"));
+    assertThat(warnings(own.replace(", density: 7900 kg/m^3", "")))
+        .anyMatch(line -> line.contains("density"));
+  }
+
+  @Test
+  void aToleranceTakenForTheGradeIsSaidWhereTheSolidLengthRestsOnIt() {
+    String handbook = loose("stainless-302, en-10270-1-sh");
+    assertThat(warnings(handbook)).noneMatch(line -> line.contains("tolerance"));
+    assertThat(warnings(handbook + "limits: {stress_basis: en-13906}\n"))
+        .anyMatch(
+            line ->
+                line.startsWith("diameter tolerance not seen for the grade but taken for it")
+                    && line.contains("stainless-302/")
+                    && !line.contains("-sh/"));
+  }
+
+  private static String loose(String materials) {
+    return """
+        spring: compression
+        loads: [{length: 32 mm, force: 18 N}, {length: 22 mm, force: 45 N}]
+        make: {materials: [%s], wire_series: metric}
+        rank: {top: 500}
+        """
+        .replace("%s", materials);
+  }
+
+  private static List<String> warnings(String problem) {
+    List<String> warnings = new ArrayList<>();
+    Run run = Run.reading(problem, "shortlist", "-", "--format=json").found(Status.FOUND);
+    run.json().path("warnings").forEach(line -> warnings.add(line.asText()));
+    return warnings;
   }
 
   @Test
