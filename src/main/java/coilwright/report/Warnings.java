@@ -76,6 +76,12 @@ final class Warnings {
         springs,
         ranked,
         state -> buckles(problem, state));
+    warn(
+        warnings,
+        "overtravel no farther than the loads, so that nothing more is asked",
+        springs,
+        ranked,
+        Warnings::overtravelWithinLoads);
     return warnings;
   }
 
@@ -105,6 +111,12 @@ final class Warnings {
   private static boolean takenTolerance(Problem problem, CompressionState state) {
     return problem.limits().method() == Method.EN_13906
         && state.wire().diameterToleranceEvidence() == Evidence.MEMORY;
+  }
+
+  /** Where lengths are found, only the spring tells which of its lengths is the shortest. */
+  private static boolean overtravelWithinLoads(CompressionState state) {
+    return state.overtravel().isPresent()
+        && !(state.overtravel().get().length() < state.mostCompressed().length());
   }
 
   private static boolean buckles(Problem problem, CompressionState state) {

@@ -42,6 +42,30 @@ class CheckTest {
   }
 
   @Test
+  void anOvertravelWithinTheLoadsIsSaid() {
+    String force =
+        Run.DESIGN
+            .replaceAll("(?s)loads:.*envelope", "loads: [{force: 45 N}]\nenvelope")
+            .concat("overtravel: {length: 21 mm}\n");
+    String warning = "overtravel no farther than the loads, so that nothing more is asked";
+    assertThat(Run.reading(force, "check", "-").out())
+        .contains("to 21 mm, no force asked")
+        .doesNotContain(warning);
+    assertThat(Run.reading(force.replace("21 mm", "30 mm"), "check", "-").out()).contains(warning);
+    String stroke =
+        """
+        spring: compression
+        loads: [{force: 25 N}, {force: 70 N}]
+        stroke: 15 mm
+        overtravel: {length: 30 mm}
+        make: {materials: [en-10270-1-sh], ends: [squared-ground]}
+        """;
+    assertThat(Run.reading(stroke, "shortlist", "-").out()).contains(warning + ": #1, #2");
+    assertThat(Run.reading(stroke.replace("30 mm", "14 mm"), "shortlist", "-").out())
+        .contains(warning + ": #3, #4\n");
+  }
+
+  @Test
   void fileForShortlistIsRefused() {
     Run.reading(Run.VALVE, "check", "-").refused("design", "missing", "shortlist needs none");
   }
