@@ -43,11 +43,13 @@ public final class CompressionLimits {
 
   private final Method method;
   private final boolean overtravel;
+  private final String covered;
   private final List<Limit<CompressionState>> limits = new ArrayList<>();
 
   private CompressionLimits(Problem problem) {
     this.method = problem.limits().method();
     this.overtravel = problem.overtravel().isPresent();
+    this.covered = problem.coating() > 0 ? ", coating included" : "";
   }
 
   /**
@@ -74,7 +76,7 @@ public final class CompressionLimits {
     CompressionLimits all = new CompressionLimits(problem);
     all.stress(problem.limits(), StressBasis.of(all.method, problem.setRemoved()));
     all.proportions(problem.limits());
-    all.limits.addAll(SpaceLimits.of(problem.envelope(), all.method));
+    all.limits.addAll(SpaceLimits.of(problem.envelope(), all.method, all.covered));
     all.travel(problem.limits());
     all.stability(problem);
     all.surge(problem.limits());
@@ -161,9 +163,11 @@ public final class CompressionLimits {
                 LimitName.BEYOND_SOLID,
                 Side.MAX,
                 Dimension.LENGTH,
-                overtravel
-                    ? "solid length, against the shortest length, overtravel included"
-                    : "solid length, against the length at the most compressed load"),
+                "solid length"
+                    + covered
+                    + (overtravel
+                        ? ", against the shortest length, overtravel included"
+                        : ", against the length at the most compressed load")),
             CompressionState::solidLength,
             state -> state.extreme().length(),
             method.solidCitation(),
@@ -174,7 +178,7 @@ public final class CompressionLimits {
                 LimitName.BEYOND_SOLID,
                 Side.MIN,
                 Dimension.LENGTH,
-                "pitch, free state, against the wire diameter"),
+                "pitch, free state, against the wire diameter" + covered),
             state -> state.spring().pitch(),
             CompressionState::coatedDiameter,
             EndType.CITATION,

@@ -22,16 +22,24 @@ final class SpaceLimits {
 
   private final Envelope space;
   private final Method method;
+  private final String covered;
   private final List<Limit<CompressionState>> limits = new ArrayList<>();
 
-  private SpaceLimits(Envelope space, Method method) {
+  private SpaceLimits(Envelope space, Method method, String covered) {
     this.space = space;
     this.method = method;
+    this.covered = covered;
   }
 
-  /** Every limit of the space, in the order of the names. */
-  static List<Limit<CompressionState>> of(Envelope space, Method method) {
-    SpaceLimits all = new SpaceLimits(space, method);
+  /**
+   * Every limit of the space, in the order of the names.
+   *
+   * @param space the space
+   * @param method whose rules reckon the solid length and the growth
+   * @param covered what a definition says of the wire's coating, after a comma; empty if bare
+   */
+  static List<Limit<CompressionState>> of(Envelope space, Method method, String covered) {
+    SpaceLimits all = new SpaceLimits(space, method, covered);
     all.clearances();
     all.nominal(
         LimitName.OUTSIDE_DIAMETER,
@@ -54,7 +62,11 @@ final class SpaceLimits {
     if (space.maxSolidLength().isPresent()) {
       all.limits.add(
           ValueLimit.fixed(
-              new Check(LimitName.SOLID_LENGTH, Side.MAX, Dimension.LENGTH, method.solidMeans()),
+              new Check(
+                  LimitName.SOLID_LENGTH,
+                  Side.MAX,
+                  Dimension.LENGTH,
+                  method.solidMeans() + covered),
               CompressionState::solidLength,
               space.maxSolidLength().getAsDouble(),
               method.solidCitation(),
@@ -86,6 +98,7 @@ final class SpaceLimits {
                   Dimension.LENGTH,
                   "outside diameter at solid, "
                       + method.growthMeans()
+                      + covered
                       + ", against bore less "
                       + clearance()),
               CompressionState::outsideDiameterAtSolid,
@@ -101,7 +114,7 @@ final class SpaceLimits {
                   LimitName.ROD,
                   Side.MIN,
                   Dimension.LENGTH,
-                  "inside diameter, free state, against rod plus " + clearance()),
+                  "inside diameter, free state" + covered + ", against rod plus " + clearance()),
               CompressionState::clearInsideDiameter,
               state -> rod + clearance(state),
               space.clearanceAssumed() ? CoilTolerance.citation() : ASKED,

@@ -35,6 +35,18 @@ class CheckTest {
   }
 
   @Test
+  void checksSayWhereTheCoatingCounts() {
+    String bare = Run.DESIGN;
+    assertThat(Run.reading(bare, "check", "-").out()).doesNotContain("coating included");
+    assertThat(Run.reading(bare + "  coating: {thickness: 8 um}\n", "check", "-").out())
+        .contains("outside diameter at solid, ends held, coating included, against bore less")
+        .contains("inside diameter, free state, coating included, against rod plus")
+        .contains("nominal wire diameter, coating included")
+        .contains("solid length, coating included, against the length at the most compressed load")
+        .contains("against the wire diameter, coating included");
+  }
+
+  @Test
   void loadBeyondSolidIsStatusThree() {
     String tight = Run.DESIGN.replace("length: 22 mm", "length: 12 mm");
     Run run = Run.reading(tight, "check", "-", "--format=json").found(Status.NOTHING);
