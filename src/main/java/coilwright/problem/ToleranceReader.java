@@ -13,6 +13,10 @@ final class ToleranceReader implements ValueReader<ToleranceAsked> {
 
   @Override
   public Optional<ToleranceAsked> read(Node node, Spot spot) {
+    if (node instanceof Node.Sequence) {
+      spot.refuse(node, accepted());
+      return Optional.empty();
+    }
     return node instanceof Node.Mapping
         ? Section.open(node, spot).flatMap(ToleranceReader::sides)
         : both.read(node, spot).map(side -> new ToleranceAsked(side, side));
