@@ -57,7 +57,7 @@ public final class Program {
         .print(
             command
                 + ": "
-                + PlainText.line(WrongUsage.words(problem))
+                + PlainText.line(WrongUsage.words(problem, args))
                 + "\nTry: "
                 + command
                 + " --help\n");

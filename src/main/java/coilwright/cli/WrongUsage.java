@@ -4,6 +4,7 @@ import coilwright.unit.Spelling;
 import coilwright.unit.Words;
 import java.util.List;
 import java.util.Locale;
+import java.util.Optional;
 import java.util.Set;
 import picocli.CommandLine.MissingParameterException;
 import picocli.CommandLine.Model.ArgSpec;
@@ -27,10 +28,15 @@ final class WrongUsage {
    * What is wrong with a command line.
    *
    * @param problem what the parser found
+   * @param args the whole command line
    * @return one line without its end
    */
-  static String words(ParameterException problem) {
+  static String words(ParameterException problem, String... args) {
     WrongUsage usage = new WrongUsage(problem.getCommandLine().getCommandSpec());
+    Optional<String> stray = usage.optionBefore(problem, args);
+    if (stray.isPresent()) {
+      return usage.noOption(stray.get());
+    }
     if (problem instanceof UnmatchedArgumentException unmatched) {
       return usage.tooMuch(unmatched.getUnmatched());
     }
@@ -44,6 +50,21 @@ final class WrongUsage {
       return unreadable(problem, unreadable);
     }
     return problem.getMessage();
+  }
+
+  /**
+   * The unknown option right before a word that could not be read: the word was meant as its value,
+   * not as an argument.
+   */
+  private Optional<String> optionBefore(ParameterException problem, String... args) {
+    ArgSpec argument = problem.getArgSpec();
+    boolean word = argument != null && argument.isPositional() && problem.getValue() != null;
+    int before = word ? List.of(args).indexOf(problem.getValue()) - 1 : -1;
+    return Optional.of(before)
+        .filter(at -> at >= 0)
+        .map(at -> args[at])
+        .filter(option -> isOption(option) && !option.equals("--"))
+        .filter(option -> command.findOption(option) == null);
   }
 
   private String tooMuch(List<String> left) {

@@ -77,6 +77,22 @@ class BadCommandLineTest {
             + " --units, --version",
         "materials",
         "--rank");
+    refused(
+        "coilwright starter: --format: no such option; accepted: --force, --help, --out, --schema,"
+            + " --version",
+        "starter",
+        "--schema",
+        "--format",
+        "json");
+    refused(
+        "coilwright wires: --top: no such option; accepted: --force, --format, --help, --out,"
+            + " --units, --version",
+        "wires",
+        "--top",
+        "2");
+    refused(
+        "coilwright starter: KIND: \"json\"; accepted: compression", "starter", "--schema", "json");
+    refused("coilwright starter: KIND: \"json\"; accepted: compression", "starter", "--", "json");
   }
 
   @Test
