@@ -28,6 +28,11 @@ record Shaping<S extends State>(Limit<S> limit) implements Limit<S> {
   }
 
   @Override
+  public double expected(Family<S> family, double from, double to) {
+    return limit.expected(family, from, to);
+  }
+
+  @Override
   public boolean straight() {
     return limit.straight();
   }

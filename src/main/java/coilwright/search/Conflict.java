@@ -32,6 +32,11 @@ public record Conflict(Wire wire, String endForm, List<Part> parts) {
 
   /** The names of its limits. */
   public Set<LimitName> limits() {
+    return names(parts);
+  }
+
+  /** The names in a list of parts. */
+  static Set<LimitName> names(List<Part> parts) {
     Set<LimitName> names = EnumSet.noneOf(LimitName.class);
     parts.forEach(part -> names.add(part.limit()));
     return names;

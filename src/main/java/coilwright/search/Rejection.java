@@ -6,7 +6,6 @@ import coilwright.problem.LimitName;
 import coilwright.spring.State;
 import java.util.ArrayList;
 import java.util.EnumMap;
-import java.util.EnumSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
@@ -32,7 +31,7 @@ final class Rejection<S extends State> {
   Set<LimitName> ruledOutBy() {
     if (ruledOutBy == null) {
       Set<LimitName> decisive = new Decisive<>(search).limits();
-      ruledOutBy = decisive.isEmpty() ? reason().names() : decisive;
+      ruledOutBy = decisive.isEmpty() ? Conflict.names(reason().parts()) : decisive;
     }
     return ruledOutBy;
   }
@@ -55,14 +54,7 @@ final class Rejection<S extends State> {
    * @param parts the limits, each with what was looked for of it
    * @param rounded whether only rounding keeps the wire out
    */
-  private record Reason(List<Conflict.Part> parts, boolean rounded) {
-
-    Set<LimitName> names() {
-      Set<LimitName> names = EnumSet.noneOf(LimitName.class);
-      parts.forEach(part -> names.add(part.limit()));
-      return names;
-    }
-  }
+  private record Reason(List<Conflict.Part> parts, boolean rounded) {}
 
   private Reason reason() {
     if (reason == null) {

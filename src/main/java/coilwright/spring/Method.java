@@ -4,7 +4,6 @@ import coilwright.material.Wire;
 import coilwright.source.Citation;
 import coilwright.source.Source;
 import coilwright.unit.Require;
-import java.util.Optional;
 
 /**
  * Whose rules reckon what is a convention rather than mechanics: the solid length, the growth of
@@ -122,20 +121,5 @@ public enum Method {
       double meanDiameter, double pitch, double wireDiameter, double coating) {
     double wire = wireDiameter + 2 * Require.notNegative(coating, "coating", "mm");
     return outside(meanDiameter, pitch, wire);
-  }
-
-  /**
-   * The method with an id.
-   *
-   * @param id as in problem files
-   * @return the method, or empty
-   */
-  public static Optional<Method> of(String id) {
-    for (Method method : values()) {
-      if (method.id.equals(id)) {
-        return Optional.of(method);
-      }
-    }
-    return Optional.empty();
   }
 }
