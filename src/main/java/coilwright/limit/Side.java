@@ -28,4 +28,15 @@ public enum Side {
   public double slack(double value, double bound) {
     return this == MIN ? value - bound : bound - value;
   }
+
+  /**
+   * Moves a bound so that more values are inside.
+   *
+   * @param bound the bound
+   * @param distance how far, in the same unit
+   * @return the bound moved
+   */
+  double outward(double bound, double distance) {
+    return this == MIN ? bound - distance : bound + distance;
+  }
 }

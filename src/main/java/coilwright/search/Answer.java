@@ -11,7 +11,7 @@ import java.util.Map;
  * @param wires how many wires were tried
  * @param feasible every wire with candidates: its candidates, fewest coils first
  * @param ruledOut how many wires each limit rules out
- * @param conflicts why each wire without a candidate has none, each worked out when first read
+ * @param conflicts why each wire without a candidate has none
  * @param <S> the state of the kind of spring
  */
 public record Answer<S extends State>(

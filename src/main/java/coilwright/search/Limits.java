@@ -2,6 +2,7 @@ package coilwright.search;
 
 import coilwright.limit.CoilSet;
 import coilwright.limit.Limit;
+import coilwright.limit.Loosened;
 import coilwright.limit.Reach;
 import coilwright.limit.Trail;
 import coilwright.problem.LimitName;
@@ -57,6 +58,27 @@ record Limits(Map<LimitName, CoilSet> exact, Map<LimitName, CoilSet> practical) 
     return new Limits(exact, practical);
   }
 
+  /**
+   * Whether the limits may leave a rounded spring: asked one after another until they leave none.
+   *
+   * @param limits the limits
+   * @param trail the family
+   * @param step the practical counts
+   */
+  static <S extends State> boolean mayMeet(List<Limit<S>> limits, Trail<S> trail, CoilStep step) {
+    CoilSet left = CoilSet.of(0, trail.mostCoils());
+    for (Limit<S> limit : limits) {
+      if (!limit.onlyAfterRounding()) {
+        CoilSet set = Reach.within(limit, trail, inRange(left.least(), trail), left.greatest());
+        left = set.isAll() ? left : left.intersect(widened(limit, set, trail, step));
+      }
+      if (left.isEmpty()) {
+        return false;
+      }
+    }
+    return true;
+  }
+
   /** What all names leave together. */
   static CoilSet together(Map<LimitName, CoilSet> sets) {
     return without(sets, null);
@@ -99,36 +121,43 @@ record Limits(Map<LimitName, CoilSet> exact, Map<LimitName, CoilSet> practical) 
   }
 
   /**
-   * Widens a set by what rounding can move, at least one coil step. A limit whose margin turns
-   * nearer to zero than rounding can move it, or that every unrounded spring fails by less than
-   * that, is left to the judging of the rounded springs.
+   * Widens a set by what rounding can move, at least one coil step. Where the margin turns nearer
+   * to zero than rounding can move it, or every unrounded spring fails by less than that, the bound
+   * is moved by as much before.
    */
   private static <S extends State> CoilSet widened(
       Limit<S> limit, CoilSet set, Trail<S> trail, CoilStep step) {
-    if (grazes(limit, trail) || set.isEmpty() && nearlyHolds(limit, trail)) {
-      return CoilSet.ALL;
-    }
-    return set.widen(coils -> step.size() + play(coils, trail));
+    double missing = Math.max(grazing(limit, trail), set.isEmpty() ? nearly(limit, trail) : 0);
+    CoilSet near = missing > 0 ? Reach.of(new Loosened<>(limit, missing), trail) : set;
+    return near.widen(coils -> step.size() + play(coils, trail));
   }
 
-  /** Turns may be sampled, so that the margin is not quite what it comes to there. */
-  private static <S extends State> boolean grazes(Limit<S> limit, Trail<S> trail) {
+  /**
+   * How far the margin may miss at a turn and still be judged rounded, where it turns that near to
+   * zero. Turns may be sampled, so that the margin is not quite what it comes to there.
+   */
+  private static <S extends State> double grazing(Limit<S> limit, Trail<S> trail) {
+    double greatest = 0;
     for (double coils : limit.turns(trail)) {
+      double near = SAMPLED + blur(coils, trail);
       if (inRange(coils, trail) == coils
-          && Math.abs(limit.judge(trail.at(coils)).margin()) <= SAMPLED + blur(coils, trail)) {
-        return true;
+          && Math.abs(limit.judge(trail.at(coils)).margin()) <= near) {
+        greatest = Math.max(greatest, near);
       }
     }
-    return false;
+    return greatest;
   }
 
-  private static <S extends State> boolean nearlyHolds(Limit<S> limit, Trail<S> trail) {
+  /** The same where springs computed so far fail by no more than rounding can move. */
+  private static <S extends State> double nearly(Limit<S> limit, Trail<S> trail) {
+    double greatest = 0;
     for (S known : trail.states()) {
-      if (limit.judge(known).margin() >= -blur(known.coils(), trail)) {
-        return true;
+      double near = blur(known.coils(), trail);
+      if (limit.judge(known).margin() >= -near) {
+        greatest = Math.max(greatest, near);
       }
     }
-    return false;
+    return greatest;
   }
 
   private static double blur(double coils, Trail<?> trail) {

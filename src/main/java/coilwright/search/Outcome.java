@@ -8,20 +8,24 @@ import java.util.Optional;
 import java.util.Set;
 
 /**
- * What came of one wire: candidates, or why there is none.
+ * What came of one wire: candidates, or why there is none. It keeps none of the springs tried on
+ * the way, so that a search of many wires needs little memory.
  *
  * @param candidates every practical coil count that holds, fewest coils first
- * @param rejection why there is none; empty where there is one
+ * @param conflict why there is no candidate, in limits that cannot hold together; empty where there
+ *     is one
+ * @param ruledOutBy the limits counted against the wire; none where it has a candidate
  */
-record Outcome<S extends State>(List<Candidate<S>> candidates, Optional<Rejection<S>> rejection) {
+record Outcome<S extends State>(
+    List<Candidate<S>> candidates, Optional<Conflict> conflict, Set<LimitName> ruledOutBy) {
 
-  /** Why there is no candidate, in limits that cannot hold together; empty where there is one. */
-  Optional<Conflict> conflict() {
-    return rejection.map(Rejection::conflict);
+  /** A wire with candidates. */
+  static <S extends State> Outcome<S> of(List<Candidate<S>> candidates) {
+    return new Outcome<>(candidates, Optional.empty(), EnumSet.noneOf(LimitName.class));
   }
 
-  /** The limits counted against the wire where it has no candidate. */
-  Set<LimitName> ruledOutBy() {
-    return rejection.map(Rejection::ruledOutBy).orElseGet(() -> EnumSet.noneOf(LimitName.class));
+  /** A wire without one. */
+  static <S extends State> Outcome<S> of(Rejection<S> rejection) {
+    return new Outcome<>(List.of(), Optional.of(rejection.conflict()), rejection.ruledOutBy());
   }
 }

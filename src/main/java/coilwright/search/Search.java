@@ -8,9 +8,13 @@ import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
+import java.util.stream.IntStream;
 
 /** The search: every wire's family against every limit. */
 public final class Search {
+
+  /** From how many wires on the processors share them: with fewer it takes longer to share. */
+  private static final int MANY = 500;
 
   private Search() {}
 
@@ -27,20 +31,27 @@ public final class Search {
   public static <S extends State> Answer<S> run(
       List<? extends Family<S>> families, List<Limit<S>> limits, CoilStep step, int outsideRange) {
     List<List<Candidate<S>>> feasible = new ArrayList<>();
-    List<Rejection<S>> rejections = new ArrayList<>();
+    List<Conflict> conflicts = new ArrayList<>();
     Map<LimitName, Integer> ruledOut = new EnumMap<>(LimitName.class);
     if (outsideRange > 0) {
       ruledOut.put(LimitName.WIRE_RANGE, outsideRange);
     }
-    for (Family<S> family : families) {
-      Outcome<S> outcome = new WireSearch<>(family, limits, step).outcome();
-      if (outcome.candidates().isEmpty()) {
-        outcome.ruledOutBy().forEach(name -> ruledOut.merge(name, 1, Integer::sum));
-        outcome.rejection().ifPresent(rejections::add);
-      } else {
+    for (Outcome<S> outcome : outcomes(families, limits, step)) {
+      outcome.ruledOutBy().forEach(name -> ruledOut.merge(name, 1, Integer::sum));
+      outcome.conflict().ifPresent(conflicts::add);
+      if (outcome.conflict().isEmpty()) {
         feasible.add(outcome.candidates());
       }
     }
-    return new Answer<>(families.size(), feasible, ruledOut, new Conflicts(rejections));
+    return new Answer<>(families.size(), feasible, ruledOut, conflicts);
+  }
+
+  /** One for each family, in their order, whatever the number of processors. */
+  private static <S extends State> List<Outcome<S>> outcomes(
+      List<? extends Family<S>> families, List<Limit<S>> limits, CoilStep step) {
+    IntStream places = IntStream.range(0, families.size());
+    return (families.size() < MANY ? places : places.parallel())
+        .mapToObj(place -> new WireSearch<S>(families.get(place), limits, step).outcome())
+        .toList();
   }
 }

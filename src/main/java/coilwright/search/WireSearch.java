@@ -38,8 +38,7 @@ final class WireSearch<S extends State> {
 
   Outcome<S> outcome() {
     List<Candidate<S>> candidates = candidates();
-    return new Outcome<>(
-        candidates, candidates.isEmpty() ? Optional.of(new Rejection<>(this)) : Optional.empty());
+    return candidates.isEmpty() ? Outcome.of(new Rejection<>(this)) : Outcome.of(candidates);
   }
 
   private List<Candidate<S>> candidates() {
@@ -96,7 +95,8 @@ final class WireSearch<S extends State> {
     }
     List<Limit<S>> others = new ArrayList<>(limits);
     others.removeIf(limit -> limit.name() == dropped.name());
-    return !new WireSearch<>(other, others, step).candidates().isEmpty();
+    return Limits.mayMeet(others, new Trail<>(other), step)
+        && !new WireSearch<>(other, others, step).candidates().isEmpty();
   }
 
   /** What a limit leaves by itself of the unrounded springs: all its bounds together. */
