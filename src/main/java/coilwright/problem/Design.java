@@ -1,29 +1,31 @@
 package coilwright.problem;
 
 import coilwright.material.WireSize;
-import coilwright.spring.EndType;
 import coilwright.spring.Hand;
 
-/**
- * The one spring that a check judges.
- *
- * @param material id of its grade, catalogue's or own
- * @param wireSize its wire
- * @param meanDiameter D [mm]
- * @param activeCoils n [-]
- * @param freeLength L0 [mm]
- * @param ends how its ends are formed
- * @param hand direction of winding
- * @param setRemoved whether the spring was pressed solid once before use
- * @param coating thickness of what covers the wire [mm], zero for bare wire
- */
-public record Design(
-    String material,
-    WireSize wireSize,
-    double meanDiameter,
-    double activeCoils,
-    double freeLength,
-    EndType ends,
-    Hand hand,
-    boolean setRemoved,
-    double coating) {}
+/** The one spring that a check judges. */
+public sealed interface Design permits CompressionDesign, ExtensionDesign, TorsionDesign {
+
+  /** Id of its grade, catalogue's or own. */
+  String material();
+
+  /** Its wire. */
+  WireSize wireSize();
+
+  /** Mean diameter D when free [mm]. */
+  double meanDiameter();
+
+  /** Active coils of a compression spring, body coils of the other kinds [-]. */
+  double coils();
+
+  /** Direction of winding. */
+  Hand hand();
+
+  /** Whether it was pressed solid once before use; only a compression spring can be. */
+  default boolean setRemoved() {
+    return false;
+  }
+
+  /** Thickness of what covers the wire [mm], zero for bare wire. */
+  double coating();
+}

@@ -21,7 +21,7 @@ record DesignReader(MaterialIds ids, Section section, Method method) {
    *
    * @return the spring, or empty where it is faulty
    */
-  Optional<Design> read() {
+  Optional<CompressionDesign> read() {
     long before = section.spot().faults().count();
     Optional<String> material = section.require(DesignKeys.MATERIAL);
     material.ifPresent(id -> ids.check(id, section.spot(DesignKeys.MATERIAL)));
@@ -45,7 +45,7 @@ record DesignReader(MaterialIds ids, Section section, Method method) {
       return Optional.empty();
     }
     return Optional.of(
-        new Design(
+        new CompressionDesign(
             material.get(),
             wire.get(),
             meanDiameter.get(),

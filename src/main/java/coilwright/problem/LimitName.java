@@ -34,6 +34,30 @@ public enum LimitName {
   BUCKLING("buckling", true),
   /** First natural frequency. */
   SURGE_FREQUENCY("surge frequency", true),
+  /** Force that holds the coils of an extension spring together. */
+  INITIAL_TENSION("initial tension", true),
+  /** Torsion stress in the body of an extension spring. */
+  BODY_STRESS("body stress", true),
+  /** Bending stress at the crown of a hook. */
+  HOOK_BENDING_STRESS("hook bending stress", true),
+  /** Torsion stress at the bend from the body into a hook. */
+  HOOK_TORSION_STRESS("hook torsion stress", true),
+  /** How far a hook can reach beyond the body. */
+  HOOK_LENGTH("hook length", false),
+  /** Length of an extension spring at its greatest load. */
+  EXTENDED_LENGTH("extended length", true),
+  /** A pin that must pass the hook. */
+  PIN("pin", true),
+  /** Bending stress of a torsion spring. */
+  BENDING_STRESS("bending stress", true),
+  /** Clearance of the wound-up coil to the shaft in it. */
+  ARBOR("arbor", true),
+  /** Length of a torsion spring's body at its greatest torque. */
+  BODY_LENGTH("body length", true),
+  /** Angle between the legs at a load. */
+  LEG_ANGLE("leg angle", true),
+  /** Legs that are by themselves softer than the rate asked. */
+  LEGS("legs", false),
   /** Loads after rounding against the loads asked. */
   NOMINAL_LOAD("nominal load", false),
   /** Diameters for which the grade has data. */

@@ -70,7 +70,7 @@ record LoadsRead(List<LoadEntry> loads, LoadFacts facts, Optional<Requirement> r
    *
    * @param design the spring
    */
-  void checkAgainst(Design design) {
+  void checkAgainst(CompressionDesign design) {
     double reported =
         required
             .map(Requirement::freeLength)

@@ -1,6 +1,7 @@
 package coilwright.problem;
 
 import coilwright.material.WireGrade;
+import coilwright.spring.Kind;
 import coilwright.spring.Seating;
 import java.util.List;
 import java.util.Optional;
@@ -10,22 +11,27 @@ import java.util.OptionalDouble;
  * A problem file, read and found valid, defaults filled in.
  *
  * @param title free text; empty where the file gives none
+ * @param kind the kind of spring
  * @param units how text is shown
- * @param facts what the file says about the load line
- * @param required the load line and loads of one spring; empty only in a file for checking that
- *     does not fix the line
+ * @param facts what the file says about the line of force against length; without loads for a
+ *     torsion spring
+ * @param required the load line and loads of one compression spring; empty for the other kinds, and
+ *     in a file for checking that does not fix the line
  * @param overtravel a length it must survive beyond its loads [mm], or empty
  * @param envelope the space
  * @param seats how the ends are held; empty where the usual seating of each end type applies
  * @param make what may be made; the defaults where the file has a {@code design} block
  * @param design the spring to check; empty in a file for a shortlist
- * @param limits the limits
+ * @param limits the limits that every kind has, and those of compression springs
+ * @param extension what only extension springs have; empty for the other kinds
+ * @param torsion what only torsion springs have; empty for the other kinds
  * @param ownMaterials grades the file defines
  * @param rankBy the order
  * @param top how many lines of the ranked list are shown
  */
 public record Problem(
     String title,
+    Kind kind,
     UnitSystem units,
     LoadFacts facts,
     Optional<Requirement> required,
@@ -35,6 +41,8 @@ public record Problem(
     Make make,
     Optional<Design> design,
     DesignLimits limits,
+    Optional<ExtensionAsked> extension,
+    Optional<TorsionAsked> torsion,
     List<WireGrade> ownMaterials,
     RankBy rankBy,
     int top) {
@@ -64,6 +72,7 @@ public record Problem(
   public Problem ranked(RankBy by, int most) {
     return new Problem(
         title,
+        kind,
         units,
         facts,
         required,
@@ -73,6 +82,8 @@ public record Problem(
         make,
         design,
         limits,
+        extension,
+        torsion,
         ownMaterials,
         by,
         most);

@@ -2,6 +2,7 @@ package coilwright.problem;
 
 import coilwright.material.Catalogue;
 import coilwright.material.WireGrade;
+import coilwright.spring.Kind;
 import coilwright.spring.Seating;
 import java.util.List;
 import java.util.Optional;
@@ -62,7 +63,7 @@ public final class ProblemReader {
     List<WireGrade> own = new OwnMaterials(catalogue, ids, units).read(root);
     DesignLimits limits = LimitsReader.read(root);
     Make make = new MakeReader(ids, units, limits.method()).read(root);
-    Optional<Design> design =
+    Optional<CompressionDesign> design =
         root.read(DesignKeys.DESIGN)
             .flatMap(section -> new DesignReader(ids, section, limits.method()).read());
     design.ifPresent(loads::checkAgainst);
@@ -76,6 +77,7 @@ public final class ProblemReader {
     return Optional.of(
         new Problem(
             title.orElse(""),
+            Kind.COMPRESSION,
             units,
             loads.facts(),
             loads.required(),
@@ -83,8 +85,10 @@ public final class ProblemReader {
             envelope,
             seats,
             make,
-            design,
+            design.map(Design.class::cast),
             limits,
+            Optional.empty(),
+            Optional.empty(),
             own,
             by,
             top));

@@ -2,6 +2,7 @@ package coilwright.report;
 
 import coilwright.limit.Check;
 import coilwright.limit.Finding;
+import coilwright.problem.CompressionDesign;
 import coilwright.rank.Cost;
 import coilwright.search.Candidate;
 import coilwright.spring.CompressionState;
@@ -48,7 +49,10 @@ final class CheckedCsv {
   }
 
   private static void outOfRange(Columns<Checked> columns, Finding finding) {
-    columns.addPart("", DesignFields.ALL, checked -> checked.problem().design());
+    columns.addPart(
+        "",
+        DesignFields.ALL,
+        checked -> checked.problem().design().map(CompressionDesign.class::cast));
     columns.add(
         List.of(Word.<Checked>ours("limiting_check", row -> finding.check().limit().text())));
     columns.addPart(

@@ -1,7 +1,7 @@
 package coilwright.report;
 
 import coilwright.limit.Finding;
-import coilwright.problem.Design;
+import coilwright.problem.CompressionDesign;
 import coilwright.rank.Cost;
 import coilwright.search.Candidate;
 import coilwright.spring.CompressionState;
@@ -56,7 +56,7 @@ final class CheckedJson {
   }
 
   private void outOfRange(Json json, Finding finding) throws IOException {
-    Design design = checked.problem().design().orElseThrow();
+    CompressionDesign design = (CompressionDesign) checked.problem().design().orElseThrow();
     json.fields(DesignFields.ALL, design);
     json.array("checks", list -> list.braces(body -> CandidateJson.check(body, finding)));
     json.string("limiting_check", finding.check().limit().text());

@@ -1,6 +1,6 @@
 package coilwright.report;
 
-import coilwright.problem.Design;
+import coilwright.problem.CompressionDesign;
 import coilwright.unit.Dimension;
 import java.util.List;
 import java.util.function.ToDoubleFunction;
@@ -12,19 +12,20 @@ import java.util.function.ToDoubleFunction;
 final class DesignFields {
 
   /** In the order of the output. */
-  static final List<Field<Design>> ALL =
+  static final List<Field<CompressionDesign>> ALL =
       List.of(
-          Word.users("material", Design::material),
+          Word.users("material", CompressionDesign::material),
           Word.users("wire_size", design -> design.wireSize().label()),
           Word.ours("ends", design -> design.ends().id()),
           length("wire_diameter", design -> design.wireSize().diameter()),
-          length("mean_diameter", Design::meanDiameter),
-          CompressionQuantities.number("active_coils", "", 2, Design::activeCoils),
-          length("free_length", Design::freeLength));
+          length("mean_diameter", CompressionDesign::meanDiameter),
+          CompressionQuantities.number("active_coils", "", 2, CompressionDesign::coils),
+          length("free_length", CompressionDesign::freeLength));
 
   private DesignFields() {}
 
-  private static Quantity<Design> length(String stem, ToDoubleFunction<Design> of) {
+  private static Quantity<CompressionDesign> length(
+      String stem, ToDoubleFunction<CompressionDesign> of) {
     return CompressionQuantities.of(stem, "", Dimension.LENGTH, 3, of);
   }
 }

@@ -4,7 +4,7 @@ import coilwright.material.WireGrade;
 import coilwright.material.WireSeries;
 import coilwright.material.WireSize;
 import coilwright.problem.Band;
-import coilwright.problem.Design;
+import coilwright.problem.CompressionDesign;
 import coilwright.problem.DesignLimits;
 import coilwright.problem.Envelope;
 import coilwright.problem.LoadAsked;
@@ -47,7 +47,7 @@ final class ProblemJson implements Json.Part {
       json.string("seats", problem.seats().get().id());
     }
     if (problem.design().isPresent()) {
-      json.object("design", body -> design(body, problem.design().get()));
+      json.object("design", body -> design(body, (CompressionDesign) problem.design().get()));
     } else {
       json.object("make", body -> make(body, problem.make()));
     }
@@ -125,11 +125,11 @@ final class ProblemJson implements Json.Part {
     json.number("length_step_mm", make.rounding().lengthStep());
   }
 
-  private static void design(Json json, Design design) throws IOException {
+  private static void design(Json json, CompressionDesign design) throws IOException {
     json.string("material", design.material());
     json.number("wire_diameter_mm", design.wireSize().diameter());
     json.number("mean_diameter_mm", design.meanDiameter());
-    json.number("active_coils", design.activeCoils());
+    json.number("active_coils", design.coils());
     json.number("free_length_mm", design.freeLength());
     json.string("ends", design.ends().id());
     json.string("hand", design.hand().id());

@@ -7,7 +7,7 @@ import coilwright.limit.Side;
 import coilwright.material.Catalogue;
 import coilwright.material.DiameterRange;
 import coilwright.material.WireGrade;
-import coilwright.problem.Design;
+import coilwright.problem.CompressionDesign;
 import coilwright.problem.LimitName;
 import coilwright.problem.LoadAsked;
 import coilwright.problem.Problem;
@@ -45,7 +45,7 @@ public record CompressionCheck(
    * @return what was found
    */
   public static CompressionCheck of(Problem problem, Catalogue catalogue) {
-    Design design = problem.design().orElseThrow();
+    CompressionDesign design = (CompressionDesign) problem.design().orElseThrow();
     WireGrade grade = grade(problem, design.material(), catalogue);
     Optional<Finding> outside = outOfRange(grade.diameters(), design.wireSize().diameter());
     if (outside.isPresent()) {
@@ -111,13 +111,13 @@ public record CompressionCheck(
   }
 
   private static CompressionState state(
-      Problem problem, Design design, WireGrade grade, List<LoadPoint> loads) {
+      Problem problem, CompressionDesign design, WireGrade grade, List<LoadPoint> loads) {
     Seating seating = problem.seats().orElse(Seating.usualFor(design.ends()));
     return new CompressionState(
         new CompressionSpring(
             grade.drawnTo(design.wireSize()),
             design.meanDiameter(),
-            design.activeCoils(),
+            design.coils(),
             design.freeLength(),
             design.ends()),
         new Duty(
