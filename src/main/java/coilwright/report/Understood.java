@@ -3,7 +3,7 @@ package coilwright.report;
 import coilwright.material.WireGrade;
 import coilwright.material.WireSeries;
 import coilwright.material.WireSize;
-import coilwright.problem.Design;
+import coilwright.problem.CompressionDesign;
 import coilwright.problem.Envelope;
 import coilwright.problem.LoadAsked;
 import coilwright.problem.Make;
@@ -188,7 +188,8 @@ final class Understood {
   private String assumedSeats() {
     return problem
         .design()
-        .map(Design::ends)
+        .map(CompressionDesign.class::cast)
+        .map(CompressionDesign::ends)
         .map(ends -> Seating.usualFor(ends).id() + " (assumed)")
         .orElse("fixed-fixed for squared-ground ends, else pinned-pinned (assumed)");
   }

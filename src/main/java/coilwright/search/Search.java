@@ -13,7 +13,7 @@ import java.util.stream.IntStream;
 /** The search: every wire's family against every limit. */
 public final class Search {
 
-  /** From how many wires on the processors share them: with fewer it takes longer to share. */
+  /** From how many wires on the processors share them: with fewer, sharing takes longer. */
   private static final int MANY = 500;
 
   private Search() {}

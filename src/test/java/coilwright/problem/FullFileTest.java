@@ -190,12 +190,12 @@ class FullFileTest {
 
   @Test
   void aSpringToCheck() {
-    Design design = Files.checked(Files.DESIGN).design().orElseThrow();
+    CompressionDesign design = design(Files.DESIGN);
     assertThat(design.material()).isEqualTo("music-wire");
     assertThat(design.wireSize().label()).isEqualTo("1.4 mm");
     assertThat(design.wireSize().diameter()).isEqualTo(1.4);
     assertThat(design.meanDiameter()).isEqualTo(12.2);
-    assertThat(design.activeCoils()).isEqualTo(8);
+    assertThat(design.coils()).isEqualTo(8);
     assertThat(design.freeLength()).isEqualTo(38.7);
     assertThat(design.ends()).isEqualTo(EndType.SQUARED_GROUND);
     assertThat(design.hand()).isEqualTo(Hand.EITHER);
@@ -209,7 +209,7 @@ class FullFileTest {
     String total = Files.DESIGN.replace("active_coils: 8", "total_coils: 10.5");
     assertThat(Files.checked(outside).design().orElseThrow().meanDiameter()).isEqualTo(13.6 - 1.4);
     assertThat(Files.checked(inside).design().orElseThrow().meanDiameter()).isEqualTo(10.8 + 1.4);
-    assertThat(Files.checked(total).design().orElseThrow().activeCoils()).isEqualTo(8.5);
+    assertThat(Files.checked(total).design().orElseThrow().coils()).isEqualTo(8.5);
   }
 
   private static LoadAsked load(double length, double force, Tolerance tolerance) {
@@ -218,5 +218,9 @@ class FullFileTest {
 
   private static OptionalDouble of(double value) {
     return OptionalDouble.of(value);
+  }
+
+  private static CompressionDesign design(String file) {
+    return (CompressionDesign) Files.checked(file).design().orElseThrow();
   }
 }

@@ -17,6 +17,7 @@ import coilwright.problem.StressLimit;
 import coilwright.problem.UnitSystem;
 import coilwright.spring.EndType;
 import coilwright.spring.Hand;
+import coilwright.spring.Kind;
 import coilwright.spring.LoadLine;
 import coilwright.spring.LoadPoint;
 import coilwright.spring.Method;
@@ -216,6 +217,7 @@ public final class ProblemDraft {
   public Problem problem() {
     return new Problem(
         "draft",
+        Kind.COMPRESSION,
         UnitSystem.METRIC,
         facts(),
         Optional.of(requirement()),
@@ -225,6 +227,8 @@ public final class ProblemDraft {
         make(),
         Optional.empty(),
         limits(),
+        Optional.empty(),
+        Optional.empty(),
         ownMaterials,
         RankBy.MASS,
         10);
