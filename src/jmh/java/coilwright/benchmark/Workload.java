@@ -33,8 +33,9 @@ final class Workload {
 
   private Workload(Problem problem, Catalogue catalogue) {
     this.problem = problem;
-    this.families = CompressionSearch.families(problem, WireChoice.of(problem, catalogue).wires());
-    this.limits = CompressionSearch.limits(problem);
+    this.families =
+        new CompressionSearch().families(problem, WireChoice.of(problem, catalogue).wires());
+    this.limits = new CompressionSearch().limits(problem);
     this.step = new CoilStep(problem.make().coilStep());
   }
 
@@ -64,7 +65,7 @@ final class Workload {
   }
 
   private Answer<CompressionState> search(List<? extends Family<CompressionState>> over) {
-    Answer<CompressionState> answer = Search.run(over, limits, step, 0);
+    Answer<CompressionState> answer = Search.run(over, List.of(), limits, step, 0);
     answer.conflicts().forEach(Objects::requireNonNull);
     return answer;
   }

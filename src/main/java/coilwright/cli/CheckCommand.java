@@ -4,7 +4,8 @@ import coilwright.material.Catalogue;
 import coilwright.problem.Problem;
 import coilwright.problem.Purpose;
 import coilwright.report.Checked;
-import coilwright.search.CompressionCheck;
+import coilwright.search.CompressionSearch;
+import coilwright.search.SpringCheck;
 import java.io.IOException;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
@@ -45,7 +46,8 @@ final class CheckCommand implements Callable<Integer> {
     result.refuseBadTarget(input);
     Catalogue catalogue = Catalogue.load();
     Problem problem = input.read(Purpose.CHECK, catalogue);
-    Checked checked = new Checked(problem, CompressionCheck.of(problem, catalogue));
+    Checked checked =
+        new Checked(problem, SpringCheck.of(problem, new CompressionSearch(), catalogue));
     result.deliver(format.of(checked, problem.units()), terminal);
     format.remark(checked, terminal);
     return checked.check().holds() ? Status.FOUND : Status.NOTHING;

@@ -81,7 +81,7 @@ final class ShortlistCommand implements Callable<Integer> {
 
   private Shortlist shortlist(Problem problem, Catalogue catalogue) {
     WireChoice choice = WireChoice.of(problem, catalogue);
-    Answer<CompressionState> answer = CompressionSearch.run(problem, choice);
+    Answer<CompressionState> answer = new CompressionSearch().search(problem, choice);
     List<Candidate<CompressionState>> ranked = Order.ranked(answer, problem.rankBy(), all);
     int most = all && top == null ? ranked.size() : problem.top();
     return new Shortlist(problem, choice, answer, all, ranked, most, catalogue);

@@ -2,7 +2,8 @@ package coilwright.report;
 
 import coilwright.problem.Problem;
 import coilwright.problem.UnitSystem;
-import coilwright.search.CompressionCheck;
+import coilwright.search.SpringCheck;
+import coilwright.spring.CompressionState;
 import java.util.List;
 
 /**
@@ -11,7 +12,7 @@ import java.util.List;
  * @param problem the problem, with its design
  * @param check what was found
  */
-public record Checked(Problem problem, CompressionCheck check) implements Result {
+public record Checked(Problem problem, SpringCheck<CompressionState> check) implements Result {
 
   @Override
   public String text(UnitSystem units) {

@@ -36,7 +36,8 @@ final class ShortlistCsv {
         .addTo(
             shortlist.problem(),
             shortlist.problem().facts().loads().size(),
-            CompressionSearch.limits(shortlist.problem()).stream().map(Limit::check).toList());
+            new CompressionSearch()
+                .limits(shortlist.problem()).stream().map(Limit::check).toList());
     List<Row> rows = new ArrayList<>();
     for (Candidate<CompressionState> candidate : shortlist.shown()) {
       rows.add(new Row(shortlist.problem().title(), rows.size() + 1, candidate));

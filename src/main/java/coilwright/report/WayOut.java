@@ -38,7 +38,7 @@ record WayOut(Conflict conflict, double coils, List<Finding> failing) {
 
   /** The way out of each conflict, the one that asks the smallest change first. */
   static List<WayOut> nearestFirst(Problem problem, List<Conflict> conflicts) {
-    List<Limit<CompressionState>> limits = CompressionSearch.limits(problem);
+    List<Limit<CompressionState>> limits = new CompressionSearch().limits(problem);
     return conflicts.stream()
         .map(conflict -> of(problem, limits, conflict))
         .sorted(Comparator.comparingDouble(WayOut::shortfall))
@@ -59,10 +59,11 @@ record WayOut(Conflict conflict, double coils, List<Finding> failing) {
   }
 
   private static CompressionFamily family(Problem problem, Conflict conflict) {
-    return CompressionSearch.families(problem, List.of(conflict.wire())).stream()
-        .filter(one -> one.endForm().equals(conflict.endForm()))
-        .findFirst()
-        .orElseThrow();
+    return new CompressionSearch()
+        .families(problem, List.of(conflict.wire())).stream()
+            .filter(one -> one.endForm().equals(conflict.endForm()))
+            .findFirst()
+            .orElseThrow();
   }
 
   /** Where a pair comes closest; else the bounds of all parts, and whole counts. */

@@ -21,7 +21,13 @@ import java.util.Set;
 public record Candidate<S extends State>(S state, List<Finding> findings) {
 
   private static final Set<LimitName> STRESSES =
-      EnumSet.of(LimitName.STRESS_AT_LOAD, LimitName.STRESS_AT_SOLID);
+      EnumSet.of(
+          LimitName.STRESS_AT_LOAD,
+          LimitName.STRESS_AT_SOLID,
+          LimitName.BODY_STRESS,
+          LimitName.HOOK_BENDING_STRESS,
+          LimitName.HOOK_TORSION_STRESS,
+          LimitName.BENDING_STRESS);
 
   /** Copies the list. */
   public Candidate {

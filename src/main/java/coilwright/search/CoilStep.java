@@ -7,13 +7,18 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.function.DoublePredicate;
 
-/** The practical coil counts: the positive multiples of a step, reckoned in decimal. */
+/**
+ * The practical coil counts: the positive multiples of a step, or those that lie an offset beyond
+ * one, reckoned in decimal.
+ */
 public final class CoilStep {
 
   private static final double TOLERANCE = 1e-9;
 
   private final double size;
   private final BigDecimal decimal;
+  private final double offset;
+  private final BigDecimal decimalOffset;
 
   /**
    * A step.
@@ -22,8 +27,25 @@ public final class CoilStep {
    * @throws IllegalArgumentException if it is not positive and finite
    */
   public CoilStep(double size) {
+    this(size, 0);
+  }
+
+  /**
+   * A step whose counts lie beyond its multiples.
+   *
+   * @param size the step [-]
+   * @param offset how far beyond each multiple, zero itself included [-]
+   * @throws IllegalArgumentException if the step is not positive and finite, or the offset is not
+   *     from zero to below the step
+   */
+  public CoilStep(double size, double offset) {
     this.size = Require.positive(size, "coil step", "-");
+    if (!(offset >= 0 && offset < size)) {
+      throw new IllegalArgumentException("coil offset: " + offset + " - must be below the step");
+    }
     this.decimal = BigDecimal.valueOf(size);
+    this.offset = offset;
+    this.decimalOffset = BigDecimal.valueOf(offset);
   }
 
   /** The step [-]. */
@@ -74,23 +96,28 @@ public final class CoilStep {
    */
   public CoilSet around(double from, double to) {
     List<CoilSet.Interval> counts = new ArrayList<>();
-    long first = Math.max(1, (long) Math.floor(from / size));
-    long last = (long) Math.ceil(to / size);
+    long first = Math.max(least(), (long) Math.floor((from - offset) / size));
+    long last = (long) Math.ceil((to - offset) / size);
     for (long k = first; k <= last; k++) {
       counts.add(new CoilSet.Interval(times(k), times(k)));
     }
     return new CoilSet(counts);
   }
 
+  /** The multiple whose count is the first above zero. */
+  private long least() {
+    return offset > 0 ? 0 : 1;
+  }
+
   private long first(CoilSet.Interval interval) {
-    return Math.max(1, (long) Math.ceil(interval.from() / size - TOLERANCE));
+    return Math.max(least(), (long) Math.ceil((interval.from() - offset) / size - TOLERANCE));
   }
 
   private long last(CoilSet.Interval interval) {
-    return (long) Math.floor(interval.to() / size + TOLERANCE);
+    return (long) Math.floor((interval.to() - offset) / size + TOLERANCE);
   }
 
   private double times(long k) {
-    return decimal.multiply(BigDecimal.valueOf(k)).doubleValue();
+    return decimal.multiply(BigDecimal.valueOf(k)).add(decimalOffset).doubleValue();
   }
 }

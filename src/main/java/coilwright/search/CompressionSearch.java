@@ -3,13 +3,18 @@ package coilwright.search;
 import coilwright.limit.CompressionLimits;
 import coilwright.limit.Limit;
 import coilwright.material.Wire;
+import coilwright.problem.CompressionDesign;
+import coilwright.problem.Design;
 import coilwright.problem.DesignLimits;
+import coilwright.problem.LoadAsked;
 import coilwright.problem.Problem;
 import coilwright.problem.Requirement;
 import coilwright.spring.CompressionFamily;
+import coilwright.spring.CompressionSpring;
 import coilwright.spring.CompressionState;
 import coilwright.spring.Duty;
 import coilwright.spring.EndType;
+import coilwright.spring.LoadPoint;
 import coilwright.spring.Seating;
 import coilwright.spring.Travel;
 import java.util.ArrayList;
@@ -18,33 +23,10 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 
 /** The search for compression springs: a problem's wires and ends as families, and its limits. */
-public final class CompressionSearch {
+public final class CompressionSearch implements Synthesis<CompressionState> {
 
-  private CompressionSearch() {}
-
-  /**
-   * Searches.
-   *
-   * @param problem a problem that fixes the load line
-   * @param choice the wires it offers
-   * @return the answer
-   */
-  public static Answer<CompressionState> run(Problem problem, WireChoice choice) {
-    return Search.run(
-        families(problem, choice.wires()),
-        limits(problem),
-        new CoilStep(problem.make().coilStep()),
-        choice.outsideRange() * problem.make().ends().size());
-  }
-
-  /**
-   * One family for each wire and end type.
-   *
-   * @param problem a problem that fixes the load line
-   * @param wires the wires
-   * @return the families, in the order of wires, then ends
-   */
-  public static List<CompressionFamily> families(Problem problem, List<Wire> wires) {
+  @Override
+  public List<CompressionFamily> families(Problem problem, List<Wire> wires) {
     Requirement required = problem.required().orElseThrow();
     List<CompressionFamily> families = new ArrayList<>();
     for (Wire wire : wires) {
@@ -79,13 +61,64 @@ public final class CompressionSearch {
             : Optional.empty());
   }
 
-  /**
-   * The limits of a problem.
-   *
-   * @param problem a problem that fixes the load line
-   * @return its limits
-   */
-  public static List<Limit<CompressionState>> limits(Problem problem) {
+  @Override
+  public int endForms(Problem problem) {
+    return problem.make().ends().size();
+  }
+
+  @Override
+  public CoilStep step(Problem problem) {
+    return new CoilStep(problem.make().coilStep());
+  }
+
+  @Override
+  public List<Limit<CompressionState>> limits(Problem problem) {
     return CompressionLimits.of(problem, problem.required().orElseThrow().completed());
+  }
+
+  @Override
+  public CompressionState designed(Problem problem, Design design, Wire wire) {
+    CompressionDesign asked = (CompressionDesign) design;
+    Seating seating = problem.seats().orElse(Seating.usualFor(asked.ends()));
+    return new CompressionState(
+        new CompressionSpring(
+            wire, asked.meanDiameter(), asked.coils(), asked.freeLength(), asked.ends()),
+        new Duty(
+            checkLoads(problem),
+            problem.limits().stressCorrection(),
+            seating,
+            problem.limits().method(),
+            problem.coating(),
+            problem.overtravel(),
+            Optional.empty()));
+  }
+
+  @Override
+  public List<Limit<CompressionState>> checkLimits(Problem problem) {
+    List<LoadPoint> loads = checkLoads(problem);
+    return CompressionLimits.of(problem, loads, freeLength(problem, loads));
+  }
+
+  /** The loads of one spring; where the facts fix the load line, it completes them. */
+  private static List<LoadPoint> checkLoads(Problem problem) {
+    if (problem.required().isPresent()) {
+      return problem.required().get().completed();
+    }
+    int parallel = problem.facts().springsInParallel();
+    return problem.facts().loads().stream().map(load -> point(load, parallel)).toList();
+  }
+
+  /** Where one load and another fact fix the line, the free length that follows is asked too. */
+  private static OptionalDouble freeLength(Problem problem, List<LoadPoint> loads) {
+    return loads.size() == 1
+        ? problem.required().map(Requirement::freeLength).orElse(OptionalDouble.empty())
+        : OptionalDouble.empty();
+  }
+
+  private static LoadPoint point(LoadAsked load, int parallel) {
+    OptionalDouble force = load.force();
+    return new LoadPoint(
+        load.length(),
+        force.isPresent() ? OptionalDouble.of(force.getAsDouble() / parallel) : force);
   }
 }

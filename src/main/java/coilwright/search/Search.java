@@ -22,6 +22,7 @@ public final class Search {
    * Finds every practical spring of every family.
    *
    * @param families one for each wire
+   * @param impossible why further wires have no spring at any coil count
    * @param limits the limits
    * @param step the practical coil counts
    * @param outsideRange how many wires were left out because their grade has no data for them
@@ -29,7 +30,11 @@ public final class Search {
    * @return candidates, and the reasons where there are none
    */
   public static <S extends State> Answer<S> run(
-      List<? extends Family<S>> families, List<Limit<S>> limits, CoilStep step, int outsideRange) {
+      List<? extends Family<S>> families,
+      List<Conflict> impossible,
+      List<Limit<S>> limits,
+      CoilStep step,
+      int outsideRange) {
     List<List<Candidate<S>>> feasible = new ArrayList<>();
     List<Conflict> conflicts = new ArrayList<>();
     Map<LimitName, Integer> ruledOut = new EnumMap<>(LimitName.class);
@@ -43,7 +48,11 @@ public final class Search {
         feasible.add(outcome.candidates());
       }
     }
-    return new Answer<>(families.size(), feasible, ruledOut, conflicts);
+    for (Conflict conflict : impossible) {
+      conflict.limits().forEach(name -> ruledOut.merge(name, 1, Integer::sum));
+      conflicts.add(conflict);
+    }
+    return new Answer<>(families.size() + impossible.size(), feasible, ruledOut, conflicts);
   }
 
   /** One for each family, in their order, whatever the number of processors. */

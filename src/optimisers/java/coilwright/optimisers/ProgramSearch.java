@@ -38,12 +38,14 @@ final class ProgramSearch {
   private ProgramSearch(Problem problem, Catalogue catalogue) {
     this.problem = problem;
     this.families =
-        CompressionSearch.families(problem, WireChoice.of(problem, catalogue).wires()).stream()
-            .sorted(
-                Comparator.comparingDouble((CompressionFamily family) -> family.wire().diameter())
-                    .thenComparingDouble(family -> family.wire().tensileStrength()))
-            .toList();
-    this.limits = CompressionSearch.limits(problem);
+        new CompressionSearch()
+            .families(problem, WireChoice.of(problem, catalogue).wires()).stream()
+                .sorted(
+                    Comparator.comparingDouble(
+                            (CompressionFamily family) -> family.wire().diameter())
+                        .thenComparingDouble(family -> family.wire().tensileStrength()))
+                .toList();
+    this.limits = new CompressionSearch().limits(problem);
     this.step = new CoilStep(problem.make().coilStep());
   }
 
@@ -110,7 +112,7 @@ final class ProgramSearch {
   }
 
   private Answer<CompressionState> answer(List<? extends Family<CompressionState>> over) {
-    return Search.run(over, limits, step, 0);
+    return Search.run(over, List.of(), limits, step, 0);
   }
 
   private double seconds() {

@@ -35,7 +35,7 @@ class OrderTest {
           .toList();
 
   private static Answer<CompressionState> answer(Problem problem) {
-    return CompressionSearch.run(problem, WireChoice.of(problem, Catalogue.load()));
+    return new CompressionSearch().search(problem, WireChoice.of(problem, Catalogue.load()));
   }
 
   @Test

@@ -45,7 +45,7 @@ class SandgrenTest {
 
   private static final Problem PROBLEM = problem();
   private static final Answer<CompressionState> ANSWER =
-      CompressionSearch.run(PROBLEM, WireChoice.of(PROBLEM, Catalogue.load()));
+      new CompressionSearch().search(PROBLEM, WireChoice.of(PROBLEM, Catalogue.load()));
 
   /**
    * A design of the benchmark [in].

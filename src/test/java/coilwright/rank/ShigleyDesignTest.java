@@ -130,7 +130,7 @@ class ShigleyDesignTest {
             .with(Bound.SOLID_LENGTH, INCH)
             .with(Bound.FREE_LENGTH, 4 * INCH)
             .problem();
-    return CompressionSearch.run(problem, WireChoice.of(problem, Catalogue.load()));
+    return new CompressionSearch().search(problem, WireChoice.of(problem, Catalogue.load()));
   }
 
   private static ProblemDraft draft(double freeLength, double shearModulus, double... sizes) {
@@ -153,15 +153,14 @@ class ShigleyDesignTest {
   }
 
   private static List<CompressionFamily> families(Problem problem) {
-    return CompressionSearch.families(problem, WireChoice.of(problem, Catalogue.load()).wires());
+    return new CompressionSearch()
+        .families(problem, WireChoice.of(problem, Catalogue.load()).wires());
   }
 
   private static CoilSet left(LimitName name, Problem problem, CompressionFamily family) {
     Limit<CompressionState> limit =
-        CompressionSearch.limits(problem).stream()
-            .filter(one -> one.name() == name)
-            .findFirst()
-            .orElseThrow();
+        new CompressionSearch()
+            .limits(problem).stream().filter(one -> one.name() == name).findFirst().orElseThrow();
     return Reach.of(limit, new Trail<>(family));
   }
 }

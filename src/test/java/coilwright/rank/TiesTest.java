@@ -75,6 +75,6 @@ class TiesTest {
 
   private static Answer<CompressionState> answer(ProblemDraft draft) {
     Problem problem = draft.problem();
-    return CompressionSearch.run(problem, WireChoice.of(problem, Catalogue.load()));
+    return new CompressionSearch().search(problem, WireChoice.of(problem, Catalogue.load()));
   }
 }

@@ -19,7 +19,7 @@ class AnswerTest {
   void addsUp(long seed) {
     Problem problem = RandomDrafts.of(seed, 1).findFirst().orElseThrow().problem();
     WireChoice choice = WireChoice.of(problem, Searched.CATALOGUE);
-    Answer<CompressionState> answer = CompressionSearch.run(problem, choice);
+    Answer<CompressionState> answer = new CompressionSearch().search(problem, choice);
     List<Searched> wires = Searched.wiresOf("alone", problem).toList();
 
     assertThat(answer.wires()).isEqualTo(wires.size());

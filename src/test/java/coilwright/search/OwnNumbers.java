@@ -96,11 +96,12 @@ record OwnNumbers(ProblemDraft draft, double coils, CompressionState spring) {
   /** The rounded spring, where it holds what is never switched off. */
   private static Optional<CompressionState> spring(Problem problem, double coils) {
     List<CompressionFamily> families =
-        CompressionSearch.families(problem, WireChoice.of(problem, Searched.CATALOGUE).wires());
+        new CompressionSearch()
+            .families(problem, WireChoice.of(problem, Searched.CATALOGUE).wires());
     return Optional.of(families.get(0))
         .filter(family -> coils <= family.mostCoils())
         .flatMap(family -> family.rounded(coils))
-        .filter(state -> Candidate.judge(state, CompressionSearch.limits(problem)).holds());
+        .filter(state -> Candidate.judge(state, new CompressionSearch().limits(problem)).holds());
   }
 
   private static ProblemDraft bound(Random random, ProblemDraft draft, CompressionState spring) {

@@ -104,8 +104,8 @@ class ScalingTest {
   }
 
   private static Answer<CompressionState> answer(ProblemDraft draft) {
-    return CompressionSearch.run(
-        draft.problem(), WireChoice.of(draft.problem(), Searched.CATALOGUE));
+    return new CompressionSearch()
+        .search(draft.problem(), WireChoice.of(draft.problem(), Searched.CATALOGUE));
   }
 
   private static void inProportion(

@@ -80,18 +80,19 @@ record Searched(
 
   /** Every wire of a problem. */
   static Stream<Searched> wiresOf(String name, Problem problem) {
-    List<Limit<CompressionState>> limits = CompressionSearch.limits(problem);
+    List<Limit<CompressionState>> limits = new CompressionSearch().limits(problem);
     double step = problem.make().coilStep();
     WireChoice choice = WireChoice.of(problem, CATALOGUE);
-    return CompressionSearch.families(problem, choice.wires()).stream()
-        .map(
-            family ->
-                new Searched(
-                    name,
-                    family,
-                    limits,
-                    step,
-                    new WireSearch<>(family, limits, new CoilStep(step)).outcome()));
+    return new CompressionSearch()
+        .families(problem, choice.wires()).stream()
+            .map(
+                family ->
+                    new Searched(
+                        name,
+                        family,
+                        limits,
+                        step,
+                        new WireSearch<>(family, limits, new CoilStep(step)).outcome()));
   }
 
   /** The coil counts of its candidates. */

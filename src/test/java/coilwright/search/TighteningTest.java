@@ -72,7 +72,7 @@ class TighteningTest {
   private static Set<String> ids(ProblemDraft draft) {
     Problem problem = draft.problem();
     Answer<CompressionState> answer =
-        CompressionSearch.run(problem, WireChoice.of(problem, Searched.CATALOGUE));
+        new CompressionSearch().search(problem, WireChoice.of(problem, Searched.CATALOGUE));
     Set<String> ids = new HashSet<>();
     answer.feasible().forEach(wire -> wire.forEach(found -> ids.add(id(found.state()))));
     return ids;

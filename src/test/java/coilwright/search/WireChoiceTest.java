@@ -57,6 +57,6 @@ class WireChoiceTest {
 
   private static Answer<CompressionState> answer(ProblemDraft draft) {
     Problem problem = draft.problem();
-    return CompressionSearch.run(problem, WireChoice.of(problem, Searched.CATALOGUE));
+    return new CompressionSearch().search(problem, WireChoice.of(problem, Searched.CATALOGUE));
   }
 }
