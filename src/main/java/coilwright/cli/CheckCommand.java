@@ -4,8 +4,10 @@ import coilwright.material.Catalogue;
 import coilwright.problem.Problem;
 import coilwright.problem.Purpose;
 import coilwright.report.Checked;
-import coilwright.search.CompressionSearch;
+import coilwright.report.Sheet;
+import coilwright.report.Sheets;
 import coilwright.search.SpringCheck;
+import coilwright.spring.State;
 import java.io.IOException;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
@@ -46,10 +48,14 @@ final class CheckCommand implements Callable<Integer> {
     result.refuseBadTarget(input);
     Catalogue catalogue = Catalogue.load();
     Problem problem = input.read(Purpose.CHECK, catalogue);
-    Checked checked =
-        new Checked(problem, SpringCheck.of(problem, new CompressionSearch(), catalogue));
+    Checked<?> checked = check(Sheets.of(problem.kind()), problem, catalogue);
     result.deliver(format.of(checked, problem.units()), terminal);
     format.remark(checked, terminal);
     return checked.check().holds() ? Status.FOUND : Status.NOTHING;
+  }
+
+  private static <S extends State> Checked<S> check(
+      Sheet<S> sheet, Problem problem, Catalogue catalogue) {
+    return new Checked<>(sheet, problem, SpringCheck.of(problem, sheet.synthesis(), catalogue));
   }
 }

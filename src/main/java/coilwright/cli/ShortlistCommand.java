@@ -5,12 +5,13 @@ import coilwright.problem.Problem;
 import coilwright.problem.Purpose;
 import coilwright.problem.RankBy;
 import coilwright.rank.Order;
+import coilwright.report.Sheet;
+import coilwright.report.Sheets;
 import coilwright.report.Shortlist;
 import coilwright.search.Answer;
 import coilwright.search.Candidate;
-import coilwright.search.CompressionSearch;
 import coilwright.search.WireChoice;
-import coilwright.spring.CompressionState;
+import coilwright.spring.State;
 import java.io.IOException;
 import java.util.List;
 import java.util.concurrent.Callable;
@@ -73,17 +74,19 @@ final class ShortlistCommand implements Callable<Integer> {
     Catalogue catalogue = Catalogue.load();
     Problem asked = input.read(Purpose.SHORTLIST, catalogue);
     RankBy by = rank == null ? asked.rankBy() : rank;
-    Shortlist shortlist = shortlist(asked.ranked(by, top == null ? asked.top() : top), catalogue);
+    Problem problem = asked.ranked(by, top == null ? asked.top() : top);
+    Shortlist<?> shortlist = shortlist(Sheets.of(problem.kind()), problem, catalogue);
     result.deliver(format.of(shortlist, asked.units()), terminal);
     format.remark(shortlist, terminal);
     return shortlist.answer().feasible().isEmpty() ? Status.NOTHING : Status.FOUND;
   }
 
-  private Shortlist shortlist(Problem problem, Catalogue catalogue) {
+  private <S extends State> Shortlist<S> shortlist(
+      Sheet<S> sheet, Problem problem, Catalogue catalogue) {
     WireChoice choice = WireChoice.of(problem, catalogue);
-    Answer<CompressionState> answer = new CompressionSearch().search(problem, choice);
-    List<Candidate<CompressionState>> ranked = Order.ranked(answer, problem.rankBy(), all);
+    Answer<S> answer = sheet.synthesis().search(problem, choice);
+    List<Candidate<S>> ranked = Order.ranked(answer, problem.rankBy(), all);
     int most = all && top == null ? ranked.size() : problem.top();
-    return new Shortlist(problem, choice, answer, all, ranked, most, catalogue);
+    return new Shortlist<>(sheet, problem, choice, answer, all, ranked, most, catalogue);
   }
 }

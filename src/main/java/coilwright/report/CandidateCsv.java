@@ -3,22 +3,23 @@ package coilwright.report;
 import coilwright.limit.Check;
 import coilwright.problem.Problem;
 import coilwright.search.Candidate;
-import coilwright.spring.CompressionState;
+import coilwright.spring.State;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.Function;
 
 /**
- * The columns of a compression spring: the keys of its JSON, each behind those that it is nested
- * in. The problem alone decides which columns there are, whatever springs are found.
+ * The columns of a spring: the keys of its JSON, each behind those that it is nested in. The
+ * problem alone decides which columns there are, whatever springs are found.
  *
  * @param <T> a row
+ * @param <S> the state of the kind of spring
  */
-final class CandidateCsv<T> {
+final class CandidateCsv<T, S extends State> {
 
   private final Columns<T> columns;
-  private final Function<T, Optional<Candidate<CompressionState>>> spring;
+  private final Function<T, Optional<Candidate<S>>> spring;
 
   /**
    * Begins with the columns that a table has.
@@ -26,7 +27,7 @@ final class CandidateCsv<T> {
    * @param columns where more are added
    * @param spring the spring of a row; empty in a row without one
    */
-  CandidateCsv(Columns<T> columns, Function<T, Optional<Candidate<CompressionState>>> spring) {
+  CandidateCsv(Columns<T> columns, Function<T, Optional<Candidate<S>>> spring) {
     this.columns = columns;
     this.spring = spring;
   }
@@ -34,35 +35,17 @@ final class CandidateCsv<T> {
   /**
    * Adds them all.
    *
+   * @param sheet what is particular to the kind of spring
    * @param problem the problem
-   * @param loads how many loads its springs report
    * @param checks what its limits ask, in the order of the findings
    */
-  void addTo(Problem problem, int loads, List<Check> checks) {
-    Function<T, Optional<CompressionState>> state = row -> spring.apply(row).map(Candidate::state);
-    columns.addPart("", CompressionFields.IDENTITY, spring);
-    columns.addPart("", CompressionQuantities.SPRING, state);
-    columns.addPart("", CompressionFields.group(problem), state);
-    columns.addPart("", CompressionFields.BASIS, state);
-    for (int i = 0; i < loads; i++) {
-      int load = i;
-      columns.addPart(
-          "load_" + (i + 1) + "_",
-          CompressionQuantities.LOAD,
-          row -> state.apply(row).map(at -> at.loads().get(load)));
+  void addTo(Sheet<S> sheet, Problem problem, List<Check> checks) {
+    Function<T, Optional<S>> state = row -> spring.apply(row).map(Candidate::state);
+    columns.addPart("", SpringFields.IDENTITY, row -> spring.apply(row).map(one -> one));
+    for (SpringPart<S> part : sheet.parts(problem)) {
+      part.addTo(columns, state);
     }
-    if (problem.overtravel().isPresent()) {
-      columns.addPart(
-          "overtravel_",
-          CompressionQuantities.LOAD,
-          row -> state.apply(row).flatMap(CompressionState::overtravel));
-    }
-    columns.addPart(
-        "solid_", CompressionFields.SOLID, row -> state.apply(row).map(CompressionState::solid));
-    columns.addPart("", CompressionFields.GROWTH, state);
-    columns.addPart("buckling_", List.of(CompressionQuantities.CRITICAL_DEFLECTION), state);
-    columns.addPart("buckling_", List.of(CompressionFields.stable(problem)), state);
-    columns.addPart("", CompressionFields.SUMMARY, spring);
+    columns.addPart("", SpringFields.SUMMARY, row -> spring.apply(row).map(one -> one));
     checks(checks);
   }
 

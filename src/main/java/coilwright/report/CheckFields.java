@@ -22,7 +22,7 @@ final class CheckFields {
           new Judged("bound", Finding::bound),
           new UnitOf(),
           Word.ours("definition", finding -> finding.check().definition()),
-          CompressionQuantities.number(
+          Quantities.number(
               "margin", "", 3, finding -> finding.hasMargin() ? finding.margin() : Double.NaN),
           new Judged(
               "slack",

@@ -3,25 +3,28 @@ package coilwright.report;
 import coilwright.problem.Problem;
 import coilwright.problem.UnitSystem;
 import coilwright.search.SpringCheck;
-import coilwright.spring.CompressionState;
+import coilwright.spring.State;
 import java.util.List;
 
 /**
  * What a check shows.
  *
+ * @param sheet what is particular to the kind of spring
  * @param problem the problem, with its design
  * @param check what was found
+ * @param <S> the state of the kind of spring
  */
-public record Checked(Problem problem, SpringCheck<CompressionState> check) implements Result {
+public record Checked<S extends State>(Sheet<S> sheet, Problem problem, SpringCheck<S> check)
+    implements Result {
 
   @Override
   public String text(UnitSystem units) {
-    return CheckedText.of(this, OutputUnits.ofText(units));
+    return new CheckedText<>(this, OutputUnits.ofText(units)).text();
   }
 
   @Override
   public String json() {
-    return CheckedJson.of(this);
+    return Json.document(new CheckedJson<>(this));
   }
 
   @Override

@@ -1,34 +1,27 @@
 package coilwright.report;
 
 import coilwright.limit.Finding;
-import coilwright.problem.CompressionDesign;
 import coilwright.rank.Cost;
 import coilwright.search.Candidate;
-import coilwright.spring.CompressionState;
+import coilwright.spring.State;
 import java.io.IOException;
 import java.util.List;
 
-/** A checked spring as JSON. */
-final class CheckedJson {
+/**
+ * A checked spring as JSON.
+ *
+ * @param checked what it shows
+ * @param <S> the state of the kind of spring
+ */
+record CheckedJson<S extends State>(Checked<S> checked) implements Json.Part {
 
-  private final Checked checked;
-
-  private CheckedJson(Checked checked) {
-    this.checked = checked;
-  }
-
-  /** Writes a check. */
-  static String of(Checked checked) {
-    return Json.document(new CheckedJson(checked)::writeTo);
-  }
-
-  private void writeTo(Json json) throws IOException {
+  @Override
+  public void writeTo(Json json) throws IOException {
     json.count("format", ShortlistJson.FORMAT);
     json.object(
-        "problem", new ProblemJson(checked.problem(), List.of(checked.check().grade().id())));
-    if (checked.problem().required().isPresent()) {
-      ShortlistJson.required(json, checked.problem().required().get());
-    }
+        "problem",
+        new ProblemJson(checked.sheet(), checked.problem(), List.of(checked.check().grade().id())));
+    checked.sheet().writeRequired(json, checked.problem());
     json.flag("holds", checked.check().holds());
     json.object("spring", this::spring);
     json.strings("warnings", Warnings.full(Warnings.of(checked)));
@@ -37,8 +30,8 @@ final class CheckedJson {
 
   private void spring(Json json) throws IOException {
     if (checked.check().spring().isPresent()) {
-      Candidate<CompressionState> spring = checked.check().spring().get();
-      new CandidateJson(spring, checked.problem()).writeTo(json);
+      Candidate<S> spring = checked.check().spring().get();
+      CandidateJson.write(json, checked.sheet(), checked.problem(), spring);
       json.array("cost_terms", list -> terms(list, Cost.of(spring.state())));
     } else {
       outOfRange(json, checked.check().outOfRange().orElseThrow());
@@ -56,8 +49,7 @@ final class CheckedJson {
   }
 
   private void outOfRange(Json json, Finding finding) throws IOException {
-    CompressionDesign design = (CompressionDesign) checked.problem().design().orElseThrow();
-    json.fields(DesignFields.ALL, design);
+    json.fields(checked.sheet().design(), checked.problem().design().orElseThrow());
     json.array("checks", list -> list.braces(body -> CandidateJson.check(body, finding)));
     json.string("limiting_check", finding.check().limit().text());
   }

@@ -4,40 +4,42 @@ import coilwright.limit.Finding;
 import coilwright.limit.Side;
 import coilwright.rank.Cost;
 import coilwright.search.Candidate;
-import coilwright.spring.CompressionState;
-import coilwright.spring.LoadState;
+import coilwright.spring.State;
 import coilwright.unit.Dimension;
-import java.util.ArrayList;
 import java.util.List;
 
-/** A checked spring as text: every quantity and every check. */
-final class CheckedText {
+/**
+ * A checked spring as text: every quantity and every check.
+ *
+ * @param <S> the state of the kind of spring
+ */
+final class CheckedText<S extends State> {
 
-  private final Checked checked;
+  private final Checked<S> checked;
   private final OutputUnits units;
   private final Lines lines = new Lines();
 
-  private CheckedText(Checked checked, OutputUnits units) {
-    this.checked = checked;
-    this.units = units;
-  }
-
   /**
-   * Writes a check.
+   * Prepares a check.
    *
    * @param checked what it shows
    * @param units the units shown
    */
-  static String of(Checked checked, OutputUnits units) {
-    CheckedText report = new CheckedText(checked, units);
-    report.head();
+  CheckedText(Checked<S> checked, OutputUnits units) {
+    this.checked = checked;
+    this.units = units;
+  }
+
+  /** The text. */
+  String text() {
+    head();
     if (checked.check().spring().isPresent()) {
-      report.spring(checked.check().spring().get());
+      spring(checked.check().spring().get().state());
     }
-    report.checks(report.findings());
-    checked.check().spring().ifPresent(spring -> report.cost(Cost.of(spring.state())));
-    report.lines.foot(Warnings.of(checked));
-    return report.lines.text();
+    checks(findings());
+    checked.check().spring().ifPresent(spring -> cost(Cost.of(spring.state())));
+    lines.foot(Warnings.of(checked));
+    return lines.text();
   }
 
   private List<Finding> findings() {
@@ -49,11 +51,12 @@ final class CheckedText {
   }
 
   private void head() {
-    lines.line(Understood.title(checked.problem()));
+    lines.line(Understood.title(checked.sheet(), checked.problem()));
     lines.line(verdict());
     lines.line("");
     lines.line("Understood");
-    lines.block(Understood.of(checked.problem(), List.of(checked.check().grade()), units));
+    lines.block(
+        Understood.of(checked.sheet(), checked.problem(), List.of(checked.check().grade()), units));
     lines.line("");
   }
 
@@ -69,57 +72,21 @@ final class CheckedText {
         : "The spring fails: " + String.join(", ", failing) + ".";
   }
 
-  private void spring(Candidate<CompressionState> candidate) {
-    CompressionState state = candidate.state();
+  private void spring(S state) {
     lines.line(
         "The spring: "
             + Wires.text(state.wire())
             + ", "
-            + state.endForm()
-            + " ends, data "
+            + checked.sheet().ends(state.endForm())
+            + ", data "
             + state.wire().evidence().word());
     TextTable table = new TextTable("lrl");
-    for (Quantity<CompressionState> quantity : CompressionQuantities.SPRING) {
-      row(table, quantity, state);
-    }
-    row(table, CompressionQuantities.OUTSIDE_DIAMETER_AT_SOLID, state);
-    if (Double.isInfinite(state.criticalDeflection())) {
-      table.row(CompressionQuantities.CRITICAL_DEFLECTION.label(), "none", "cannot buckle");
-    } else {
-      row(table, CompressionQuantities.CRITICAL_DEFLECTION, state);
-    }
+    checked.sheet().addSpring(table, state, units);
     lines.table(table);
     lines.line("");
-    loads(state);
-  }
-
-  private void row(TextTable table, Quantity<CompressionState> quantity, CompressionState state) {
-    table.row(quantity.label(), quantity.text(state, units), units.symbol(quantity.dimension()));
-  }
-
-  private void loads(CompressionState state) {
     lines.line("Its loads");
-    TextTable table = new TextTable("lrrrrr");
-    List<String> head = new ArrayList<>(List.of(""));
-    for (Quantity<LoadState> quantity : CompressionQuantities.LOAD) {
-      head.add(quantity.label() + " " + units.symbol(quantity.dimension()));
-    }
-    table.row(head.toArray(String[]::new));
-    for (int i = 0; i < state.loads().size(); i++) {
-      table.row(cells("load " + (i + 1), state.loads().get(i)));
-    }
-    state.overtravel().ifPresent(load -> table.row(cells("overtravel", load)));
-    table.row(cells("solid", state.solid()));
-    lines.table(table);
+    lines.table(checked.sheet().loads(state, units));
     lines.line("");
-  }
-
-  private String[] cells(String name, LoadState load) {
-    List<String> cells = new ArrayList<>(List.of(name));
-    for (Quantity<LoadState> quantity : CompressionQuantities.LOAD) {
-      cells.add(quantity.text(load, units));
-    }
-    return cells.toArray(String[]::new);
   }
 
   private void checks(List<Finding> findings) {

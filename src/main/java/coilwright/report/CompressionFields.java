@@ -1,76 +1,82 @@
 package coilwright.report;
 
-import coilwright.limit.Finding;
 import coilwright.problem.BucklingRule;
+import coilwright.problem.CompressionDesign;
+import coilwright.problem.Design;
 import coilwright.problem.Problem;
-import coilwright.search.Candidate;
 import coilwright.spring.CompressionState;
 import coilwright.spring.LoadState;
 import coilwright.unit.Dimension;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.ToDoubleFunction;
 
-/**
- * The values of a compression spring that JSON and CSV hold beside its {@link
- * CompressionQuantities}, each declared once, in the order of the output.
- */
+/** The values of a compression spring in the order of JSON and CSV. */
 final class CompressionFields {
 
-  /** Which spring it is. */
-  static final List<Field<Candidate<CompressionState>>> IDENTITY =
-      List.of(
-          Word.users("id", CompressionQuantities::id),
-          Word.users("material", spring -> spring.state().wire().grade().id()),
-          new Word<>(
-              "wire_series",
-              false,
-              spring -> spring.state().wire().size().series().map(series -> series.id())),
-          Word.users("wire_size", spring -> spring.state().wire().size().label()),
-          Word.ours("ends", spring -> spring.state().endForm()));
-
-  /** What it rests on. */
-  static final List<Field<CompressionState>> BASIS =
-      List.of(
-          Word.ours("data", state -> state.wire().evidence().word()),
-          Word.ours("seats", state -> state.seating().id()));
-
   /** What is known of it pressed solid. */
-  static final List<Field<LoadState>> SOLID =
+  private static final List<Field<LoadState>> SOLID =
       List.of(
-          CompressionQuantities.ofLoad("force"),
-          CompressionQuantities.ofLoad("shear_stress"),
-          CompressionQuantities.ofLoad("corrected_shear_stress"));
+          Quantities.in(CompressionQuantities.LOAD, "force"),
+          Quantities.in(CompressionQuantities.LOAD, "shear_stress"),
+          Quantities.in(CompressionQuantities.LOAD, "corrected_shear_stress"));
 
-  /** Its growth. */
-  static final List<Field<CompressionState>> GROWTH =
-      List.of(CompressionQuantities.OUTSIDE_DIAMETER_AT_SOLID);
-
-  /** What its checks come to. */
-  static final List<Field<Candidate<CompressionState>>> SUMMARY =
+  /** What is left to say of one whose grade has no data for its wire. */
+  static final List<Field<Design>> DESIGN =
       List.of(
-          CompressionQuantities.number(
-              "least_margin", "", 3, spring -> spring.leastMargin().orElse(Double.NaN)),
-          new Word<>("limiting_check", false, CompressionFields::limiting));
+          Word.users("material", Design::material),
+          Word.users("wire_size", design -> design.wireSize().label()),
+          Word.ours("ends", design -> compression(design).ends().id()),
+          length("wire_diameter", design -> design.wireSize().diameter()),
+          length("mean_diameter", Design::meanDiameter),
+          Quantities.number("active_coils", "", 2, Design::coils),
+          length("free_length", design -> compression(design).freeLength()));
 
   private CompressionFields() {}
 
-  private static Optional<String> limiting(Candidate<CompressionState> spring) {
-    return spring.limiting().map(Finding::check).map(check -> check.limit().text());
+  /** All of them. */
+  static List<SpringPart<CompressionState>> parts(Problem problem) {
+    List<SpringPart<CompressionState>> parts = new ArrayList<>();
+    parts.add(SpringPart.of(CompressionQuantities.SPRING));
+    parts.add(SpringPart.of(SpringFields.group(problem)));
+    parts.add(
+        SpringPart.of(List.of(SpringFields.data(), Word.ours("seats", CompressionFields::seats))));
+    parts.add(
+        SpringPart.list(
+            "loads",
+            "load",
+            problem.facts().loads().size(),
+            CompressionQuantities.LOAD,
+            CompressionState::loads));
+    if (problem.overtravel().isPresent()) {
+      parts.add(
+          SpringPart.object(
+              "overtravel", CompressionQuantities.LOAD, CompressionState::overtravel));
+    }
+    parts.add(SpringPart.object("solid", SOLID, state -> Optional.of(state.solid())));
+    parts.add(SpringPart.of(List.of(CompressionQuantities.OUTSIDE_DIAMETER_AT_SOLID)));
+    parts.add(SpringPart.object("buckling", buckling(problem), Optional::of));
+    return parts;
   }
 
-  /** The mass of all springs side by side; nothing where there is one. */
-  static List<Field<CompressionState>> group(Problem problem) {
-    int parallel = problem.facts().springsInParallel();
-    return parallel == 1
-        ? List.of()
-        : List.of(
-            CompressionQuantities.of(
-                "group_mass", "", Dimension.MASS, 3, state -> state.mass() * parallel));
-  }
-
-  /** Whether it would buckle, as the problem judges it. */
-  static Field<CompressionState> stable(Problem problem) {
+  /** Null says that it can never buckle. */
+  private static List<Field<CompressionState>> buckling(Problem problem) {
     boolean atSolid = problem.limits().buckling() == BucklingRule.AT_SOLID;
-    return new Flag<>("stable", state -> state.stableAt(atSolid ? state.solid() : state.extreme()));
+    return List.of(
+        new Boundless<>(CompressionQuantities.CRITICAL_DEFLECTION),
+        new Flag<>("stable", state -> state.stableAt(atSolid ? state.solid() : state.extreme())));
+  }
+
+  private static String seats(CompressionState state) {
+    return state.seating().id();
+  }
+
+  private static CompressionDesign compression(Design design) {
+    return (CompressionDesign) design;
+  }
+
+  private static Quantity<Design> length(String stem, ToDoubleFunction<Design> of) {
+    return Quantities.of(stem, "", Dimension.LENGTH, 3, of);
   }
 }

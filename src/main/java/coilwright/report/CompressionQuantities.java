@@ -1,7 +1,6 @@
 package coilwright.report;
 
 import coilwright.rank.Cost;
-import coilwright.search.Candidate;
 import coilwright.spring.CompressionState;
 import coilwright.spring.LoadState;
 import coilwright.unit.Dimension;
@@ -18,37 +17,43 @@ final class CompressionQuantities {
           length("mean_diameter", "mean diameter D", 3, s -> s.spring().meanDiameter()),
           length("outside_diameter", "outside diameter De", 3, s -> s.spring().outsideDiameter()),
           length("inside_diameter", "inside diameter Di", 3, s -> s.spring().insideDiameter()),
-          number("spring_index", "spring index w", 2, s -> s.spring().springIndex()),
-          number("active_coils", "active coils n", 2, CompressionState::coils),
-          number("total_coils", "total coils nt", 2, s -> s.spring().totalCoils()),
+          Quantities.number("spring_index", "spring index w", 2, s -> s.spring().springIndex()),
+          Quantities.number("active_coils", "active coils n", 2, CompressionState::coils),
+          Quantities.number("total_coils", "total coils nt", 2, s -> s.spring().totalCoils()),
           length("free_length", "free length L0", 2, s -> s.spring().freeLength()),
           length("solid_length", "solid length Ls", 2, CompressionState::solidLength),
           length("pitch", "pitch p", 3, s -> s.spring().pitch()),
-          of("pitch_angle", "pitch angle", Dimension.ANGLE, 2, s -> s.spring().pitchAngle()),
-          of("rate", "rate R", Dimension.RATE, 4, CompressionState::rate),
-          of("mass", "mass", Dimension.MASS, 3, CompressionState::mass),
+          Quantities.of(
+              "pitch_angle", "pitch angle", Dimension.ANGLE, 2, s -> s.spring().pitchAngle()),
+          Quantities.of("rate", "rate R", Dimension.RATE, 4, CompressionState::rate),
+          Quantities.of("mass", "mass", Dimension.MASS, 3, CompressionState::mass),
           length("wire_length", "wire length", 1, CompressionState::wireLength),
-          number("cost_index", "cost proxy", 2, s -> Cost.of(s).total()),
-          of(
+          Quantities.number("cost_index", "cost proxy", 2, s -> Cost.of(s).total()),
+          Quantities.of(
               "surge_frequency",
               "surge frequency",
               Dimension.FREQUENCY,
               0,
               s -> s.spring().surgeFrequency()),
-          of(
+          Quantities.of(
               "tensile_strength",
               "tensile strength Rm",
               Dimension.STRESS,
               0,
               s -> s.wire().tensileStrength()),
-          of("shear_modulus", "shear modulus G", Dimension.STRESS, 0, s -> s.wire().shearModulus()),
-          of(
+          Quantities.of(
+              "shear_modulus",
+              "shear modulus G",
+              Dimension.STRESS,
+              0,
+              s -> s.wire().shearModulus()),
+          Quantities.of(
               "elastic_modulus",
               "elastic modulus E",
               Dimension.STRESS,
               0,
               s -> s.wire().elasticModulus()),
-          number(
+          Quantities.number(
               "stress_correction", "stress correction K", 4, CompressionState::correctionFactor));
 
   /** What is known at each load. */
@@ -80,51 +85,8 @@ final class CompressionQuantities {
 
   private CompressionQuantities() {}
 
-  static <T> Quantity<T> of(
-      String stem, String label, Dimension dimension, int decimals, ToDoubleFunction<T> value) {
-    return new Quantity<>(stem, label, dimension, decimals, value);
-  }
-
   private static Quantity<CompressionState> length(
       String stem, String label, int decimals, ToDoubleFunction<CompressionState> value) {
-    return of(stem, label, Dimension.LENGTH, decimals, value);
-  }
-
-  static <T> Quantity<T> number(
-      String stem, String label, int decimals, ToDoubleFunction<T> value) {
-    return of(stem, label, Dimension.NUMBER, decimals, value);
-  }
-
-  /** One of {@link #SPRING}, by the stem of its key. */
-  static Quantity<CompressionState> of(String stem) {
-    return of(SPRING, stem);
-  }
-
-  /** One of {@link #LOAD}, by the stem of its key. */
-  static Quantity<LoadState> ofLoad(String stem) {
-    return of(LOAD, stem);
-  }
-
-  private static <T> Quantity<T> of(List<Quantity<T>> all, String stem) {
-    for (Quantity<T> quantity : all) {
-      if (quantity.stem().equals(stem)) {
-        return quantity;
-      }
-    }
-    throw new IllegalArgumentException("no quantity " + stem);
-  }
-
-  /** The id under which a candidate is picked: material, series, size, ends, coils. */
-  static String id(Candidate<CompressionState> candidate) {
-    CompressionState state = candidate.state();
-    String series = state.wire().size().series().map(known -> known.id() + "/").orElse("");
-    return state.wire().grade().id()
-        + "/"
-        + series
-        + state.wire().size().label()
-        + "/"
-        + state.endForm()
-        + "/"
-        + Numbers.brief(state.coils(), 6);
+    return Quantities.of(stem, label, Dimension.LENGTH, decimals, value);
   }
 }

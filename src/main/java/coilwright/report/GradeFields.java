@@ -63,7 +63,7 @@ final class GradeFields {
   private GradeFields() {}
 
   private static <T> Quantity<T> of(String stem, Dimension dimension, ToDoubleFunction<T> of) {
-    return CompressionQuantities.of(stem, "", dimension, 3, of);
+    return Quantities.of(stem, "", dimension, 3, of);
   }
 
   /** A list as one cell. */

@@ -38,4 +38,9 @@ record Quantity<T>(
   String text(T subject, OutputUnits units) {
     return units.fixed(dimension, of.applyAsDouble(subject), decimals);
   }
+
+  /** Adds a row of label, number and unit. */
+  void addTo(TextTable table, T subject, OutputUnits units) {
+    table.row(label, text(subject, units), units.symbol(dimension));
+  }
 }

@@ -5,24 +5,31 @@ import coilwright.material.Wire;
 import coilwright.search.Conflict;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.function.UnaryOperator;
 
 /** Conflicts in plain words. */
 final class Reasons {
 
   private Reasons() {}
 
-  /** "1.40 mm music wire: stress at load needs at least 9.2 coils, solid length allows 7.5". */
-  static String of(Conflict conflict) {
+  /**
+   * "1.40 mm music-wire, squared ends: stress at load needs at least 9.2 coils, solid length allows
+   * at most 7.5 coils".
+   *
+   * @param conflict the conflict
+   * @param ends the words for an end form
+   */
+  static String of(Conflict conflict, UnaryOperator<String> ends) {
     List<String> parts = new ArrayList<>();
     for (Conflict.Part part : conflict.parts()) {
       parts.add(part.limit().text() + " " + coils(part.coils()));
     }
-    return wire(conflict) + ": " + String.join(", ", parts);
+    return wire(conflict, ends) + ": " + String.join(", ", parts);
   }
 
-  private static String wire(Conflict conflict) {
+  private static String wire(Conflict conflict, UnaryOperator<String> ends) {
     Wire wire = conflict.wire();
-    return Wires.size(wire) + " " + Wires.markedGrade(wire) + ", " + conflict.endForm() + " ends";
+    return Wires.size(wire) + " " + Wires.markedGrade(wire) + ", " + ends.apply(conflict.endForm());
   }
 
   private static String coils(CoilSet set) {

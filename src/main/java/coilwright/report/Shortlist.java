@@ -8,7 +8,7 @@ import coilwright.problem.UnitSystem;
 import coilwright.search.Answer;
 import coilwright.search.Candidate;
 import coilwright.search.WireChoice;
-import coilwright.spring.CompressionState;
+import coilwright.spring.State;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -17,6 +17,7 @@ import java.util.Map;
 /**
  * What a shortlist shows.
  *
+ * @param sheet what is particular to the kind of spring
  * @param problem the problem, with the order in which the list stands
  * @param choice the wires it offers
  * @param answer what the search found
@@ -24,13 +25,15 @@ import java.util.Map;
  * @param ranked all candidates that may be listed, best first
  * @param most how many of them, or lines of text, are shown
  * @param catalogue knows which grades are equivalent
+ * @param <S> the state of the kind of spring
  */
-public record Shortlist(
+public record Shortlist<S extends State>(
+    Sheet<S> sheet,
     Problem problem,
     WireChoice choice,
-    Answer<CompressionState> answer,
+    Answer<S> answer,
     boolean everyCount,
-    List<Candidate<CompressionState>> ranked,
+    List<Candidate<S>> ranked,
     int most,
     Catalogue catalogue)
     implements Result {
@@ -41,18 +44,18 @@ public record Shortlist(
   }
 
   /** The candidates that JSON and CSV hold, best first. */
-  List<Candidate<CompressionState>> shown() {
+  List<Candidate<S>> shown() {
     return ranked.subList(0, Math.min(most, ranked.size()));
   }
 
   @Override
   public String text(UnitSystem units) {
-    return ShortlistText.of(this, OutputUnits.ofText(units));
+    return new ShortlistText<>(this, OutputUnits.ofText(units)).text();
   }
 
   @Override
   public String json() {
-    return ShortlistJson.of(this);
+    return Json.document(new ShortlistJson<>(this));
   }
 
   @Override

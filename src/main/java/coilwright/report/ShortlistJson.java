@@ -2,51 +2,35 @@ package coilwright.report;
 
 import coilwright.limit.CoilSet;
 import coilwright.problem.LimitName;
-import coilwright.problem.Requirement;
+import coilwright.search.Candidate;
 import coilwright.search.Conflict;
+import coilwright.spring.State;
 import java.io.IOException;
 import java.util.Map;
 
-/** A shortlist as JSON. */
-final class ShortlistJson {
+/**
+ * A shortlist as JSON.
+ *
+ * @param shortlist what it shows
+ * @param <S> the state of the kind of spring
+ */
+record ShortlistJson<S extends State>(Shortlist<S> shortlist) implements Json.Part {
 
   /** The version of the output: raised when a meaning changes. */
   static final int FORMAT = 1;
 
-  private final Shortlist shortlist;
-
-  private ShortlistJson(Shortlist shortlist) {
-    this.shortlist = shortlist;
-  }
-
-  /** Writes a shortlist. */
-  static String of(Shortlist shortlist) {
-    return Json.document(new ShortlistJson(shortlist)::writeTo);
-  }
-
-  private void writeTo(Json json) throws IOException {
+  @Override
+  public void writeTo(Json json) throws IOException {
     json.count("format", FORMAT);
-    json.object("problem", new ProblemJson(shortlist.problem(), shortlist.materials()));
-    required(json, shortlist.problem().required().orElseThrow());
+    json.object(
+        "problem", new ProblemJson(shortlist.sheet(), shortlist.problem(), shortlist.materials()));
+    shortlist.sheet().writeRequired(json, shortlist.problem());
     json.object("search", this::search);
     json.array("candidates", this::candidates);
     json.array("rejected", this::rejected);
     json.array("conflicts", this::conflicts);
     json.strings("warnings", Warnings.full(Warnings.of(shortlist)));
     json.strings("cautions", Cautions.LINES);
-  }
-
-  /** The load line of one spring. */
-  static void required(Json json, Requirement required) throws IOException {
-    json.object(
-        "required",
-        body -> {
-          body.number("rate_n_per_mm", required.rate());
-          if (required.freeLength().isPresent()) {
-            body.number("free_length_mm", required.freeLength().getAsDouble());
-          }
-          body.string("rule", required.rule());
-        });
   }
 
   private void search(Json json) throws IOException {
@@ -58,11 +42,11 @@ final class ShortlistJson {
   private void candidates(Json json) throws IOException {
     for (int i = 0; i < shortlist.shown().size(); i++) {
       int rank = i + 1;
-      CandidateJson candidate = new CandidateJson(shortlist.shown().get(i), shortlist.problem());
+      Candidate<S> candidate = shortlist.shown().get(i);
       json.braces(
           body -> {
             body.count("rank", rank);
-            candidate.writeTo(body);
+            CandidateJson.write(body, shortlist.sheet(), shortlist.problem(), candidate);
           });
     }
   }
@@ -83,14 +67,14 @@ final class ShortlistJson {
     }
   }
 
-  private static void conflict(Json json, Conflict conflict) throws IOException {
+  private void conflict(Json json, Conflict conflict) throws IOException {
     json.string("material", conflict.wire().grade().id());
     if (conflict.wire().size().series().isPresent()) {
       json.string("wire_series", conflict.wire().size().series().get().id());
     }
     json.string("wire_size", conflict.wire().size().label());
     json.string("ends", conflict.endForm());
-    json.string("reason", Reasons.of(conflict));
+    json.string("reason", Reasons.of(conflict, shortlist.sheet()::ends));
     json.array(
         "limits",
         list -> {

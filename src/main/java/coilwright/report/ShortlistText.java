@@ -1,49 +1,54 @@
 package coilwright.report;
 
 import coilwright.problem.LimitName;
+import coilwright.spring.State;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 
-/** A shortlist as text. */
-final class ShortlistText {
+/**
+ * A shortlist as text.
+ *
+ * @param <S> the state of the kind of spring
+ */
+final class ShortlistText<S extends State> {
 
   private static final int NEAREST = 5;
 
-  private final Shortlist shortlist;
+  private final Shortlist<S> shortlist;
   private final OutputUnits units;
   private final Lines lines = new Lines();
 
-  private ShortlistText(Shortlist shortlist, OutputUnits units) {
-    this.shortlist = shortlist;
-    this.units = units;
-  }
-
   /**
-   * Writes a shortlist.
+   * Prepares a shortlist.
    *
    * @param shortlist what it shows
    * @param units the units shown
    */
-  static String of(Shortlist shortlist, OutputUnits units) {
-    ShortlistText report = new ShortlistText(shortlist, units);
-    report.head();
-    ShortlistTable table = new ShortlistTable(shortlist, units);
+  ShortlistText(Shortlist<S> shortlist, OutputUnits units) {
+    this.shortlist = shortlist;
+    this.units = units;
+  }
+
+  /** The text. */
+  String text() {
+    head();
+    ShortlistTable<S> table = new ShortlistTable<>(shortlist, units);
     if (shortlist.answer().feasible().isEmpty()) {
-      report.nothing();
+      nothing();
     } else {
-      table.addTo(report.lines);
+      table.addTo(lines);
     }
-    report.ruledOut();
-    report.lines.foot(Warnings.of(shortlist, table.shown()));
-    return report.lines.text();
+    ruledOut();
+    lines.foot(Warnings.of(shortlist, table.shown()));
+    return lines.text();
   }
 
   private void head() {
-    lines.line(Understood.title(shortlist.problem()));
+    lines.line(Understood.title(shortlist.sheet(), shortlist.problem()));
     lines.line("");
     lines.line("Understood");
-    lines.block(Understood.of(shortlist.problem(), shortlist.grades(), units));
+    lines.block(Understood.of(shortlist.sheet(), shortlist.problem(), shortlist.grades(), units));
     lines.line("");
   }
 
@@ -60,7 +65,7 @@ final class ShortlistText {
     }
     lines.line("Nearest, and what would have to change");
     for (WayOut way : nearest) {
-      lines.line("  " + Reasons.of(way.conflict()));
+      lines.line("  " + Reasons.of(way.conflict(), shortlist.sheet()::ends));
       lines.line("    " + way.text(units));
     }
     lines.line("");
@@ -69,7 +74,8 @@ final class ShortlistText {
   /** The nearest wire of each material, nearest first. */
   private List<WayOut> nearest() {
     Map<String, WayOut> byMaterial = new LinkedHashMap<>();
-    WayOut.nearestFirst(shortlist.problem(), shortlist.answer().conflicts())
+    WayOut.nearestFirst(
+            shortlist.sheet().synthesis(), shortlist.problem(), shortlist.answer().conflicts())
         .forEach(way -> byMaterial.putIfAbsent(way.conflict().wire().grade().id(), way));
     return byMaterial.values().stream().limit(NEAREST).toList();
   }

@@ -3,16 +3,10 @@ package coilwright.report;
 import coilwright.material.WireGrade;
 import coilwright.material.WireSeries;
 import coilwright.material.WireSize;
-import coilwright.problem.CompressionDesign;
 import coilwright.problem.Envelope;
-import coilwright.problem.LoadAsked;
 import coilwright.problem.Make;
 import coilwright.problem.Problem;
-import coilwright.problem.Requirement;
-import coilwright.problem.Tolerance;
-import coilwright.spring.EndType;
 import coilwright.spring.Rounding;
-import coilwright.spring.Seating;
 import coilwright.unit.Dimension;
 import java.util.ArrayList;
 import java.util.List;
@@ -35,81 +29,64 @@ final class Understood {
   /**
    * The loads, the space, what may be made, and the limits.
    *
+   * @param sheet what is particular to the kind of spring
    * @param problem the problem
    * @param grades the grades tried, or the one checked
    * @param units the units shown
    */
-  static String of(Problem problem, List<WireGrade> grades, OutputUnits units) {
+  static String of(Sheet<?> sheet, Problem problem, List<WireGrade> grades, OutputUnits units) {
     Understood words = new Understood(problem, grades, units);
-    words.loads();
-    words.space(problem.envelope());
+    sheet.understandLoads(words);
+    words.space(sheet, problem.envelope());
     if (problem.design().isEmpty()) {
       words.make(problem.make());
+      sheet.understandEnds(words);
     }
     words.treatment();
     if (problem.design().isEmpty()) {
-      words.steps(problem.make());
+      words.steps(problem.make(), sheet.roundsLength());
     }
-    words.seats();
-    new UnderstoodLimits(problem, grades).addTo(words.table);
+    sheet.understandLimits(words);
     return words.table.text("  ");
   }
 
-  private void loads() {
+  /** The problem. */
+  Problem problem() {
+    return problem;
+  }
+
+  /** The grades tried, or the one checked. */
+  List<WireGrade> grades() {
+    return grades;
+  }
+
+  /** The units shown. */
+  OutputUnits units() {
+    return units;
+  }
+
+  /** Adds a row. */
+  void row(String name, String words) {
+    table.row(name, words);
+  }
+
+  /** ", shared by 2 springs side by side"; empty for one. */
+  String shared() {
     int parallel = problem.facts().springsInParallel();
-    String stroke =
-        problem.facts().stroke().isPresent()
-            ? "; stroke " + length(problem.facts().stroke().getAsDouble())
-            : "";
-    String shared = parallel > 1 ? ", shared by " + parallel + " springs side by side" : "";
-    List<String> loads = problem.facts().loads().stream().map(this::load).toList();
-    table.row("loads", String.join("; ", loads) + stroke + shared);
-    if (problem.required().isPresent()) {
-      Requirement required = problem.required().get();
-      table.row(
-          parallel > 1 ? "each spring" : "load line",
-          "rate "
-              + units.brief(Dimension.RATE, required.rate(), 4)
-              + ", "
-              + (required.freeLength().isPresent()
-                  ? "free length " + length(required.freeLength().getAsDouble())
-                  : "lengths as short as the limits allow")
-              + ", from "
-              + required.rule());
-    }
-    problem
-        .overtravel()
-        .ifPresent(length -> table.row("overtravel", "to " + length(length) + ", no force asked"));
+    return parallel > 1 ? ", shared by " + parallel + " springs side by side" : "";
   }
 
-  private String load(LoadAsked load) {
-    List<String> words = new ArrayList<>();
-    load.force().ifPresent(force -> words.add(units.brief(Dimension.FORCE, force, 3)));
-    load.tolerance().map(this::tolerance).ifPresent(words::add);
-    load.length().ifPresent(length -> words.add("at " + length(length)));
-    if (load.force().isEmpty()) {
-      words.add("(force found)");
-    }
-    if (load.length().isEmpty()) {
-      words.add("(length found)");
-    }
-    return String.join(" ", words);
-  }
-
-  private String tolerance(Tolerance tolerance) {
-    return "(+"
-        + units.number(Dimension.FORCE, tolerance.plus(), 3)
-        + " -"
-        + units.brief(Dimension.FORCE, tolerance.minus(), 3)
-        + " accepted, not judged)";
+  /** The name of the row of what one spring must do. */
+  String each() {
+    return problem.facts().springsInParallel() > 1 ? "each spring" : "load line";
   }
 
   /** With a digit more in inches, so that an inch file's lengths come back as they were typed. */
-  private String length(double value) {
+  String length(double value) {
     return units.brief(Dimension.LENGTH, value, units == OutputUnits.METRIC ? 3 : 4);
   }
 
-  private void space(Envelope space) {
+  private void space(Sheet<?> sheet, Envelope space) {
     List<String> words = new ArrayList<>();
     bound(words, "bore", space.bore());
     bound(words, "rod", space.rod());
@@ -123,10 +100,12 @@ final class Understood {
     bound(words, "inside diameter from", space.minInsideDiameter());
     bound(words, "free length up to", space.maxFreeLength());
     bound(words, "solid length up to", space.maxSolidLength());
+    sheet.understandSpace(this, words);
     table.row("space", words.isEmpty() ? "no bound given" : String.join(", ", words));
   }
 
-  private void bound(List<String> words, String name, OptionalDouble value) {
+  /** Adds a bound where it is given. */
+  void bound(List<String> words, String name, OptionalDouble value) {
     value.ifPresent(given -> words.add(name + " " + length(given)));
   }
 
@@ -138,7 +117,6 @@ final class Understood {
         (ids.isEmpty() ? "none in range" : String.join(", ", ids))
             + (assumed ? " (assumed: common grades, supply " + make.supply().word() + ")" : ""));
     table.row("wire", wire(make));
-    table.row("ends", String.join(", ", make.ends().stream().map(EndType::id).toList()));
   }
 
   /** What is done to the spring, of a list and of a checked spring alike. */
@@ -151,15 +129,17 @@ final class Understood {
     }
   }
 
-  private void steps(Make make) {
+  private void steps(Make make, boolean length) {
     table.row(
         "steps",
         "coils "
             + Numbers.brief(make.coilStep(), 6)
             + ", mean diameter "
             + step(make.rounding().diameterStep(), make.rounding().smallDiameterStep())
-            + ", free length "
-            + step(make.rounding().lengthStep(), make.rounding().smallLengthStep()));
+            + (length
+                ? ", free length "
+                    + step(make.rounding().lengthStep(), make.rounding().smallLengthStep())
+                : ""));
   }
 
   private static String wire(Make make) {
@@ -181,22 +161,9 @@ final class Understood {
         : shown + " (a tenth below " + length(Rounding.SMALL_BELOW) + " mean diameter)";
   }
 
-  private void seats() {
-    table.row("seats", problem.seats().map(Seating::id).orElseGet(this::assumedSeats));
-  }
-
-  private String assumedSeats() {
-    return problem
-        .design()
-        .map(CompressionDesign.class::cast)
-        .map(CompressionDesign::ends)
-        .map(ends -> Seating.usualFor(ends).id() + " (assumed)")
-        .orElse("fixed-fixed for squared-ground ends, else pinned-pinned (assumed)");
-  }
-
   /** The title, cleared of control characters; a plain one where the file has none. */
-  static String title(Problem problem) {
+  static String title(Sheet<?> sheet, Problem problem) {
     String title = problem.title().replaceAll("\\p{Cc}", " ").strip();
-    return title.isEmpty() ? "Compression spring" : title;
+    return title.isEmpty() ? sheet.title() : title;
   }
 }

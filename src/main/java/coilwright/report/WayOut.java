@@ -6,15 +6,16 @@ import coilwright.limit.Limit;
 import coilwright.limit.Side;
 import coilwright.problem.LimitName;
 import coilwright.problem.Problem;
-import coilwright.search.CompressionSearch;
 import coilwright.search.Conflict;
 import coilwright.search.Nearest;
-import coilwright.spring.CompressionFamily;
-import coilwright.spring.CompressionState;
+import coilwright.search.Synthesis;
+import coilwright.spring.Family;
+import coilwright.spring.State;
 import coilwright.unit.Dimension;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import java.util.Optional;
 
 /**
  * The way out for a wire without a candidate: the coil count at which least would have to change,
@@ -37,18 +38,23 @@ record WayOut(Conflict conflict, double coils, List<Finding> failing) {
   }
 
   /** The way out of each conflict, the one that asks the smallest change first. */
-  static List<WayOut> nearestFirst(Problem problem, List<Conflict> conflicts) {
-    List<Limit<CompressionState>> limits = new CompressionSearch().limits(problem);
+  static <S extends State> List<WayOut> nearestFirst(
+      Synthesis<S> kind, Problem problem, List<Conflict> conflicts) {
+    List<Limit<S>> limits = kind.limits(problem);
     return conflicts.stream()
-        .map(conflict -> of(problem, limits, conflict))
+        .map(conflict -> of(conflict, family(kind, problem, conflict), limits))
         .sorted(Comparator.comparingDouble(WayOut::shortfall))
         .toList();
   }
 
-  private static WayOut of(
-      Problem problem, List<Limit<CompressionState>> limits, Conflict conflict) {
-    CompressionFamily family = family(problem, conflict);
+  /** At no coil count where the wire has no family at all. */
+  private static <S extends State> WayOut of(
+      Conflict conflict, Optional<Family<S>> springs, List<Limit<S>> limits) {
     WayOut best = new WayOut(conflict, Double.NaN, List.of());
+    if (springs.isEmpty()) {
+      return best;
+    }
+    Family<S> family = springs.get();
     for (double coils : counts(conflict)) {
       if (coils >= family.fewestCoils() && coils <= family.mostCoils()) {
         WayOut way = new WayOut(conflict, coils, failing(family.at(coils), limits));
@@ -58,12 +64,14 @@ record WayOut(Conflict conflict, double coils, List<Finding> failing) {
     return best;
   }
 
-  private static CompressionFamily family(Problem problem, Conflict conflict) {
-    return new CompressionSearch()
-        .families(problem, List.of(conflict.wire())).stream()
-            .filter(one -> one.endForm().equals(conflict.endForm()))
-            .findFirst()
-            .orElseThrow();
+  private static <S extends State> Optional<Family<S>> family(
+      Synthesis<S> kind, Problem problem, Conflict conflict) {
+    for (Family<S> family : kind.families(problem, List.of(conflict.wire()))) {
+      if (family.endForm().equals(conflict.endForm())) {
+        return Optional.of(family);
+      }
+    }
+    return Optional.empty();
   }
 
   /** Where a pair comes closest; else the bounds of all parts, and whole counts. */
@@ -86,10 +94,9 @@ record WayOut(Conflict conflict, double coils, List<Finding> failing) {
     return counts;
   }
 
-  private static List<Finding> failing(
-      CompressionState state, List<Limit<CompressionState>> limits) {
+  private static <S extends State> List<Finding> failing(S state, List<Limit<S>> limits) {
     List<Finding> failing = new ArrayList<>();
-    for (Limit<CompressionState> limit : limits) {
+    for (Limit<S> limit : limits) {
       Finding finding = limit.judge(state);
       if (!(finding.margin() >= -AT_THE_BOUND)) {
         failing.add(finding);

@@ -1,0 +1,23 @@
+package coilwright.report;
+
+import coilwright.spring.Kind;
+
+/** The sheets of the kinds of springs. */
+public final class Sheets {
+
+  private Sheets() {}
+
+  /**
+   * The sheet of a kind.
+   *
+   * @param kind the kind
+   * @return its sheet
+   */
+  public static Sheet<?> of(Kind kind) {
+    return switch (kind) {
+      case COMPRESSION -> new CompressionSheet();
+      case EXTENSION, TORSION ->
+          throw new IllegalArgumentException("no sheet for " + kind.id() + " springs");
+    };
+  }
+}
