@@ -13,8 +13,8 @@ import java.util.OptionalDouble;
  * @param title free text; empty where the file gives none
  * @param kind the kind of spring
  * @param units how text is shown
- * @param facts what the file says about the line of force against length; without loads for a
- *     torsion spring
+ * @param facts what the file says about the line of force against length; for a torsion spring, how
+ *     many share the loads and nothing else
  * @param required the load line and loads of one compression spring; empty for the other kinds, and
  *     in a file for checking that does not fix the line
  * @param overtravel a length it must survive beyond its loads [mm], or empty

@@ -9,6 +9,7 @@ import java.util.OptionalDouble;
  *
  * @param closing whether the loads wind the spring up; else they unwind it
  * @param loads the loads as the file gives them, for the whole group
+ * @param facts what else it says of the line of torque against angle, likewise for the group
  * @param line what one spring must do; empty only in a file for checking that does not fix it
  * @param legs the legs; both zero long where the file gives none
  * @param maxBodyLength greatest body length at the greatest torque [mm], or empty
@@ -18,6 +19,7 @@ import java.util.OptionalDouble;
 public record TorsionAsked(
     boolean closing,
     List<TorqueAsked> loads,
+    TorqueFacts facts,
     Optional<TorqueLine> line,
     LegsAsked legs,
     OptionalDouble maxBodyLength,

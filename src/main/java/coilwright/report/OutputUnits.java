@@ -40,6 +40,8 @@ enum OutputUnits {
       case LENGTH -> "mm";
       case FORCE -> "N";
       case RATE -> "N/mm";
+      case TORQUE -> "N*mm";
+      case ANGULAR_RATE -> "N*mm/deg";
       case STRESS -> "MPa";
       case ANGLE -> "deg";
       case FREQUENCY -> "Hz";
@@ -55,6 +57,8 @@ enum OutputUnits {
       case LENGTH -> "in";
       case FORCE -> "lbf";
       case RATE -> "lbf/in";
+      case TORQUE -> "lbf*in";
+      case ANGULAR_RATE -> "lbf*in/deg";
       case STRESS -> this == INCH ? "ksi" : "psi";
       case DENSITY -> "lb/in^3";
       case MASS -> this == INCH ? "oz" : "lb";
@@ -111,6 +115,8 @@ enum OutputUnits {
       case LENGTH -> this == METRIC ? "_mm" : "_in";
       case FORCE -> this == METRIC ? "_n" : "_lbf";
       case RATE -> this == METRIC ? "_n_per_mm" : "_lbf_per_in";
+      case TORQUE -> this == METRIC ? "_n_mm" : "_lbf_in";
+      case ANGULAR_RATE -> this == METRIC ? "_n_mm_per_deg" : "_lbf_in_per_deg";
       case STRESS -> this == METRIC ? "_mpa" : "_psi";
       case DENSITY -> this == METRIC ? "_kg_per_m3" : "_lb_per_in3";
       case MASS -> this == METRIC ? "_g" : "_lb";

@@ -6,9 +6,9 @@ import java.util.Optional;
 /**
  * A kind of physical quantity with the units it may be written in.
  *
- * <p>The first unit of each kind is the one used inside the program: mm, N, N/mm, MPa, rad, Hz,
- * kg/m^3 and plain shares. Conversion happens only where files are read and where results are
- * written.
+ * <p>The first unit of each kind is the one used inside the program: mm, N, N/mm, N*mm, N*mm/rad,
+ * MPa, rad, Hz, kg/m^3, kg and plain shares. Conversion happens only where files are read and where
+ * results are written.
  */
 public enum Dimension {
   /** A length; inside, mm. */
@@ -39,6 +39,24 @@ public enum Dimension {
       new Unit("lbf/in", Exact.NEWTON_PER_LBF / Exact.MM_PER_INCH),
       new Unit("lbf/ft", Exact.NEWTON_PER_LBF / (12 * Exact.MM_PER_INCH)),
       new Unit("kgf/mm", Exact.STANDARD_GRAVITY)),
+  /** A torque; inside, N mm. */
+  TORQUE(
+      "a torque",
+      new Unit("N*mm", 1),
+      new Unit("N*m", 1000),
+      new Unit("lbf*in", Exact.NEWTON_PER_LBF * Exact.MM_PER_INCH),
+      new Unit("lbf*ft", Exact.NEWTON_PER_LBF * 12 * Exact.MM_PER_INCH),
+      new Unit("ozf*in", Exact.NEWTON_PER_LBF / 16 * Exact.MM_PER_INCH)),
+  /** A torque per angle, the rate of a torsion spring; inside, N mm/rad. */
+  ANGULAR_RATE(
+      "a torque per angle",
+      new Unit("N*mm/rad", 1),
+      new Unit("N*mm/deg", 180 / Math.PI),
+      new Unit("N*m/rad", 1000),
+      new Unit("N*m/deg", 1000 * 180 / Math.PI),
+      new Unit("lbf*in/rad", Exact.NEWTON_PER_LBF * Exact.MM_PER_INCH),
+      new Unit("lbf*in/deg", Exact.NEWTON_PER_LBF * Exact.MM_PER_INCH * 180 / Math.PI),
+      new Unit("lbf*in/turn", Exact.NEWTON_PER_LBF * Exact.MM_PER_INCH / (2 * Math.PI))),
   /** A stress or a modulus; inside, MPa. */
   STRESS(
       "a stress",
