@@ -1,5 +1,6 @@
 package coilwright.rank;
 
+import coilwright.spring.EndWork;
 import coilwright.spring.State;
 import java.util.List;
 
@@ -11,9 +12,10 @@ import java.util.List;
  * @param wire cost of the wire [g of hard-drawn wire]
  * @param coiling cost of coiling
  * @param stressRelief cost of heat treatment after coiling
- * @param grinding cost of grinding the ends; 0 where they are not ground
+ * @param endWork what is done to the ends
+ * @param ends cost of that; 0 where nothing is done
  */
-public record Cost(double wire, double coiling, double stressRelief, double grinding) {
+public record Cost(double wire, double coiling, double stressRelief, EndWork endWork, double ends) {
 
   /** Wire lost at cut-off, as a share of the wire in the spring. Common practice, no source. */
   public static final double END_SCRAP = 0.03;
@@ -26,6 +28,12 @@ public record Cost(double wire, double coiling, double stressRelief, double grin
 
   /** Grinding both ends, as a share of the wire's cost. Common practice, no source. */
   public static final double GRINDING = 0.25;
+
+  /** Bending up both hooks, as a share of the wire's cost. Common practice, no source. */
+  public static final double HOOK_FORMING = 0.40;
+
+  /** Forming both legs, as a share of the wire's cost. Common practice, no source. */
+  public static final double LEG_FORMING = 0.20;
 
   private static final double GRAM_PER_KG = 1000;
 
@@ -46,12 +54,21 @@ public record Cost(double wire, double coiling, double stressRelief, double grin
   public static Cost of(State state) {
     double wire = state.wire().grade().costIndex() * state.mass() * GRAM_PER_KG * (1 + END_SCRAP);
     return new Cost(
-        wire, COILING * wire, STRESS_RELIEF * wire, state.ground() ? GRINDING * wire : 0);
+        wire, COILING * wire, STRESS_RELIEF * wire, state.endWork(), share(state.endWork()) * wire);
+  }
+
+  private static double share(EndWork work) {
+    return switch (work) {
+      case NONE -> 0;
+      case GRINDING -> GRINDING;
+      case HOOK_FORMING -> HOOK_FORMING;
+      case LEG_FORMING -> LEG_FORMING;
+    };
   }
 
   /** The sum of the terms [g of hard-drawn wire]. */
   public double total() {
-    return wire + coiling + stressRelief + grinding;
+    return wire + coiling + stressRelief + ends;
   }
 
   /** The terms, the wire first. */
@@ -60,6 +77,6 @@ public record Cost(double wire, double coiling, double stressRelief, double grin
         new Term("wire with end scrap", wire),
         new Term("coiling", coiling),
         new Term("stress relief", stressRelief),
-        new Term("grinding", grinding));
+        new Term(endWork.words(), ends));
   }
 }

@@ -5,12 +5,20 @@ import coilwright.problem.RankBy;
 import coilwright.search.Answer;
 import coilwright.search.Candidate;
 import coilwright.spring.State;
+import java.util.ArrayList;
+import java.util.Collections;
 import java.util.Comparator;
 import java.util.List;
 import java.util.function.ToDoubleFunction;
 
 /** Orders of candidates, best first. Ties go by material, wire diameter, ends and coil count. */
 public final class Order {
+
+  /**
+   * Springs of one wire whose masses differ by no more than this weigh alike, where mass hardly
+   * varies along its counts: rounding a diameter moves a mass by little less [-].
+   */
+  private static final double ALIKE = 0.01;
 
   private Order() {}
 
@@ -48,9 +56,32 @@ public final class Order {
   public static <S extends State> List<Candidate<S>> ranked(
       Answer<S> answer, RankBy by, boolean everyCount) {
     Comparator<Candidate<S>> order = by(by);
-    return answer.feasible().stream()
-        .flatMap(wire -> everyCount ? wire.stream() : wire.stream().min(order).stream())
-        .sorted(order)
-        .toList();
+    List<Candidate<S>> ranked = new ArrayList<>();
+    for (List<Candidate<S>> wire : answer.feasible()) {
+      if (everyCount) {
+        ranked.addAll(wire);
+      } else {
+        ranked.add(best(wire, by, order));
+      }
+    }
+    ranked.sort(order);
+    return ranked;
+  }
+
+  /**
+   * The best spring of one wire. Where mass hardly varies along its counts, those that weigh or
+   * cost alike but for rounding are told apart by their stress margin.
+   */
+  private static <S extends State> Candidate<S> best(
+      List<Candidate<S>> wire, RankBy by, Comparator<Candidate<S>> order) {
+    Candidate<S> best = Collections.min(wire, order);
+    boolean byMass = by == RankBy.MASS || by == RankBy.COST;
+    if (!byMass || !best.state().massHardlyVaries()) {
+      return best;
+    }
+    double most = best.state().mass() * (1 + ALIKE);
+    List<Candidate<S>> alike = new ArrayList<>(wire);
+    alike.removeIf(candidate -> candidate.state().mass() > most);
+    return Collections.min(alike, by(RankBy.MARGIN));
   }
 }

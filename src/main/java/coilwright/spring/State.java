@@ -17,9 +17,22 @@ public interface State {
   /** Whether its ends are ground. */
   boolean ground();
 
+  /** What is done to its ends after coiling. */
+  default EndWork endWork() {
+    return ground() ? EndWork.GRINDING : EndWork.NONE;
+  }
+
   /** Mass [kg]. */
   double mass();
 
   /** Developed wire length [mm]. */
   double wireLength();
+
+  /**
+   * Whether mass hardly varies along its family, so that springs of one wire are better told apart
+   * by something else.
+   */
+  default boolean massHardlyVaries() {
+    return false;
+  }
 }

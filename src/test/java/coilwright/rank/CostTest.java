@@ -34,8 +34,8 @@ class CostTest {
 
   @Test
   void onlyGroundEndsAreGround() {
-    assertThat(Cost.of(spring(EndType.SQUARED, 2)).grinding()).isZero();
-    assertThat(Cost.of(spring(EndType.SQUARED_GROUND, 2)).grinding()).isPositive();
+    assertThat(Cost.of(spring(EndType.SQUARED, 2)).ends()).isZero();
+    assertThat(Cost.of(spring(EndType.SQUARED_GROUND, 2)).ends()).isPositive();
   }
 
   @Test
