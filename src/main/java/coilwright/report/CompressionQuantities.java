@@ -1,6 +1,5 @@
 package coilwright.report;
 
-import coilwright.rank.Cost;
 import coilwright.spring.CompressionState;
 import coilwright.spring.LoadState;
 import coilwright.unit.Dimension;
@@ -13,7 +12,7 @@ final class CompressionQuantities {
   /** Dimensions and properties, in the order of the output. */
   static final List<Quantity<CompressionState>> SPRING =
       List.of(
-          length("wire_diameter", "wire diameter d", 3, s -> s.spring().wireDiameter()),
+          SpringFields.wireDiameter(),
           length("mean_diameter", "mean diameter D", 3, s -> s.spring().meanDiameter()),
           length("outside_diameter", "outside diameter De", 3, s -> s.spring().outsideDiameter()),
           length("inside_diameter", "inside diameter Di", 3, s -> s.spring().insideDiameter()),
@@ -26,33 +25,18 @@ final class CompressionQuantities {
           Quantities.of(
               "pitch_angle", "pitch angle", Dimension.ANGLE, 2, s -> s.spring().pitchAngle()),
           Quantities.of("rate", "rate R", Dimension.RATE, 4, CompressionState::rate),
-          Quantities.of("mass", "mass", Dimension.MASS, 3, CompressionState::mass),
-          length("wire_length", "wire length", 1, CompressionState::wireLength),
-          Quantities.number("cost_index", "cost proxy", 2, s -> Cost.of(s).total()),
+          SpringFields.mass(),
+          SpringFields.wireLength(),
+          SpringFields.cost(),
           Quantities.of(
               "surge_frequency",
               "surge frequency",
               Dimension.FREQUENCY,
               0,
               s -> s.spring().surgeFrequency()),
-          Quantities.of(
-              "tensile_strength",
-              "tensile strength Rm",
-              Dimension.STRESS,
-              0,
-              s -> s.wire().tensileStrength()),
-          Quantities.of(
-              "shear_modulus",
-              "shear modulus G",
-              Dimension.STRESS,
-              0,
-              s -> s.wire().shearModulus()),
-          Quantities.of(
-              "elastic_modulus",
-              "elastic modulus E",
-              Dimension.STRESS,
-              0,
-              s -> s.wire().elasticModulus()),
+          SpringFields.tensileStrength(),
+          SpringFields.shearModulus(),
+          SpringFields.elasticModulus(),
           Quantities.number(
               "stress_correction", "stress correction K", 4, CompressionState::correctionFactor));
 

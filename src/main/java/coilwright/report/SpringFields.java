@@ -1,6 +1,7 @@
 package coilwright.report;
 
 import coilwright.limit.Finding;
+import coilwright.material.Wire;
 import coilwright.problem.Problem;
 import coilwright.rank.Cost;
 import coilwright.search.Candidate;
@@ -8,6 +9,7 @@ import coilwright.spring.State;
 import coilwright.unit.Dimension;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.ToDoubleFunction;
 
 /** The values that every kind of spring has, each declared once for JSON and CSV. */
 final class SpringFields {
@@ -72,26 +74,23 @@ final class SpringFields {
         "wire_diameter", "wire diameter d", Dimension.LENGTH, 3, state -> state.wire().diameter());
   }
 
-  /** The strength and the moduli of its wire. */
-  static <S extends State> List<Quantity<S>> wire() {
-    return List.of(
-        Quantities.of(
-            "tensile_strength",
-            "tensile strength Rm",
-            Dimension.STRESS,
-            0,
-            state -> state.wire().tensileStrength()),
-        Quantities.of(
-            "shear_modulus",
-            "shear modulus G",
-            Dimension.STRESS,
-            0,
-            state -> state.wire().shearModulus()),
-        Quantities.of(
-            "elastic_modulus",
-            "elastic modulus E",
-            Dimension.STRESS,
-            0,
-            state -> state.wire().elasticModulus()));
+  /** Tensile strength of its wire. */
+  static <S extends State> Quantity<S> tensileStrength() {
+    return stress("tensile_strength", "tensile strength Rm", Wire::tensileStrength);
+  }
+
+  /** Shear modulus of its wire. */
+  static <S extends State> Quantity<S> shearModulus() {
+    return stress("shear_modulus", "shear modulus G", Wire::shearModulus);
+  }
+
+  /** Modulus of elasticity of its wire. */
+  static <S extends State> Quantity<S> elasticModulus() {
+    return stress("elastic_modulus", "elastic modulus E", Wire::elasticModulus);
+  }
+
+  private static <S extends State> Quantity<S> stress(
+      String stem, String label, ToDoubleFunction<Wire> of) {
+    return Quantities.of(stem, label, Dimension.STRESS, 0, state -> of.applyAsDouble(state.wire()));
   }
 }
