@@ -21,6 +21,14 @@ public interface Limit<S extends State> {
   }
 
   /**
+   * Whether a designer may drop this bound. A limit that may be dropped can have a bound that may
+   * not: the free length asked is a wish, but no extension spring is longer than under load.
+   */
+  default boolean removable() {
+    return name().removable();
+  }
+
+  /**
    * Judges a spring.
    *
    * @param state the spring at its loads
@@ -59,6 +67,17 @@ public interface Limit<S extends State> {
    */
   default boolean straight() {
     return false;
+  }
+
+  /**
+   * How many times more than a force or a stress rounding may move the margin: more than once where
+   * what is judged is the small difference of large numbers.
+   *
+   * @param state a spring at the place in question
+   * @return the ratio [-]; where the bound is zero, in the margin's own unit
+   */
+  default double sensitivity(S state) {
+    return 1;
   }
 
   /**

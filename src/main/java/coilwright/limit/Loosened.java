@@ -33,6 +33,16 @@ public record Loosened<S extends State>(Limit<S> limit, double share) implements
   }
 
   @Override
+  public boolean removable() {
+    return limit.removable();
+  }
+
+  @Override
+  public double sensitivity(S state) {
+    return limit.sensitivity(state);
+  }
+
+  @Override
   public boolean straight() {
     return limit.straight();
   }

@@ -33,6 +33,16 @@ record Shaping<S extends State>(Limit<S> limit) implements Limit<S> {
   }
 
   @Override
+  public boolean removable() {
+    return limit.removable();
+  }
+
+  @Override
+  public double sensitivity(S state) {
+    return limit.sensitivity(state);
+  }
+
+  @Override
   public boolean straight() {
     return limit.straight();
   }

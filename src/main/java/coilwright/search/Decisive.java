@@ -57,7 +57,7 @@ final class Decisive<S extends State> {
   }
 
   private boolean holdsWithout(LimitName name) {
-    CoilSet others = search.bounded(Limits.without(left.practical(), name));
+    CoilSet others = search.bounded(left.dropping(name));
     return search.step().any(others, coils -> search.holdsBut(name, coils));
   }
 

@@ -21,8 +21,12 @@ import java.util.function.DoubleUnaryOperator;
  *
  * @param exact the coil counts of unrounded springs that hold the limit
  * @param practical the counts at which a rounded spring may hold it: never fewer
+ * @param kept the same for those bounds alone that stay where a limit is dropped
  */
-record Limits(Map<LimitName, CoilSet> exact, Map<LimitName, CoilSet> practical) {
+record Limits(
+    Map<LimitName, CoilSet> exact,
+    Map<LimitName, CoilSet> practical,
+    Map<LimitName, CoilSet> kept) {
 
   /** How many times the family's rounding share a margin may miss and still be judged rounded. */
   private static final double NEARLY = 10;
@@ -43,6 +47,7 @@ record Limits(Map<LimitName, CoilSet> exact, Map<LimitName, CoilSet> practical) 
   static <S extends State> Limits of(List<Limit<S>> limits, Trail<S> trail, CoilStep step) {
     Map<LimitName, CoilSet> exact = new EnumMap<>(LimitName.class);
     Map<LimitName, CoilSet> practical = new EnumMap<>(LimitName.class);
+    Map<LimitName, CoilSet> kept = new EnumMap<>(LimitName.class);
     Window window = new Window(trail.fewestCoils(), trail.mostCoils());
     for (Limit<S> limit : limits) {
       CoilSet set =
@@ -52,10 +57,19 @@ record Limits(Map<LimitName, CoilSet> exact, Map<LimitName, CoilSet> practical) 
       if (!set.isAll()) {
         window.narrow(limit.name(), set);
         exact.merge(limit.name(), set, CoilSet::intersect);
-        practical.merge(limit.name(), widened(limit, set, trail, step), CoilSet::intersect);
+        CoilSet wider = widened(limit, set, trail, step);
+        practical.merge(limit.name(), wider, CoilSet::intersect);
+        if (!limit.removable()) {
+          kept.merge(limit.name(), wider, CoilSet::intersect);
+        }
       }
     }
-    return new Limits(exact, practical);
+    return new Limits(exact, practical, kept);
+  }
+
+  /** Where a rounded spring may hold all limits but one, and of that one the bounds that stay. */
+  CoilSet dropping(LimitName name) {
+    return without(practical, name).intersect(kept.getOrDefault(name, CoilSet.ALL));
   }
 
   /**
@@ -139,10 +153,12 @@ record Limits(Map<LimitName, CoilSet> exact, Map<LimitName, CoilSet> practical) 
   private static <S extends State> double grazing(Limit<S> limit, Trail<S> trail) {
     double greatest = 0;
     for (double coils : limit.turns(trail)) {
-      double near = SAMPLED + blur(coils, trail);
-      if (inRange(coils, trail) == coils
-          && Math.abs(limit.judge(trail.at(coils)).margin()) <= near) {
-        greatest = Math.max(greatest, near);
+      if (inRange(coils, trail) == coils) {
+        S state = trail.at(coils);
+        double near = SAMPLED + limit.sensitivity(state) * blur(coils, trail);
+        if (Math.abs(limit.judge(state).margin()) <= near) {
+          greatest = Math.max(greatest, near);
+        }
       }
     }
     return greatest;
@@ -152,7 +168,7 @@ record Limits(Map<LimitName, CoilSet> exact, Map<LimitName, CoilSet> practical) 
   private static <S extends State> double nearly(Limit<S> limit, Trail<S> trail) {
     double greatest = 0;
     for (S known : trail.states()) {
-      double near = blur(known.coils(), trail);
+      double near = limit.sensitivity(known) * blur(known.coils(), trail);
       if (limit.judge(known).margin() >= -near) {
         greatest = Math.max(greatest, near);
       }

@@ -73,14 +73,17 @@ final class WireSearch<S extends State> {
     return family.rounded(coils).map(state -> Candidate.judge(state, limits));
   }
 
-  /** Whether the rounded spring of a coil count holds every limit but one. */
+  /**
+   * Whether the rounded spring of a coil count holds every limit but what may be dropped of one.
+   */
   boolean holdsBut(LimitName dropped, double coils) {
     Optional<S> state = family.rounded(coils);
     if (state.isEmpty()) {
       return false;
     }
     for (Limit<S> limit : limits) {
-      if (limit.name() != dropped && !limit.judge(state.get()).holds()) {
+      boolean asked = limit.name() != dropped || !limit.removable();
+      if (asked && !limit.judge(state.get()).holds()) {
         return false;
       }
     }
@@ -94,7 +97,7 @@ final class WireSearch<S extends State> {
       return false;
     }
     List<Limit<S>> others = new ArrayList<>(limits);
-    others.removeIf(limit -> limit.name() == dropped.name());
+    others.removeIf(limit -> limit.name() == dropped.name() && limit.removable());
     return Limits.mayMeet(others, new Trail<>(other), step)
         && !new WireSearch<>(other, others, step).candidates().isEmpty();
   }

@@ -41,8 +41,15 @@ public enum Source {
   EN_13906_1(
       "EN 13906-1",
       "EN 13906-1, Cylindrical helical springs made from round wire and bar, part 1: compression springs"),
+  /** Extension springs, calculation and design. */
+  EN_13906_2(
+      "EN 13906-2",
+      "EN 13906-2, Cylindrical helical springs made from round wire and bar, part 2: extension springs"),
   /** The textbook by Shigley and its later editors. */
   SHIGLEY("Shigley", "Shigley's Mechanical Engineering Design, chapter 10 (8th to 11th edition)"),
+  /** The handbook of machine design. */
+  STANDARD_HANDBOOK(
+      "Standard Handbook of Machine Design", "Standard Handbook of Machine Design, springs"),
   /** The textbook by Norton. */
   NORTON("Norton", "Norton, Machine Design, chapter 14"),
   /** The textbook by Mott. */
