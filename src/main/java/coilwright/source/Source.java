@@ -45,6 +45,10 @@ public enum Source {
   EN_13906_2(
       "EN 13906-2",
       "EN 13906-2, Cylindrical helical springs made from round wire and bar, part 2: extension springs"),
+  /** Torsion springs, calculation and design. */
+  EN_13906_3(
+      "EN 13906-3",
+      "EN 13906-3, Cylindrical helical springs made from round wire and bar, part 3: torsion springs"),
   /** The textbook by Shigley and its later editors. */
   SHIGLEY("Shigley", "Shigley's Mechanical Engineering Design, chapter 10 (8th to 11th edition)"),
   /** The handbook of machine design. */

@@ -54,6 +54,11 @@ public final class CoilTolerance {
     return rows.get(rows.size() - 1)[column];
   }
 
+  /** The greatest deviation of all, either way [mm]. */
+  public static double greatest() {
+    return of(Double.MAX_VALUE, 1);
+  }
+
   /**
    * The mean diameters near one at which the deviation of a wire's coil steps up.
    *
@@ -63,6 +68,18 @@ public final class CoilTolerance {
    */
   public static double[] stepsNear(double meanDiameter, double wireDiameter) {
     double near = 2 * of(2 * meanDiameter, meanDiameter / 100);
+    return stepsBetween(meanDiameter - near, meanDiameter + near, wireDiameter);
+  }
+
+  /**
+   * The mean diameters between two at which the deviation of a wire's coil steps up.
+   *
+   * @param from the smaller mean diameter [mm]
+   * @param to the greater [mm]
+   * @param wireDiameter d [mm]
+   * @return the diameters [mm], the two included
+   */
+  public static double[] stepsBetween(double from, double to, double wireDiameter) {
     List<Double> steps = new ArrayList<>();
     for (double[] row : Grade2.TABLE.rows()) {
       steps.add(row[0]);
@@ -72,7 +89,7 @@ public final class CoilTolerance {
     }
     return steps.stream()
         .mapToDouble(Double::doubleValue)
-        .filter(step -> Math.abs(step - meanDiameter) <= near)
+        .filter(step -> step >= from && step <= to)
         .toArray();
   }
 }

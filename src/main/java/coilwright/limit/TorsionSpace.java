@@ -1,0 +1,183 @@
+package coilwright.limit;
+
+import coilwright.problem.Envelope;
+import coilwright.problem.LimitName;
+import coilwright.source.Citation;
+import coilwright.source.Source;
+import coilwright.spring.CoilTolerance;
+import coilwright.spring.Family;
+import coilwright.spring.TorsionState;
+import coilwright.spring.WoundBody;
+import coilwright.unit.Dimension;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.OptionalDouble;
+import java.util.function.ToDoubleFunction;
+
+/**
+ * The limits that the space sets for torsion springs. A spring that closes is tightest round its
+ * arbor at the greatest torque and widest in its bore when free; one that opens the other way
+ * round.
+ */
+final class TorsionSpace {
+
+  private static final Citation ASKED = Citation.seen(Source.PROBLEM_FILE, "envelope");
+  private static final double JUST = 1e-9;
+
+  private final Envelope space;
+  private final boolean closing;
+  private final String covered;
+  private final List<Limit<TorsionState>> limits = new ArrayList<>();
+
+  private TorsionSpace(Envelope space, boolean closing, String covered) {
+    this.space = space;
+    this.closing = closing;
+    this.covered = covered;
+  }
+
+  /**
+   * Bore and nominal diameters, in the order of the names.
+   *
+   * @param space the space
+   * @param closing whether the loads wind the spring up
+   * @param covered what a definition says of the wire's coating, after a comma; empty if bare
+   */
+  static List<Limit<TorsionState>> outside(Envelope space, boolean closing, String covered) {
+    TorsionSpace all = new TorsionSpace(space, closing, covered);
+    space.bore().ifPresent(all::bore);
+    all.nominal(
+        LimitName.OUTSIDE_DIAMETER,
+        Side.MAX,
+        state -> state.spring().outsideDiameter(),
+        space.maxOutsideDiameter());
+    all.nominal(
+        LimitName.INSIDE_DIAMETER,
+        Side.MIN,
+        state -> state.spring().insideDiameter(),
+        space.minInsideDiameter());
+    return all.limits;
+  }
+
+  /**
+   * Arbor and body length, in the order of the names.
+   *
+   * @param space the space
+   * @param maxBodyLength greatest body length at the greatest torque [mm], or empty
+   * @param closing whether the loads wind the spring up
+   * @param covered what a definition says of the wire's coating, after a comma; empty if bare
+   */
+  static List<Limit<TorsionState>> inside(
+      Envelope space, OptionalDouble maxBodyLength, boolean closing, String covered) {
+    TorsionSpace all = new TorsionSpace(space, closing, covered);
+    space.rod().ifPresent(all::arbor);
+    maxBodyLength.ifPresent(all::bodyLength);
+    return all.limits;
+  }
+
+  private void nominal(
+      LimitName name, Side side, ToDoubleFunction<TorsionState> value, OptionalDouble bound) {
+    if (bound.isPresent()) {
+      Check check = new Check(name, side, Dimension.LENGTH, "nominal, free state");
+      limits.add(ValueLimit.fixed(check, value, bound.getAsDouble(), ASKED, false));
+    }
+  }
+
+  private void bore(double bore) {
+    String when = closing ? "free state" : "unwound by the greatest torque";
+    limits.add(
+        new ValueLimit<>(
+            new Check(
+                LimitName.BORE,
+                Side.MAX,
+                Dimension.LENGTH,
+                "outside diameter, " + when + covered + ", against bore less " + clearance()),
+            TorsionState::greatestOutsideDiameter,
+            state -> bore - clearance(state),
+            closing ? clearanceSource() : WoundBody.DIAMETER,
+            false));
+  }
+
+  private void arbor(double rod) {
+    String when = closing ? "wound up by the greatest torque" : "free state";
+    limits.add(
+        new ValueLimit<>(
+            new Check(
+                LimitName.ARBOR,
+                Side.MIN,
+                Dimension.LENGTH,
+                "inside diameter, " + when + covered + ", against rod plus " + clearance()),
+            TorsionState::leastInsideDiameter,
+            state -> rod + clearance(state),
+            closing ? WoundBody.DIAMETER : clearanceSource(),
+            false,
+            family -> space.clearanceAssumed() ? steps(family, rod) : new double[0]));
+  }
+
+  private void bodyLength(double greatest) {
+    limits.add(
+        ValueLimit.fixed(
+            new Check(
+                LimitName.BODY_LENGTH,
+                Side.MAX,
+                Dimension.LENGTH,
+                (closing ? "wound up" : "unwound") + " by the greatest torque" + covered),
+            state -> state.greatest().bodyLength(),
+            greatest,
+            WoundBody.LENGTH,
+            true));
+  }
+
+  private String clearance() {
+    return space.clearanceAssumed()
+        ? "the coil diameter tolerance of EN 15800 grade 2, assumed"
+        : "clearance";
+  }
+
+  private Citation clearanceSource() {
+    return space.clearanceAssumed() ? CoilTolerance.citation() : ASKED;
+  }
+
+  private double clearance(TorsionState state) {
+    return space
+        .diametralClearance()
+        .orElseGet(
+            () -> CoilTolerance.of(state.spring().meanDiameter(), state.spring().wireDiameter()));
+  }
+
+  /**
+   * Where the tolerance steps up between the diameter at which the coil just clears the rod without
+   * any and that at which it does with the greatest: on both sides of each step, since there a
+   * wider coil may clear less.
+   */
+  private double[] steps(Family<TorsionState> family, double rod) {
+    TorsionState end = family.at(family.mostCoils());
+    double clears = rod + end.coatedDiameter();
+    double[] diameters =
+        CoilTolerance.stepsBetween(
+            free(end, clears),
+            free(end, clears + CoilTolerance.greatest()),
+            end.spring().wireDiameter());
+    double same = end.spring().meanDiameter() * end.coils();
+    double[] turns = new double[2 * diameters.length];
+    for (int i = 0; i < diameters.length; i++) {
+      double coils = same / diameters[i];
+      turns[2 * i] = coils * (1 - JUST);
+      turns[2 * i + 1] = coils * (1 + JUST);
+    }
+    return turns;
+  }
+
+  /**
+   * The free mean diameter of the family that comes to a least one under load [mm]. Of the
+   * deflection each coil takes as much as it has of the product of diameter and coils, so that
+   * along a family 1/D when wound up lies above 1/D when free by the same for all.
+   */
+  private double free(TorsionState end, double least) {
+    if (!closing) {
+      return least;
+    }
+    double mean = end.greatest().insideDiameter() + end.spring().wireDiameter();
+    double inverse = 1 / least - (1 / mean - 1 / end.spring().meanDiameter());
+    return inverse > 0 ? 1 / inverse : Double.POSITIVE_INFINITY;
+  }
+}
