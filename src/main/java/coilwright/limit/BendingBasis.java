@@ -88,7 +88,7 @@ public enum BendingBasis {
   abstract double stress(TorqueState load);
 
   /** Which stress that is, in words. */
-  String definition() {
+  public String definition() {
     return definition;
   }
 
@@ -101,7 +101,7 @@ public enum BendingBasis {
    * @param winding whether the loads wind the spring up
    * @return the bound
    */
-  Allowable allowable(StressLimit limit, AllowableClass allowableClass, boolean winding) {
+  public Allowable allowable(StressLimit limit, AllowableClass allowableClass, boolean winding) {
     if (limit.share().isPresent()) {
       return new Allowable(limit.share().getAsDouble(), FILE);
     }

@@ -16,7 +16,8 @@ public final class Sheets {
   public static Sheet<?> of(Kind kind) {
     return switch (kind) {
       case COMPRESSION -> new CompressionSheet();
-      case EXTENSION, TORSION ->
+      case TORSION -> new TorsionSheet();
+      case EXTENSION ->
           throw new IllegalArgumentException("no sheet for " + kind.id() + " springs");
     };
   }
