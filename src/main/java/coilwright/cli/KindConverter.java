@@ -1,11 +1,12 @@
 package coilwright.cli;
 
+import coilwright.spring.Kind;
 import java.util.List;
 
 /** Reads the kind of spring that a starter file is for. */
-final class KindConverter extends WordConverter<String> {
+final class KindConverter extends WordConverter<Kind> {
 
   KindConverter() {
-    super(List.of("compression"), word -> word, "extension", "torsion");
+    super(List.of(Kind.values()), Kind::id);
   }
 }

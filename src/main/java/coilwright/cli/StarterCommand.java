@@ -3,6 +3,7 @@ package coilwright.cli;
 import coilwright.problem.KeyTable;
 import coilwright.problem.Starter;
 import coilwright.report.SchemaJson;
+import coilwright.spring.Kind;
 import java.io.IOException;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
@@ -27,13 +28,12 @@ import picocli.CommandLine.Spec;
     })
 final class StarterCommand implements Callable<Integer> {
 
-  /** Read so that others are refused; there is only one yet. */
   @Parameters(
       paramLabel = "KIND",
       arity = "0..1",
       converter = KindConverter.class,
-      description = "The kind of spring: compression.")
-  private String kind;
+      description = "The kind of spring: compression, extension or torsion.")
+  private Kind kind;
 
   @Option(
       names = "--schema",
@@ -57,7 +57,7 @@ final class StarterCommand implements Callable<Integer> {
           spec.commandLine(), spec.positionalParameters().get(0), "KIND is missing");
     }
     result.refuseBadTarget();
-    result.deliver(schema ? SchemaJson.of(KeyTable.form()) : Starter.compression(), terminal);
+    result.deliver(schema ? SchemaJson.of(KeyTable.forms()) : Starter.of(kind), terminal);
     return Status.FOUND;
   }
 }

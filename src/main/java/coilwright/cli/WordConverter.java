@@ -17,18 +17,15 @@ import picocli.CommandLine.TypeConversionException;
 abstract class WordConverter<T> implements ITypeConverter<T> {
 
   private final Map<String, T> words = new LinkedHashMap<>();
-  private final List<String> later;
 
   /**
    * A reader of words.
    *
    * @param values what the words stand for
    * @param word the word of each
-   * @param later words that are known, but not available yet
    */
-  WordConverter(List<T> values, Function<T, String> word, String... later) {
+  WordConverter(List<T> values, Function<T, String> word) {
     values.forEach(value -> words.put(word.apply(value), value));
-    this.later = List.of(later);
   }
 
   @Override
@@ -41,10 +38,9 @@ abstract class WordConverter<T> implements ITypeConverter<T> {
         "\""
             + word
             + "\""
-            + (later.contains(word) ? " is not available yet" : "")
             + "; accepted: "
             + String.join(", ", words.keySet())
-            + (later.contains(word) ? "" : didYouMean(nearest)));
+            + didYouMean(nearest));
   }
 
   /**

@@ -7,9 +7,10 @@ import java.util.OptionalDouble;
  * Whether facts that are not needed to fix the load line agree with it.
  *
  * @param root the file
+ * @param keys the keys of the facts
  * @param fixed the line, and what fixed it
  */
-record Agreement(Section root, FixedLine fixed) {
+record Agreement(Section root, LineKeys keys, FixedLine fixed) {
 
   /** How far a redundant fact may lie off the line, as a share of its own value [-]. */
   private static final double WITHIN = 1e-3;
@@ -18,102 +19,78 @@ record Agreement(Section root, FixedLine fixed) {
    * Reports every fact that does not agree.
    *
    * @param loads the loads
-   * @param facts the same loads with the other facts
+   * @param facts the other facts
    */
-  void check(List<LoadEntry> loads, LoadFacts facts) {
-    compare(LoadKeys.RATE, facts.rate(), fixed.rate(), "N/mm");
-    stroke(new Stroke(loads), facts);
-    if (fixed.freeLength().isEmpty()) {
+  void check(List<LoadEntry> loads, LineFacts facts) {
+    LineForm form = fixed.form();
+    if (facts.rate().isPresent() && !agrees(facts.rate().getAsDouble(), fixed.rate())) {
+      disagrees(keys.rate(), form.shownRate(fixed.rate()));
+    }
+    stroke(new Stroke(form, loads), facts.stroke());
+    if (fixed.zero().isEmpty()) {
       return;
     }
-    compare(LoadKeys.FREE_LENGTH, facts.freeLength(), fixed.line().freeLength(), "mm");
-    for (LoadEntry load : loads) {
-      if (load.isFull() && !agrees(load.force(), fixed.line().forceAt(load.length()))) {
-        disagrees(
-            load.section().spot(LoadKeys.FORCE),
-            load.section().shown(LoadKeys.FORCE),
-            fixed.line().forceAt(load.length()),
-            "N");
-      }
-    }
-    belowFreeLength(loads.stream().filter(load -> !load.isFull()).toList(), fixed.freeLength());
-    loads.stream()
-        .filter(load -> load.asked().length().isEmpty())
-        .filter(load -> !(fixed.line().lengthUnder(load.force()) > 0))
-        .forEach(this::beyondAnyLength);
-  }
-
-  private void beyondAnyLength(LoadEntry load) {
-    double most = fixed.rate() * fixed.line().freeLength();
-    load.section()
-        .spot(LoadKeys.FORCE)
-        .fault(
-            load.section().shown(LoadKeys.FORCE),
-            "must be below "
-                + Range.number(most)
-                + " N, at which the load line comes to no length at all");
-  }
-
-  private void stroke(Stroke stroke, LoadFacts facts) {
-    if (facts.stroke().isPresent() && stroke.byForces()) {
-      compare(LoadKeys.STROKE, facts.stroke(), stroke.force() / fixed.rate(), "mm");
-    } else if (facts.stroke().isPresent() && stroke.byLengths()) {
-      compare(LoadKeys.STROKE, facts.stroke(), stroke.length(), "mm");
+    zero(facts.zero(), loads);
+    loads.stream().filter(LoadEntry::isFull).forEach(this::onTheLine);
+    List<LoadEntry> open = loads.stream().filter(load -> !load.isFull()).toList();
+    Unloaded.check(form, open, fixed.zero());
+    if (!form.turning()) {
+      open.stream().filter(load -> load.at().isEmpty()).forEach(this::atSomeLength);
     }
   }
 
-  /**
-   * Reports a stroke that belongs to nothing: some loads give only a length, others only a force.
-   *
-   * @param root the file
-   * @param loads the loads
-   */
-  static void strokeBetween(Section root, List<LoadEntry> loads) {
-    Stroke stroke = new Stroke(loads);
-    if (root.has(LoadKeys.STROKE) && !stroke.byForces() && !stroke.byLengths()) {
-      root.spot(LoadKeys.STROKE)
-          .fault(
-              root.shown(LoadKeys.STROKE) + " between loads of which some lack their force",
-              "must go with loads that all give a force, or that all give a length");
+  private void onTheLine(LoadEntry load) {
+    double line = fixed.loadAt(load.place());
+    if (!agrees(load.load(), line)) {
+      load.loadFault(remedy(fixed.form().shownLoad(line)));
     }
   }
 
-  /**
-   * Reports loads at lengths at which the spring carries nothing.
-   *
-   * @param loads the loads
-   * @param freeLength L0 [mm], where it is known
-   */
-  static void belowFreeLength(List<LoadEntry> loads, OptionalDouble freeLength) {
-    for (LoadEntry load : loads) {
-      boolean known = freeLength.isPresent() && load.asked().length().isPresent();
-      if (known && !(load.length() < freeLength.getAsDouble())) {
-        load.section()
-            .spot(LoadKeys.LENGTH)
-            .fault(
-                load.section().shown(LoadKeys.LENGTH),
-                "must be below the free length, "
-                    + Range.number(freeLength.getAsDouble())
-                    + " mm: there the spring carries no load");
+  private void atSomeLength(LoadEntry load) {
+    if (!(fixed.placeUnder(load.load()) > 0)) {
+      load.loadFault(
+          "must be "
+              + (fixed.form().falling() ? "below " : "above ")
+              + fixed.form().shownLoad(fixed.loadAt(0))
+              + ", at which the load line comes to no length at all");
+    }
+  }
+
+  private void stroke(Stroke stroke, OptionalDouble given) {
+    boolean known = given.isPresent() && (stroke.byLoads() || stroke.byPlaces());
+    if (known) {
+      double way = stroke.byLoads() ? stroke.load() / fixed.rate() : stroke.way();
+      if (!agrees(given.getAsDouble(), way)) {
+        disagrees(keys.stroke(), fixed.form().shownPlace(way));
       }
     }
   }
 
-  private void compare(ProblemKey<Double> key, OptionalDouble given, double line, String unit) {
-    if (given.isPresent() && !agrees(given.getAsDouble(), line)) {
-      disagrees(root.spot(key), root.shown(key), line, unit);
+  /** Angles count from any reference: they agree within a share of the greatest turn. */
+  private void zero(OptionalDouble given, List<LoadEntry> loads) {
+    if (given.isEmpty()) {
+      return;
+    }
+    double line = fixed.zero().getAsDouble();
+    double whole = given.getAsDouble();
+    if (fixed.form().turning()) {
+      whole = 0;
+      for (LoadEntry load : loads) {
+        double way = load.carries().isPresent() ? load.load() / fixed.rate() : load.place() - line;
+        whole = Math.max(whole, Math.abs(way));
+      }
+    }
+    if (!(Math.abs(given.getAsDouble() - line) <= WITHIN * whole)) {
+      disagrees(keys.zero().get(0), fixed.form().shownPlace(line));
     }
   }
 
-  private void disagrees(Spot spot, String shown, double line, String unit) {
-    spot.fault(
-        shown,
-        "must be "
-            + Range.number(line)
-            + " "
-            + unit
-            + " within 0.1 %, which follows from "
-            + fixed.rule());
+  private void disagrees(ProblemKey<Double> key, String line) {
+    root.spot(key).fault(root.shown(key), remedy(line));
+  }
+
+  private String remedy(String line) {
+    return "must be " + line + " within 0.1 %, which follows from " + fixed.rule();
   }
 
   private static boolean agrees(double given, double line) {

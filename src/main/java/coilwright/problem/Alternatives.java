@@ -1,5 +1,6 @@
 package coilwright.problem;
 
+import coilwright.spring.Kind;
 import java.util.List;
 import java.util.stream.Stream;
 
@@ -17,6 +18,12 @@ record Alternatives(List<ProblemKey<?>> keys, boolean needed, boolean exclusive)
       Stream.concat(
               Stream.of(
                   new Alternatives(List.of(LoadKeys.LENGTH, LoadKeys.FORCE), true, false),
+                  new Alternatives(
+                      List.of(LoadKeys.LENGTH_INSIDE_HOOKS, LoadKeys.FORCE), true, false),
+                  new Alternatives(
+                      List.of(TorqueKeys.ANGLE, TorqueKeys.TORQUE, TorqueKeys.FORCE), true, false),
+                  new Alternatives(List.of(TorqueKeys.TORQUE, TorqueKeys.FORCE), false, true),
+                  new Alternatives(List.of(TorqueKeys.TORQUE, TorqueKeys.ARM), false, true),
                   new Alternatives(List.of(MakeKeys.WIRE_SERIES, MakeKeys.WIRE_SIZES), false, true),
                   new Alternatives(List.copyOf(DesignKeys.DIAMETERS), true, true),
                   new Alternatives(List.copyOf(DesignKeys.COILS), true, true)),
@@ -27,6 +34,15 @@ record Alternatives(List<ProblemKey<?>> keys, boolean needed, boolean exclusive)
   /** The path of the block. */
   String parent() {
     return keys.get(0).parent();
+  }
+
+  /**
+   * Whether a kind of spring has them.
+   *
+   * @param kind the kind
+   */
+  boolean standsFor(Kind kind) {
+    return keys.get(0).kinds().contains(kind);
   }
 
   /** Their form. */

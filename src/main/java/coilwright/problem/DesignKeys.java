@@ -3,6 +3,9 @@ package coilwright.problem;
 import coilwright.material.WireSize;
 import coilwright.spring.EndType;
 import coilwright.spring.Hand;
+import coilwright.spring.Kind;
+import coilwright.unit.Dimension;
+import java.util.ArrayList;
 import java.util.List;
 
 /** The keys about the one spring that a check judges. */
@@ -49,30 +52,61 @@ final class DesignKeys {
 
   static final ProblemKey<Double> ACTIVE_COILS =
       ProblemKey.of(
-          "design.active_coils",
-          Values.number(Range.ABOVE_ZERO),
-          "total_coils is given",
-          "coils that deflect",
-          "8");
+              "design.active_coils",
+              Values.number(Range.ABOVE_ZERO),
+              "total_coils is given",
+              "coils that deflect",
+              "8")
+          .only(Kind.COMPRESSION);
 
   static final ProblemKey<Double> TOTAL_COILS =
       ProblemKey.of(
-          "design.total_coils",
-          Values.number(Range.ABOVE_ZERO),
-          "active_coils is given",
-          "all coils, with the dead ones of the ends",
-          "10");
+              "design.total_coils",
+              Values.number(Range.ABOVE_ZERO),
+              "active_coils is given",
+              "all coils, with the dead ones of the ends",
+              "10")
+          .only(Kind.COMPRESSION);
+
+  static final ProblemKey<Double> BODY_COILS =
+      ProblemKey.of(
+              "design.body_coils",
+              Values.number(Range.ABOVE_ZERO),
+              "",
+              "coils of the body, without the hooks",
+              "21")
+          .only(Kind.EXTENSION);
+
+  static final ProblemKey<Double> BODY_COILS_OF_TORSION =
+      ProblemKey.of(
+              "design.body_coils",
+              Values.number(Range.ABOVE_ZERO),
+              "",
+              "coils of the body without load, without the legs",
+              "6.5")
+          .only(Kind.TORSION);
+
+  static final ProblemKey<Double> INITIAL_TENSION =
+      ProblemKey.of(
+              "design.initial_tension",
+              Values.quantity(Dimension.FORCE, Range.FROM_ZERO),
+              "",
+              "force that holds the coils together without load",
+              "9 N")
+          .only(Kind.EXTENSION);
 
   static final ProblemKey<Double> FREE_LENGTH =
-      ProblemKey.of("design.free_length", Values.length(), "", "length without load", "38.7 mm");
+      ProblemKey.of("design.free_length", Values.length(), "", "length without load", "38.7 mm")
+          .only(Kind.COMPRESSION);
 
   static final ProblemKey<EndType> ENDS =
       ProblemKey.of(
-          "design.ends",
-          new WordReader<>(List.of(EndType.values()), EndType::id),
-          "",
-          "how the end coils are formed",
-          "squared-ground");
+              "design.ends",
+              new WordReader<>(List.of(EndType.values()), EndType::id),
+              "",
+              "how the end coils are formed",
+              "squared-ground")
+          .only(Kind.COMPRESSION);
 
   static final ProblemKey<Hand> HAND =
       ProblemKey.of(
@@ -84,11 +118,12 @@ final class DesignKeys {
 
   static final ProblemKey<Boolean> SET_REMOVED =
       ProblemKey.of(
-          "design.set_removed",
-          Values.flag(),
-          "false",
-          "whether the spring was pressed solid once to raise its strength",
-          "false");
+              "design.set_removed",
+              Values.flag(),
+              "false",
+              "whether the spring was pressed solid once to raise its strength",
+              "false")
+          .only(Kind.COMPRESSION);
 
   static final ProblemKey<Section> COATING =
       ProblemKey.of(
@@ -110,22 +145,19 @@ final class DesignKeys {
   static final List<ProblemKey<Double>> COILS = List.of(ACTIVE_COILS, TOTAL_COILS);
 
   /** All of them. */
-  static final List<ProblemKey<?>> ROWS =
-      List.of(
-          DESIGN,
-          MATERIAL,
-          WIRE_DIAMETER,
-          MEAN_DIAMETER,
-          OUTSIDE_DIAMETER,
-          INSIDE_DIAMETER,
-          ACTIVE_COILS,
-          TOTAL_COILS,
-          FREE_LENGTH,
-          ENDS,
-          HAND,
-          SET_REMOVED,
-          COATING,
-          COATING_THICKNESS);
+  static final List<ProblemKey<?>> ROWS = rows();
 
   private DesignKeys() {}
+
+  private static List<ProblemKey<?>> rows() {
+    List<ProblemKey<?>> rows = new ArrayList<>();
+    rows.addAll(List.of(DESIGN, MATERIAL, WIRE_DIAMETER));
+    rows.addAll(DIAMETERS);
+    rows.addAll(List.of(ACTIVE_COILS, TOTAL_COILS, BODY_COILS, BODY_COILS_OF_TORSION));
+    rows.addAll(List.of(FREE_LENGTH, INITIAL_TENSION, ENDS));
+    rows.addAll(HookKeys.DESIGN_ROWS);
+    rows.addAll(LegKeys.DESIGN.rows());
+    rows.addAll(List.of(HAND, SET_REMOVED, COATING, COATING_THICKNESS));
+    return List.copyOf(rows);
+  }
 }

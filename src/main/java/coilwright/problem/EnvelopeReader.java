@@ -11,11 +11,10 @@ final class EnvelopeReader {
   /**
    * Reads the envelope.
    *
-   * @param root the file
+   * @param given its block
    * @return the envelope; without bounds where the file has none
    */
-  static Envelope read(Section root) {
-    Optional<Section> given = root.read(EnvelopeKeys.ENVELOPE);
+  static Envelope read(Optional<Section> given) {
     if (given.isEmpty()) {
       OptionalDouble none = OptionalDouble.empty();
       return new Envelope(none, none, none, none, none, none, none);

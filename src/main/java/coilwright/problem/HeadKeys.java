@@ -1,5 +1,7 @@
 package coilwright.problem;
 
+import coilwright.spring.Kind;
+import java.util.ArrayList;
 import java.util.List;
 
 /** The keys that say what the file is about. */
@@ -9,13 +11,13 @@ final class HeadKeys {
       ProblemKey.of(
           "title", new TextReader("text"), "no title", "free text", "Feed-water check valve");
 
-  static final ProblemKey<String> SPRING =
+  static final ProblemKey<Kind> SPRING =
       ProblemKey.of(
           "spring",
-          new WordReader<>(List.of("compression"), word -> word, "extension", "torsion"),
+          new WordReader<>(List.of(Kind.values()), Kind::id),
           "",
           "the kind of spring",
-          "compression");
+          Kind.COMPRESSION.id());
 
   static final ProblemKey<UnitSystem> UNITS =
       ProblemKey.of(
@@ -26,7 +28,17 @@ final class HeadKeys {
           "metric");
 
   /** All of them. */
-  static final List<ProblemKey<?>> ROWS = List.of(TITLE, SPRING, UNITS);
+  static final List<ProblemKey<?>> ROWS = rows();
 
   private HeadKeys() {}
+
+  private static List<ProblemKey<?>> rows() {
+    List<ProblemKey<?>> rows = new ArrayList<>();
+    rows.add(TITLE);
+    for (Kind kind : Kind.values()) {
+      rows.add(SPRING.only(kind).shown(kind.id()));
+    }
+    rows.add(UNITS);
+    return List.copyOf(rows);
+  }
 }

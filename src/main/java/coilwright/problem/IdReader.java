@@ -1,5 +1,6 @@
 package coilwright.problem;
 
+import coilwright.spring.Kind;
 import java.util.Optional;
 import java.util.regex.Pattern;
 
@@ -22,7 +23,7 @@ final class IdReader extends ScalarReader<String> {
   }
 
   @Override
-  public Form form() {
+  public Form form(Kind kind) {
     return new Form.Text("^(?!(?:all|none)$)[^\\u0000-\\u0020\\u007f/,]+$");
   }
 }

@@ -1,81 +1,110 @@
 package coilwright.problem;
 
+import coilwright.spring.Kind;
 import java.util.ArrayList;
+import java.util.EnumMap;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 
-/** Every key of a problem file for a compression spring, one row each. */
+/** Every key of a problem file: one row each, or one for each kind of spring where they differ. */
 public final class KeyTable {
 
   /** The rows in the order of a problem file. */
   static final List<ProblemKey<?>> ROWS = rows();
 
-  private static final Map<String, List<ProblemKey<?>>> BY_PARENT = byParent();
+  private static final Map<Kind, Map<String, List<ProblemKey<?>>>> BY_PARENT = byParent();
 
   private KeyTable() {}
 
   /**
    * The rows of a block.
    *
+   * @param kind the kind of spring
    * @param parent the block's path; empty for the top
    * @return its rows
    */
-  static List<ProblemKey<?>> children(String parent) {
-    return BY_PARENT.getOrDefault(parent, List.of());
+  static List<ProblemKey<?>> children(Kind kind, String parent) {
+    return BY_PARENT.get(kind).getOrDefault(parent, List.of());
   }
 
   /**
    * The keys accepted in a block.
    *
+   * @param kind the kind of spring
    * @param parent the block's path; empty for the top
    * @return the keys
    */
-  static List<String> names(String parent) {
+  static List<String> names(Kind kind, String parent) {
     List<String> names = new ArrayList<>();
-    children(parent).forEach(key -> names.add(key.name()));
+    children(kind, parent).forEach(key -> names.add(key.name()));
     return names;
+  }
+
+  /**
+   * The kinds of springs whose files have a key.
+   *
+   * @param parent the path of its block; empty for the top
+   * @param name the key
+   * @return the kinds; none where it is unknown there
+   */
+  static List<Kind> kindsOf(String parent, String name) {
+    List<Kind> kinds = new ArrayList<>();
+    for (Kind kind : Kind.values()) {
+      if (names(kind, parent).contains(name)) {
+        kinds.add(kind);
+      }
+    }
+    return kinds;
   }
 
   /**
    * Where a key stands that is known in one place only.
    *
+   * @param kind the kind of spring
    * @param name the key
    * @return its path, or empty where there is none or more than one
    */
-  static Optional<String> pathOf(String name) {
-    List<String> paths =
-        ROWS.stream().filter(key -> key.name().equals(name)).<String>map(ProblemKey::path).toList();
+  static Optional<String> pathOf(Kind kind, String name) {
+    List<String> paths = new ArrayList<>();
+    for (ProblemKey<?> key : ROWS) {
+      if (key.kinds().contains(kind) && key.name().equals(name)) {
+        paths.add(key.path());
+      }
+    }
     return paths.size() == 1 ? Optional.of(paths.get(0)) : Optional.empty();
   }
 
-  /** The table in Markdown: key, how it is written, what holds where it is left out, meaning. */
+  /** The table in Markdown: key, kinds, how it is written, what holds where left out, meaning. */
   public static String markdown() {
-    StringBuilder text = new StringBuilder("| key | written as | left out | meaning |\n");
-    text.append("|---|---|---|---|\n");
-    for (ProblemKey<?> key : ROWS) {
-      String omitted = key.omitted().isEmpty() ? "must be given" : key.omitted();
-      text.append("| `").append(key.path()).append("` | ").append(cell(key.reader().written()));
-      text.append(" | ").append(cell(omitted)).append(" | ").append(cell(key.help()));
-      text.append(" |\n");
+    return KeyMarkdown.of(ROWS);
+  }
+
+  /**
+   * The form of a problem file: every key with what may stand there.
+   *
+   * @param kind the kind of spring
+   */
+  public static Form.Block form(Kind kind) {
+    return Forms.block(kind, "");
+  }
+
+  /** The forms of the files of all kinds of springs, in the order of the kinds. */
+  public static Map<Kind, Form.Block> forms() {
+    Map<Kind, Form.Block> forms = new EnumMap<>(Kind.class);
+    for (Kind kind : Kind.values()) {
+      forms.put(kind, form(kind));
     }
-    return text.toString();
-  }
-
-  /** The form of a problem file: every key with what may stand there. */
-  public static Form.Block form() {
-    return Forms.block("");
-  }
-
-  private static String cell(String text) {
-    return text.replace("|", "\\|");
+    return forms;
   }
 
   private static List<ProblemKey<?>> rows() {
     List<ProblemKey<?>> rows = new ArrayList<>();
     rows.addAll(HeadKeys.ROWS);
     rows.addAll(LoadKeys.ROWS);
+    rows.addAll(TorqueKeys.ROWS);
+    rows.add(LoadKeys.SPRINGS_IN_PARALLEL);
     rows.addAll(EnvelopeKeys.ROWS);
     rows.addAll(MakeKeys.ROWS);
     rows.addAll(DesignKeys.ROWS);
@@ -85,11 +114,17 @@ public final class KeyTable {
     return List.copyOf(rows);
   }
 
-  private static Map<String, List<ProblemKey<?>>> byParent() {
-    Map<String, List<ProblemKey<?>>> byParent = new HashMap<>();
-    for (ProblemKey<?> key : ROWS) {
-      byParent.computeIfAbsent(key.parent(), parent -> new ArrayList<>()).add(key);
+  private static Map<Kind, Map<String, List<ProblemKey<?>>>> byParent() {
+    Map<Kind, Map<String, List<ProblemKey<?>>>> all = new EnumMap<>(Kind.class);
+    for (Kind kind : Kind.values()) {
+      Map<String, List<ProblemKey<?>>> byParent = new HashMap<>();
+      for (ProblemKey<?> key : ROWS) {
+        if (key.kinds().contains(kind)) {
+          byParent.computeIfAbsent(key.parent(), parent -> new ArrayList<>()).add(key);
+        }
+      }
+      all.put(kind, byParent);
     }
-    return byParent;
+    return all;
   }
 }

@@ -1,5 +1,6 @@
 package coilwright.problem;
 
+import coilwright.spring.Kind;
 import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
@@ -65,8 +66,8 @@ final class ListReader<T> implements ValueReader<List<T>> {
   }
 
   @Override
-  public Form form() {
-    Form one = item.form();
+  public Form form(Kind kind) {
+    Form one = item.form(kind);
     return new Form.Either(List.of(one, new Form.Many(one, !(one instanceof Form.Text))));
   }
 }

@@ -4,15 +4,25 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 
 /**
- * One load as read, with its place in the file.
+ * One load as read, for the whole group of springs, with its place in the file.
  *
  * @param section its block of keys
- * @param asked the load, for the whole group of springs
+ * @param placeKey the key of its length or angle
+ * @param loadKey the key of its force or torque
+ * @param at length [mm] or angle [rad], where given
+ * @param carries force [N] or torque [N mm], where given
+ * @param tolerance what the buyer accepts, where given
  */
-record LoadEntry(Section section, LoadAsked asked) {
+record LoadEntry(
+    Section section,
+    ProblemKey<Double> placeKey,
+    ProblemKey<Double> loadKey,
+    OptionalDouble at,
+    OptionalDouble carries,
+    Optional<Tolerance> tolerance) {
 
   /**
-   * Reads a load.
+   * Reads a load of a compression or extension spring.
    *
    * @param section its block of keys
    * @return the load
@@ -28,28 +38,70 @@ record LoadEntry(Section section, LoadAsked asked) {
     if (section.has(LoadKeys.TOLERANCE) && lacksForce) {
       section.spot(LoadKeys.TOLERANCE).fault("no force to go with it", "must stand with a force");
     }
-    return new LoadEntry(section, new LoadAsked(length, force, resolved(tolerance, force)));
+    return new LoadEntry(
+        section, LoadKeys.LENGTH, LoadKeys.FORCE, length, force, resolved(tolerance, force));
   }
 
-  private static Optional<Tolerance> resolved(
-      Optional<ToleranceAsked> tolerance, OptionalDouble force) {
-    return force.isPresent()
-        ? tolerance.map(asked -> asked.of(force.getAsDouble()))
+  /**
+   * A tolerance around a load.
+   *
+   * @param tolerance as read
+   * @param load the load
+   * @return the tolerance; empty where one of the two is
+   */
+  static Optional<Tolerance> resolved(Optional<ToleranceAsked> tolerance, OptionalDouble load) {
+    return load.isPresent()
+        ? tolerance.map(asked -> asked.of(load.getAsDouble()))
         : Optional.empty();
   }
 
-  /** Whether both length and force are given. */
+  /** Whether both place and load are given. */
   boolean isFull() {
-    return asked.length().isPresent() && asked.force().isPresent();
+    return at.isPresent() && carries.isPresent();
   }
 
-  /** Its length [mm], where given. */
-  double length() {
-    return asked.length().getAsDouble();
+  /** Its length [mm] or angle [rad], where given. */
+  double place() {
+    return at.getAsDouble();
   }
 
-  /** Its force for the whole group [N], where given. */
-  double force() {
-    return asked.force().getAsDouble();
+  /** Its force [N] or torque [N mm], where given. */
+  double load() {
+    return carries.getAsDouble();
+  }
+
+  /** The load as a compression or extension spring is asked it. */
+  LoadAsked asked() {
+    return new LoadAsked(at, carries, tolerance);
+  }
+
+  /** The place as typed. */
+  String shownPlace() {
+    return section.shown(placeKey);
+  }
+
+  /** The load as typed. */
+  String shownLoad() {
+    String arm =
+        section.has(TorqueKeys.ARM) ? " at an arm of " + section.shown(TorqueKeys.ARM) : "";
+    return section.shown(loadKey) + arm;
+  }
+
+  /**
+   * Reports a fault about its place.
+   *
+   * @param remedy what is accepted
+   */
+  void placeFault(String remedy) {
+    section.spot(placeKey).fault(shownPlace(), remedy);
+  }
+
+  /**
+   * Reports a fault about its load.
+   *
+   * @param remedy what is accepted
+   */
+  void loadFault(String remedy) {
+    section.spot(loadKey).fault(shownLoad(), remedy);
   }
 }

@@ -4,74 +4,90 @@ import java.util.Comparator;
 import java.util.List;
 
 /**
- * Checks that loads can lie on one falling line: lengths differ, and force rises as length falls.
+ * Checks that loads can lie on one straight line: places differ, and the load rises along them as
+ * the kind of spring has it.
+ *
+ * @param form how the line runs
  */
-final class LoadOrder {
+record LoadOrder(LineForm form) {
 
   private static final double SAME = 1e-9;
 
-  private LoadOrder() {}
+  /**
+   * Places in the order in which the load rises.
+   *
+   * @param form how the line runs
+   * @return the order of loads that give their place
+   */
+  static Comparator<LoadEntry> rising(LineForm form) {
+    Comparator<LoadEntry> rising = Comparator.comparingDouble(LoadEntry::place);
+    return form.falling() ? rising.reversed() : rising;
+  }
 
   /**
    * Reports loads that contradict each other.
    *
    * @param loads the loads
    */
-  static void check(List<LoadEntry> loads) {
-    List<LoadEntry> lengths =
-        loads.stream()
-            .filter(load -> load.asked().length().isPresent())
-            .sorted(Comparator.comparingDouble(LoadEntry::length).reversed())
-            .toList();
-    for (int i = 1; i < lengths.size(); i++) {
-      if (same(lengths.get(i - 1).length(), lengths.get(i).length())) {
-        repeated(lengths.get(i - 1), lengths.get(i), LoadKeys.LENGTH);
+  void check(List<LoadEntry> loads) {
+    List<LoadEntry> places =
+        loads.stream().filter(load -> load.at().isPresent()).sorted(rising(form)).toList();
+    for (int i = 1; i < places.size(); i++) {
+      LoadEntry before = places.get(i - 1);
+      if (same(before.place(), places.get(i).place())) {
+        repeated(before, places.get(i), before.placeKey());
       }
     }
-    repeatedForces(loads);
-    List<LoadEntry> full = lengths.stream().filter(LoadEntry::isFull).toList();
+    repeatedLoads(loads);
+    List<LoadEntry> full = places.stream().filter(LoadEntry::isFull).toList();
     for (int i = 1; i < full.size(); i++) {
-      rising(full.get(i - 1), full.get(i));
+      risen(full.get(i - 1), full.get(i));
     }
   }
 
-  private static void repeatedForces(List<LoadEntry> loads) {
-    List<LoadEntry> forces =
+  private static void repeatedLoads(List<LoadEntry> loads) {
+    List<LoadEntry> alone =
         loads.stream()
-            .filter(load -> load.asked().force().isPresent() && !load.isFull())
-            .sorted(Comparator.comparingDouble(LoadEntry::force))
+            .filter(load -> load.carries().isPresent() && !load.isFull())
+            .sorted(Comparator.comparingDouble(LoadEntry::load))
             .toList();
-    for (int i = 1; i < forces.size(); i++) {
-      if (same(forces.get(i - 1).force(), forces.get(i).force())) {
-        repeated(forces.get(i - 1), forces.get(i), LoadKeys.FORCE);
+    for (int i = 1; i < alone.size(); i++) {
+      if (same(alone.get(i - 1).load(), alone.get(i).load())) {
+        repeated(alone.get(i - 1), alone.get(i), alone.get(i).loadKey());
       }
     }
   }
 
-  private static void repeated(LoadEntry a, LoadEntry b, ProblemKey<?> key) {
+  private static void repeated(LoadEntry a, LoadEntry b, ProblemKey<Double> key) {
     boolean inOrder = a.section().spot().mark().compareTo(b.section().spot().mark()) <= 0;
-    Section earlier = (inOrder ? a : b).section();
-    Section later = (inOrder ? b : a).section();
-    later.spot(key).fault(later.shown(key), "must differ from " + earlier.spot(key).path());
+    LoadEntry earlier = inOrder ? a : b;
+    LoadEntry later = inOrder ? b : a;
+    String remedy = "must differ from ";
+    if (key == later.placeKey()) {
+      later.placeFault(remedy + earlier.section().spot(earlier.placeKey()).path());
+    } else {
+      later.loadFault(remedy + earlier.section().spot(earlier.loadKey()).path());
+    }
   }
 
-  private static void rising(LoadEntry longer, LoadEntry shorter) {
-    if (same(longer.length(), shorter.length()) || shorter.force() > longer.force()) {
+  private void risen(LoadEntry before, LoadEntry after) {
+    if (same(before.place(), after.place()) || after.load() > before.load()) {
       return;
     }
-    Section section = shorter.section();
-    section
-        .spot(LoadKeys.FORCE)
+    after
+        .section()
+        .spot(after.loadKey())
         .fault(
-            section.shown(LoadKeys.FORCE) + " at " + section.shown(LoadKeys.LENGTH),
+            after.shownLoad() + " at " + after.shownPlace(),
             "must be above the "
-                + longer.section().shown(LoadKeys.FORCE)
+                + before.shownLoad()
                 + " at "
-                + longer.section().shown(LoadKeys.LENGTH)
-                + ": a shorter length needs a greater force");
+                + before.shownPlace()
+                + ": "
+                + form.order());
   }
 
   private static boolean same(double a, double b) {
-    return Math.abs(a - b) <= SAME * Math.max(a, b);
+    return Math.abs(a - b) <= SAME * Math.max(Math.abs(a), Math.abs(b));
   }
 }

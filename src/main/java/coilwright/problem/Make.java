@@ -17,11 +17,12 @@ import java.util.List;
  * @param excludeMaterials ids never tried
  * @param wireSeries series named in the file; empty where none is
  * @param wireSizes explicit sizes; empty where none is given. They take the place of series
- * @param ends the end types tried
+ * @param ends the end types tried; none for the other kinds than compression springs
  * @param hand direction of winding
- * @param setRemoved whether the spring is pressed solid once before use
+ * @param setRemoved whether a compression spring is pressed solid once before use
  * @param coating thickness of what covers the wire [mm], zero for bare wire
- * @param coilStep active coils are multiples of this [-]
+ * @param coilStep active coils are multiples of this, body coils for the other kinds [-]; unused
+ *     where the legs' angle fixes the fraction of a coil
  * @param rounding steps of mean diameter and free length
  */
 public record Make(

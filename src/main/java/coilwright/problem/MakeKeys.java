@@ -5,7 +5,9 @@ import coilwright.material.WireSeries;
 import coilwright.material.WireSize;
 import coilwright.spring.EndType;
 import coilwright.spring.Hand;
+import coilwright.spring.Kind;
 import coilwright.unit.Dimension;
+import java.util.ArrayList;
 import java.util.List;
 
 /** The keys about what a shop may make the spring of, and how. */
@@ -56,11 +58,12 @@ final class MakeKeys {
 
   static final ProblemKey<List<EndType>> ENDS =
       ProblemKey.of(
-          "make.ends",
-          Values.list(new WordReader<>(List.of(EndType.values()), EndType::id)),
-          "squared-ground and squared",
-          "how the end coils are formed",
-          "[squared-ground]");
+              "make.ends",
+              Values.list(new WordReader<>(List.of(EndType.values()), EndType::id)),
+              "squared-ground and squared",
+              "how the end coils are formed",
+              "[squared-ground]")
+          .only(Kind.COMPRESSION);
 
   static final ProblemKey<Hand> HAND =
       ProblemKey.of(
@@ -72,11 +75,12 @@ final class MakeKeys {
 
   static final ProblemKey<Boolean> SET_REMOVED =
       ProblemKey.of(
-          "make.set_removed",
-          Values.flag(),
-          "false",
-          "whether the spring is pressed solid once to raise its strength",
-          "false");
+              "make.set_removed",
+              Values.flag(),
+              "false",
+              "whether the spring is pressed solid once to raise its strength",
+              "false")
+          .only(Kind.COMPRESSION);
 
   static final ProblemKey<Section> COATING =
       ProblemKey.of(
@@ -92,11 +96,30 @@ final class MakeKeys {
 
   static final ProblemKey<Double> COIL_STEP =
       ProblemKey.of(
-          "make.coil_step",
-          Values.number(Range.ABOVE_ZERO),
-          "0.25",
-          "active coils are multiples of this",
-          "0.25");
+              "make.coil_step",
+              Values.number(Range.ABOVE_ZERO),
+              "0.25",
+              "active coils are multiples of this",
+              "0.25")
+          .only(Kind.COMPRESSION);
+
+  static final ProblemKey<Double> BODY_COIL_STEP =
+      ProblemKey.of(
+              "make.coil_step",
+              Values.number(Range.ABOVE_ZERO),
+              "0.25",
+              "body coils are multiples of this",
+              "0.25")
+          .only(Kind.EXTENSION);
+
+  static final ProblemKey<Double> BODY_COIL_STEP_OF_TORSION =
+      ProblemKey.of(
+              "make.coil_step",
+              Values.number(Range.ABOVE_ZERO),
+              "0.25; whole coils and a fraction where legs.angle is given",
+              "body coils are multiples of this; never beside legs.angle",
+              "0.25")
+          .only(Kind.TORSION);
 
   static final ProblemKey<Double> DIAMETER_STEP =
       ProblemKey.of(
@@ -108,29 +131,25 @@ final class MakeKeys {
 
   static final ProblemKey<Double> LENGTH_STEP =
       ProblemKey.of(
-          "make.length_step",
-          Values.quantity(Dimension.LENGTH, Range.FROM_ZERO),
-          "0.1 mm (inch: 0.005 in), a tenth for mean diameters below 5 mm",
-          "step of the free length; 0 mm: none",
-          "0.1 mm");
+              "make.length_step",
+              Values.quantity(Dimension.LENGTH, Range.FROM_ZERO),
+              "0.1 mm (inch: 0.005 in), a tenth for mean diameters below 5 mm",
+              "step of the free length; 0 mm: none",
+              "0.1 mm")
+          .only(Kind.COMPRESSION, Kind.EXTENSION);
 
   /** All of them. */
-  static final List<ProblemKey<?>> ROWS =
-      List.of(
-          MAKE,
-          SUPPLY,
-          MATERIALS,
-          EXCLUDE_MATERIALS,
-          WIRE_SERIES,
-          WIRE_SIZES,
-          ENDS,
-          HAND,
-          SET_REMOVED,
-          COATING,
-          COATING_THICKNESS,
-          COIL_STEP,
-          DIAMETER_STEP,
-          LENGTH_STEP);
+  static final List<ProblemKey<?>> ROWS = rows();
 
   private MakeKeys() {}
+
+  private static List<ProblemKey<?>> rows() {
+    List<ProblemKey<?>> rows = new ArrayList<>();
+    rows.addAll(List.of(MAKE, SUPPLY, MATERIALS, EXCLUDE_MATERIALS, WIRE_SERIES, WIRE_SIZES, ENDS));
+    rows.addAll(HookKeys.MAKE_ROWS);
+    rows.addAll(LegKeys.MAKE.rows());
+    rows.addAll(List.of(HAND, SET_REMOVED, COATING, COATING_THICKNESS, COIL_STEP));
+    rows.addAll(List.of(BODY_COIL_STEP, BODY_COIL_STEP_OF_TORSION, DIAMETER_STEP, LENGTH_STEP));
+    return List.copyOf(rows);
+  }
 }

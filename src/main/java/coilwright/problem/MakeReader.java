@@ -3,6 +3,7 @@ package coilwright.problem;
 import coilwright.material.Supply;
 import coilwright.spring.EndType;
 import coilwright.spring.Hand;
+import coilwright.spring.Kind;
 import coilwright.spring.Method;
 import coilwright.spring.Rounding;
 import java.util.List;
@@ -14,8 +15,9 @@ import java.util.Optional;
  * @param ids the grades that may be named
  * @param units decide the defaults of supply and rounding
  * @param method decides which ends may be made
+ * @param kind the kind of spring: only compression springs have the ends of {@code make.ends}
  */
-record MakeReader(MaterialIds ids, UnitSystem units, Method method) {
+record MakeReader(MaterialIds ids, UnitSystem units, Method method, Kind kind) {
 
   private static final double COIL_STEP = 0.25;
   private static final List<EndType> ENDS = List.of(EndType.SQUARED_GROUND, EndType.SQUARED);
@@ -23,12 +25,16 @@ record MakeReader(MaterialIds ids, UnitSystem units, Method method) {
   /**
    * Reads the block; where it is left out, the defaults.
    *
-   * @param root the file
+   * @param given its block
    * @return what may be made
    */
-  Make read(Section root) {
+  Make read(Optional<Section> given) {
     Supply usual = units == UnitSystem.INCH ? Supply.US : Supply.EN;
-    return root.read(MakeKeys.MAKE).map(section -> read(section, usual)).orElse(defaults(usual));
+    return given.map(section -> read(section, usual)).orElse(defaults(usual));
+  }
+
+  private List<EndType> usualEnds() {
+    return kind == Kind.COMPRESSION ? ENDS : List.of();
   }
 
   private Make defaults(Supply supply) {
@@ -41,7 +47,7 @@ record MakeReader(MaterialIds ids, UnitSystem units, Method method) {
         none,
         List.of(),
         List.of(),
-        ENDS,
+        usualEnds(),
         Hand.EITHER,
         false,
         0,
@@ -62,7 +68,7 @@ record MakeReader(MaterialIds ids, UnitSystem units, Method method) {
             excluded,
             section.read(MakeKeys.WIRE_SERIES).orElse(List.of()),
             section.read(MakeKeys.WIRE_SIZES).orElse(List.of()),
-            section.read(MakeKeys.ENDS).orElse(ENDS),
+            section.read(MakeKeys.ENDS).orElse(usualEnds()),
             section.read(MakeKeys.HAND).orElse(Hand.EITHER),
             section.read(MakeKeys.SET_REMOVED).orElse(false),
             section

@@ -2,6 +2,7 @@ package coilwright.problem;
 
 import coilwright.material.ModulusLaw;
 import coilwright.material.ModulusLaws;
+import coilwright.spring.Kind;
 import java.util.List;
 import java.util.Optional;
 
@@ -40,7 +41,7 @@ record ModulusReader(StepsReader steps) implements ValueReader<LawGiven<ModulusL
   }
 
   @Override
-  public Form form() {
-    return new Form.Either(List.of(steps.step().reader().form(), steps.form()));
+  public Form form(Kind kind) {
+    return new Form.Either(List.of(steps.step().reader().form(kind), steps.form(kind)));
   }
 }

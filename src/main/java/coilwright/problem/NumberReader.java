@@ -1,5 +1,6 @@
 package coilwright.problem;
 
+import coilwright.spring.Kind;
 import coilwright.unit.DecimalNumber;
 import coilwright.unit.Parsed;
 import java.util.Optional;
@@ -39,7 +40,7 @@ final class NumberReader extends ScalarReader<Double> {
   }
 
   @Override
-  public Form form() {
+  public Form form(Kind kind) {
     return new Form.Number(range, whole);
   }
 }

@@ -12,17 +12,18 @@ final class OvertravelReader {
    * Reads the overtravel.
    *
    * @param root the file
-   * @param loads the loads as read
+   * @param facts the loads as asked
+   * @param required what one spring must do, where that is known
    * @return the length [mm], or empty where none is asked
    */
-  static OptionalDouble read(Section root, LoadsRead loads) {
+  static OptionalDouble read(Section root, LoadFacts facts, Optional<Requirement> required) {
     Optional<Section> section = root.read(LoadKeys.OVERTRAVEL);
     OptionalDouble length =
         section
             .flatMap(given -> given.require(LoadKeys.OVERTRAVEL_LENGTH))
             .map(OptionalDouble::of)
             .orElse(OptionalDouble.empty());
-    double shortest = shortest(loads);
+    double shortest = shortest(facts, required);
     if (length.isPresent() && !(length.getAsDouble() < shortest)) {
       section
           .get()
@@ -35,13 +36,13 @@ final class OvertravelReader {
   }
 
   /** The shortest loaded length known [mm]; positive infinity where none is. */
-  private static double shortest(LoadsRead loads) {
+  private static double shortest(LoadFacts facts, Optional<Requirement> required) {
     double shortest = Double.POSITIVE_INFINITY;
-    for (LoadAsked load : loads.facts().loads()) {
+    for (LoadAsked load : facts.loads()) {
       shortest = Math.min(shortest, load.length().orElse(shortest));
     }
-    if (loads.required().isPresent()) {
-      for (var load : loads.required().get().completed()) {
+    if (required.isPresent()) {
+      for (var load : required.get().completed()) {
         shortest = Math.min(shortest, load.length().orElse(shortest));
       }
     }

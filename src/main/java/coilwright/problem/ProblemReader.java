@@ -2,11 +2,9 @@ package coilwright.problem;
 
 import coilwright.material.Catalogue;
 import coilwright.material.WireGrade;
-import coilwright.spring.Kind;
-import coilwright.spring.Seating;
+import coilwright.spring.Method;
 import java.util.List;
 import java.util.Optional;
-import java.util.OptionalDouble;
 
 /** Reads problem files. */
 public final class ProblemReader {
@@ -42,9 +40,9 @@ public final class ProblemReader {
   }
 
   private static Optional<Section> root(Node node, Faults faults) {
-    Spot file = new Spot(node.mark(), "", faults);
+    Spot file = new Spot(node.mark(), "", faults).of(KindPeek.of(node));
     if (node.isEmpty()) {
-      file.fault("empty", "must be " + SectionReader.accepted(""));
+      file.fault("empty", "must be " + SectionReader.accepted(file.kind(), ""));
       return Optional.empty();
     }
     return Section.open(node, file);
@@ -55,21 +53,15 @@ public final class ProblemReader {
     root.require(HeadKeys.SPRING);
     UnitSystem units = root.read(HeadKeys.UNITS).orElse(UnitSystem.METRIC);
     checkPurpose();
-    LoadsRead loads = LoadsRead.of(root, root.has(DesignKeys.DESIGN) ? Purpose.CHECK : purpose);
-    OptionalDouble overtravel = OvertravelReader.read(root, loads);
-    Envelope envelope = EnvelopeReader.read(root);
-    Optional<Seating> seats = root.read(EnvelopeKeys.SEATS);
+    Blocks blocks = Blocks.of(root, purpose);
+    Envelope envelope = EnvelopeReader.read(blocks.envelope());
     MaterialIds ids = new MaterialIds(catalogue);
     List<WireGrade> own = new OwnMaterials(catalogue, ids, units).read(root);
-    DesignLimits limits = LimitsReader.read(root);
-    Make make = new MakeReader(ids, units, limits.method()).read(root);
-    Optional<CompressionDesign> design =
-        root.read(DesignKeys.DESIGN)
-            .flatMap(section -> new DesignReader(ids, section, limits.method()).read());
-    design.ifPresent(loads::checkAgainst);
-
-    if (purpose == Purpose.SHORTLIST && root.spot().faults().count() == 0) {
-      CoilStepRule.check(root, make.coilStep(), limits.activeCoils().max());
+    DesignLimits limits = LimitsReader.read(blocks.limits(), blocks.kind());
+    Make make = new MakeReader(ids, units, limits.method(), blocks.kind()).read(blocks.make());
+    KindPart part = part(blocks, ids, limits.method());
+    if (purpose == Purpose.SHORTLIST && blocks.faults() == 0) {
+      CoilStepRule.check(blocks, make.coilStep(), limits.activeCoils().max());
     }
     Optional<Section> rank = root.read(RankKeys.RANK);
     RankBy by = rank.flatMap(section -> section.read(RankKeys.BY)).orElse(RankBy.MASS);
@@ -77,21 +69,29 @@ public final class ProblemReader {
     return Optional.of(
         new Problem(
             title.orElse(""),
-            Kind.COMPRESSION,
+            blocks.kind(),
             units,
-            loads.facts(),
-            loads.required(),
-            overtravel,
+            part.facts(),
+            part.required(),
+            part.overtravel(),
             envelope,
-            seats,
+            part.seats(),
             make,
-            design.map(Design.class::cast),
+            part.design(),
             limits,
-            Optional.empty(),
-            Optional.empty(),
+            part.extension(),
+            part.torsion(),
             own,
             by,
             top));
+  }
+
+  private static KindPart part(Blocks blocks, MaterialIds ids, Method method) {
+    return switch (blocks.kind()) {
+      case COMPRESSION -> new CompressionReader(blocks, ids, method).read();
+      case EXTENSION -> new ExtensionReader(blocks, ids).read();
+      case TORSION -> new TorsionReader(blocks, ids, method).read();
+    };
   }
 
   private void checkPurpose() {

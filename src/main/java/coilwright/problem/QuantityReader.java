@@ -1,5 +1,6 @@
 package coilwright.problem;
 
+import coilwright.spring.Kind;
 import coilwright.unit.Dimension;
 import coilwright.unit.Parsed;
 import coilwright.unit.Quantity;
@@ -56,7 +57,7 @@ final class QuantityReader extends ScalarReader<Quantity> {
   }
 
   @Override
-  public Form form() {
+  public Form form(Kind kind) {
     return new Form.Measure(range, QuantityParser.symbols(dimensions));
   }
 }

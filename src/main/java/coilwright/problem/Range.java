@@ -21,6 +21,9 @@ public record Range(double low, boolean lowIncluded, double high, boolean highIn
   /** Below this, zero aside, likewise. */
   private static final double SMALLEST = 1e-9;
 
+  /** Anything, whatever its sign. */
+  static final Range ANY = new Range(-LARGEST, true, LARGEST, true);
+
   /** Anything above zero. */
   static final Range ABOVE_ZERO = new Range(0, false, LARGEST, true);
 

@@ -19,7 +19,12 @@ final class Section {
   private Section(Spot spot, Node.Mapping mapping) {
     this.spot = spot;
     this.meant = UnknownKeys.report(mapping, spot);
-    mapping.entries().forEach(entry -> entries.put(entry.key(), entry));
+    List<String> known = KeyTable.names(spot.kind(), spot.pattern());
+    for (Node.Entry entry : mapping.entries()) {
+      if (known.contains(entry.key())) {
+        entries.put(entry.key(), entry);
+      }
+    }
   }
 
   /**
@@ -33,7 +38,7 @@ final class Section {
     if (node instanceof Node.Mapping mapping) {
       return Optional.of(new Section(spot, mapping));
     }
-    spot.refuse(node, SectionReader.accepted(spot.pattern()));
+    spot.refuse(node, SectionReader.accepted(spot.kind(), spot.pattern()));
     return Optional.empty();
   }
 
@@ -96,7 +101,7 @@ final class Section {
    */
   <T> Optional<T> require(ProblemKey<T> key) {
     if (lacks(key)) {
-      spot(key).fault("missing", "must be " + key.reader().accepted());
+      spot(key).fault("missing", "must be " + key.reader().accepted(spot.kind()));
     } else if (!has(key)) {
       spot.faults().again();
     }

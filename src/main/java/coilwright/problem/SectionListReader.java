@@ -1,5 +1,6 @@
 package coilwright.problem;
 
+import coilwright.spring.Kind;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -22,21 +23,21 @@ record SectionListReader(String path) implements ValueReader<List<Section>> {
       return Optional.of(sections);
     }
     if (node instanceof Node.Sequence) {
-      spot.fault("an empty list", "must be " + accepted());
+      spot.fault("an empty list", "must be " + accepted(spot.kind()));
     } else {
-      spot.refuse(node, accepted());
+      spot.refuse(node, accepted(spot.kind()));
     }
     return Optional.empty();
   }
 
   @Override
   public String accepted() {
-    return "a list of blocks of keys: " + String.join(", ", KeyTable.names(path));
+    return "a list of blocks of keys";
   }
 
   @Override
-  public String written() {
-    return "a list of blocks of keys";
+  public String accepted(Kind kind) {
+    return accepted() + ": " + String.join(", ", KeyTable.names(kind, path));
   }
 
   @Override
@@ -45,7 +46,7 @@ record SectionListReader(String path) implements ValueReader<List<Section>> {
   }
 
   @Override
-  public Form form() {
-    return new Form.Many(Forms.block(path), false);
+  public Form form(Kind kind) {
+    return new Form.Many(Forms.block(kind, path), false);
   }
 }

@@ -1,5 +1,6 @@
 package coilwright.problem;
 
+import coilwright.spring.Kind;
 import java.util.Optional;
 
 /**
@@ -16,12 +17,12 @@ record SectionReader(String path) implements ValueReader<Section> {
 
   @Override
   public String accepted() {
-    return accepted(path);
+    return "a block of keys";
   }
 
   @Override
-  public String written() {
-    return "a block of keys";
+  public String accepted(Kind kind) {
+    return accepted(kind, path);
   }
 
   @Override
@@ -30,17 +31,18 @@ record SectionReader(String path) implements ValueReader<Section> {
   }
 
   @Override
-  public Form form() {
-    return Forms.block(path);
+  public Form form(Kind kind) {
+    return Forms.block(kind, path);
   }
 
   /**
    * What a block accepts, in words.
    *
+   * @param kind the kind of spring
    * @param path its path in the table of keys
    * @return "a block of keys: bore, rod"
    */
-  static String accepted(String path) {
-    return "a block of keys: " + String.join(", ", KeyTable.names(path));
+  static String accepted(Kind kind, String path) {
+    return "a block of keys: " + String.join(", ", KeyTable.names(kind, path));
   }
 }

@@ -1,5 +1,6 @@
 package coilwright.problem;
 
+import coilwright.spring.Kind;
 import coilwright.unit.Spelling;
 import java.util.Collection;
 import java.util.Optional;
@@ -11,21 +12,32 @@ import java.util.regex.Pattern;
  * @param mark where its key stands, or the value itself in a list
  * @param path such as "loads[1].length"; empty for the file as a whole
  * @param faults the collector
+ * @param kind the kind of spring that the file is read as
  * @param alternative what every "must be" about this value ends with; may be empty
  */
-record Spot(Mark mark, String path, Faults faults, String alternative) {
+record Spot(Mark mark, String path, Faults faults, Kind kind, String alternative) {
 
   private static final Pattern INDEX = Pattern.compile("\\[[0-9]+\\]");
 
   /**
-   * A place without an alternative.
+   * A place without an alternative, where the kind of spring does not matter or is not known yet.
    *
    * @param mark where its key stands, or the value itself in a list
    * @param path its path
    * @param faults the collector
    */
   Spot(Mark mark, String path, Faults faults) {
-    this(mark, path, faults, "");
+    this(mark, path, faults, Kind.COMPRESSION, "");
+  }
+
+  /**
+   * The same place in a file for a kind of spring.
+   *
+   * @param read the kind that the file is read as
+   * @return the place
+   */
+  Spot of(Kind read) {
+    return new Spot(mark, path, faults, read, alternative);
   }
 
   /**
@@ -35,7 +47,7 @@ record Spot(Mark mark, String path, Faults faults, String alternative) {
    * @return the place, whose messages name the word too
    */
   Spot or(String word) {
-    return new Spot(mark, path, faults, ", or " + word);
+    return new Spot(mark, path, faults, kind, ", or " + word);
   }
 
   /**
@@ -47,7 +59,7 @@ record Spot(Mark mark, String path, Faults faults, String alternative) {
    */
   Spot key(Mark at, String key) {
     String name = ShownText.of(key);
-    return new Spot(at, path.isEmpty() ? name : path + "." + name, faults);
+    return new Spot(at, path.isEmpty() ? name : path + "." + name, faults, kind, "");
   }
 
   /**
@@ -58,7 +70,7 @@ record Spot(Mark mark, String path, Faults faults, String alternative) {
    * @return the place
    */
   Spot item(Mark at, int index) {
-    return new Spot(at, path + "[" + index + "]", faults);
+    return new Spot(at, path + "[" + index + "]", faults, kind, "");
   }
 
   /** The path with its indices left out, as the table of keys has it: "loads[].length". */

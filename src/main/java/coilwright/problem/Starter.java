@@ -1,5 +1,6 @@
 package coilwright.problem;
 
+import coilwright.spring.Kind;
 import java.util.List;
 import java.util.stream.Stream;
 
@@ -12,16 +13,28 @@ public final class Starter {
 
   private final StringBuilder text = new StringBuilder();
 
-  private Starter() {}
+  private final Kind kind;
+
+  private Starter(Kind kind) {
+    this.kind = kind;
+  }
 
   /**
-   * A commented problem file for a compression spring, in YAML: valid for a shortlist as it stands,
-   * with every key in it. Keys that may be left out stand behind a "# " of their own; in front of a
-   * block that is left out each line has another, at its beginning.
+   * A commented problem file, in YAML: valid for a shortlist as it stands, with every key in it.
+   * Keys that may be left out stand behind a "# " of their own; in front of a block that is left
+   * out each line has another, at its beginning.
+   *
+   * @param kind the kind of spring
    */
-  public static String compression() {
-    Starter starter = new Starter();
-    starter.text.append("# The loads a compression spring must carry, and the space it has.\n");
+  public static String of(Kind kind) {
+    Starter starter = new Starter(kind);
+    String article = kind == Kind.EXTENSION ? "an " : "a ";
+    starter
+        .text
+        .append("# The loads ")
+        .append(article)
+        .append(kind.id())
+        .append(" spring must carry, and the space it has.\n");
     starter.text.append(
         "# To use a key, drop the \"# \" before it; to use a block, drop the \"# \"");
     starter.text.append(" at the beginning of all its lines.\n");
@@ -31,7 +44,7 @@ public final class Starter {
   }
 
   private void keys(String parent, String before, String indent) {
-    for (ProblemKey<?> key : KeyTable.children(parent)) {
+    for (ProblemKey<?> key : KeyTable.children(kind, parent)) {
       if (key.examples().isEmpty()) {
         block(key, indent);
       } else {
@@ -41,14 +54,14 @@ public final class Starter {
   }
 
   /** Whether a key is in use where its block is: the file would not be valid without it. */
-  private static boolean isOn(ProblemKey<?> key) {
+  private boolean isOn(ProblemKey<?> key) {
     return !key.optional()
         || HeadKeys.ROWS.contains(key)
         || Alternatives.ALL.stream().anyMatch(some -> some.needed() && some.keys().get(0) == key);
   }
 
   private void block(ProblemKey<?> key, String indent) {
-    List<ProblemKey<?>> itemKeys = KeyTable.children(key.path() + "[]");
+    List<ProblemKey<?>> itemKeys = KeyTable.children(kind, key.path() + "[]");
     String before = key.optional() && needsMore(key) ? OFF : "";
     text.append('\n');
     line(before + indent, true, key.name() + ":", key.help());
@@ -60,9 +73,9 @@ public final class Starter {
   }
 
   /** Whether something in a block must be given. */
-  private static boolean needsMore(ProblemKey<?> block) {
+  private boolean needsMore(ProblemKey<?> block) {
     return Stream.of("", "[]")
-        .flatMap(list -> KeyTable.children(block.path() + list).stream())
+        .flatMap(list -> KeyTable.children(kind, block.path() + list).stream())
         .anyMatch(key -> !key.optional());
   }
 

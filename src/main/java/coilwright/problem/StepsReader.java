@@ -1,5 +1,6 @@
 package coilwright.problem;
 
+import coilwright.spring.Kind;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -44,7 +45,7 @@ record StepsReader(String path, ProblemKey<Double> upTo, ProblemKey<Double> step
   }
 
   @Override
-  public Form form() {
-    return new SectionListReader(path).form();
+  public Form form(Kind kind) {
+    return new SectionListReader(path).form(kind);
   }
 }

@@ -2,6 +2,7 @@ package coilwright.problem;
 
 import coilwright.material.StrengthLaw;
 import coilwright.material.StrengthLaws;
+import coilwright.spring.Kind;
 import java.util.List;
 import java.util.Optional;
 
@@ -45,11 +46,11 @@ final class StrengthReader implements ValueReader<LawGiven<StrengthLaw>> {
   }
 
   @Override
-  public Form form() {
+  public Form form(Kind kind) {
     return new Form.Either(
         List.of(
-            Values.strength().form(),
-            Forms.block("own_materials[].tensile_strength"),
-            steps().form()));
+            Values.strength().form(kind),
+            Forms.block(kind, "own_materials[].tensile_strength"),
+            steps().form(kind)));
   }
 }

@@ -1,5 +1,6 @@
 package coilwright.problem;
 
+import coilwright.spring.Kind;
 import java.util.List;
 import java.util.Optional;
 
@@ -28,17 +29,12 @@ record SwitchReader<T>(ValueReader<T> inner) implements ValueReader<Setting<T>> 
   }
 
   @Override
-  public String written() {
-    return inner.written() + ", or " + NONE;
-  }
-
-  @Override
   public boolean omits(Node node) {
     return inner.omits(node);
   }
 
   @Override
-  public Form form() {
-    return new Form.Either(List.of(inner.form(), new Form.Word(List.of(NONE))));
+  public Form form(Kind kind) {
+    return new Form.Either(List.of(inner.form(kind), new Form.Word(List.of(NONE))));
   }
 }

@@ -1,5 +1,6 @@
 package coilwright.problem;
 
+import coilwright.spring.Kind;
 import java.util.Optional;
 
 /** Reads text as it stands. */
@@ -27,7 +28,7 @@ final class TextReader extends ScalarReader<String> {
   }
 
   @Override
-  public Form form() {
+  public Form form(Kind kind) {
     return new Form.Text("");
   }
 }

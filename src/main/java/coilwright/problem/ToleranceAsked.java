@@ -4,24 +4,24 @@ import coilwright.unit.Dimension;
 import coilwright.unit.Quantity;
 
 /**
- * A tolerance as the file gives it, in newtons or as a share of the force.
+ * A tolerance as the file gives it, as a force or torque or as a share of it.
  *
- * @param plus how far above the force
+ * @param plus how far above the load
  * @param minus how far below it
  */
 record ToleranceAsked(Quantity plus, Quantity minus) {
 
   /**
-   * The tolerance of a force.
+   * The tolerance of a load.
    *
-   * @param force F [N]
-   * @return how far above and below it [N]
+   * @param load the force [N] or torque [N mm]
+   * @return how far above and below it, likewise
    */
-  Tolerance of(double force) {
-    return new Tolerance(newtons(plus, force), newtons(minus, force));
+  Tolerance of(double load) {
+    return new Tolerance(inner(plus, load), inner(minus, load));
   }
 
-  private static double newtons(Quantity part, double force) {
-    return part.dimension() == Dimension.SHARE ? part.inner() * force : part.inner();
+  private static double inner(Quantity part, double load) {
+    return part.dimension() == Dimension.SHARE ? part.inner() * load : part.inner();
   }
 }

@@ -1,15 +1,26 @@
 package coilwright.problem;
 
+import coilwright.spring.Kind;
 import coilwright.unit.Dimension;
 import coilwright.unit.Quantity;
 import java.util.List;
 import java.util.Optional;
 
-/** Reads a tolerance: the same on both sides of the force, or each side for itself. */
+/** Reads a tolerance: the same on both sides of the load, or each side for itself. */
 final class ToleranceReader implements ValueReader<ToleranceAsked> {
 
-  private final QuantityReader both =
-      new QuantityReader(Range.ABOVE_ZERO, Dimension.FORCE, Dimension.SHARE);
+  private final QuantityReader both;
+  private final boolean torque;
+
+  /**
+   * A reader of tolerances.
+   *
+   * @param load what the load is: a force or a torque
+   */
+  ToleranceReader(Dimension load) {
+    this.torque = load == Dimension.TORQUE;
+    this.both = new QuantityReader(Range.ABOVE_ZERO, load, Dimension.SHARE);
+  }
 
   @Override
   public Optional<ToleranceAsked> read(Node node, Spot spot) {
@@ -18,13 +29,13 @@ final class ToleranceReader implements ValueReader<ToleranceAsked> {
       return Optional.empty();
     }
     return node instanceof Node.Mapping
-        ? Section.open(node, spot).flatMap(ToleranceReader::sides)
+        ? Section.open(node, spot).flatMap(this::sides)
         : both.read(node, spot).map(side -> new ToleranceAsked(side, side));
   }
 
-  private static Optional<ToleranceAsked> sides(Section section) {
-    Optional<Quantity> plus = section.require(LoadKeys.PLUS);
-    Optional<Quantity> minus = section.require(LoadKeys.MINUS);
+  private Optional<ToleranceAsked> sides(Section section) {
+    Optional<Quantity> plus = section.require(torque ? TorqueKeys.PLUS : LoadKeys.PLUS);
+    Optional<Quantity> minus = section.require(torque ? TorqueKeys.MINUS : LoadKeys.MINUS);
     if (plus.isEmpty() || minus.isEmpty()) {
       return Optional.empty();
     }
@@ -40,7 +51,7 @@ final class ToleranceReader implements ValueReader<ToleranceAsked> {
   }
 
   @Override
-  public Form form() {
-    return new Form.Either(List.of(both.form(), Forms.block("loads[].tolerance")));
+  public Form form(Kind kind) {
+    return new Form.Either(List.of(both.form(kind), Forms.block(kind, "loads[].tolerance")));
   }
 }

@@ -1,5 +1,6 @@
 package coilwright.problem;
 
+import coilwright.spring.Kind;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
@@ -22,7 +23,7 @@ final class UnknownKeys {
    */
   static Set<String> report(Node.Mapping mapping, Spot spot) {
     String parent = spot.pattern();
-    List<String> known = KeyTable.names(parent);
+    List<String> known = KeyTable.names(spot.kind(), parent);
     Set<String> meant = new HashSet<>();
     for (Node.Entry entry : mapping.entries()) {
       if (!known.contains(entry.key())) {
@@ -34,20 +35,23 @@ final class UnknownKeys {
   }
 
   private static Optional<String> report(String key, String parent, List<String> known, Spot spot) {
-    if (Later.has(parent.isEmpty() ? key : parent + "." + key)) {
-      spot.fault(Later.WORDS, "must be left out");
+    List<Kind> others = KeyTable.kindsOf(parent, key);
+    if (!others.isEmpty()) {
+      String kinds = String.join(" and ", others.stream().map(Kind::id).toList());
+      spot.fault(
+          "a key of " + kinds + " springs", "must be left out of a " + spot.kind().id() + " file");
       return Optional.empty();
     }
     Optional<String> nearest = spot.nearest(key, known);
     spot.fault(
         "unknown key",
         "accepted here: " + String.join(", ", known),
-        nearest.isPresent() ? nearest : elsewhere(key));
+        nearest.isPresent() ? nearest : elsewhere(key, spot.kind()));
     return nearest;
   }
 
-  private static Optional<String> elsewhere(String key) {
-    return (key.length() < SHORTEST ? Optional.<String>empty() : KeyTable.pathOf(key))
+  private static Optional<String> elsewhere(String key, Kind kind) {
+    return (key.length() < SHORTEST ? Optional.<String>empty() : KeyTable.pathOf(kind, key))
         .map(path -> path.equals(key) ? key + " at the top of the file" : path);
   }
 }

@@ -1,5 +1,6 @@
 package coilwright.problem;
 
+import coilwright.spring.Kind;
 import java.util.Optional;
 import java.util.function.Function;
 
@@ -22,13 +23,21 @@ interface ValueReader<T> {
   /** What it accepts, in words: "a length in mm, um, cm, m, in or ft". */
   String accepted();
 
-  /** The same for the table of keys, where the keys of a block have rows of their own. */
-  default String written() {
+  /**
+   * The same where the keys of a block may be told: which they are depends on the kind of spring.
+   *
+   * @param kind the kind of spring
+   */
+  default String accepted(Kind kind) {
     return accepted();
   }
 
-  /** What a value that it accepts looks like; nothing that it accepts is left out of the form. */
-  Form form();
+  /**
+   * What a value that it accepts looks like; nothing that it accepts is left out of the form.
+   *
+   * @param kind the kind of spring
+   */
+  Form form(Kind kind);
 
   /**
    * Whether something that stands in the file counts as left out, as an empty section does.
@@ -61,8 +70,8 @@ interface ValueReader<T> {
       }
 
       @Override
-      public Form form() {
-        return inner.form();
+      public Form form(Kind kind) {
+        return inner.form(kind);
       }
     };
   }

@@ -1,6 +1,7 @@
 package coilwright.problem;
 
 import coilwright.material.WireSize;
+import coilwright.spring.Kind;
 import coilwright.unit.Dimension;
 import java.util.Optional;
 
@@ -22,7 +23,7 @@ final class WireSizeReader extends ScalarReader<WireSize> {
   }
 
   @Override
-  public Form form() {
-    return length.form();
+  public Form form(Kind kind) {
+    return length.form(kind);
   }
 }

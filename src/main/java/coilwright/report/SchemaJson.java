@@ -2,17 +2,23 @@ package coilwright.report;
 
 import coilwright.problem.Form;
 import coilwright.problem.Range;
+import coilwright.spring.Kind;
 import java.io.IOException;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 
 /**
- * Writes a form as JSON Schema, draft 2020-12, for editors. It says what one value shows by itself;
- * what only two values together show is left to reading the file.
+ * Writes forms as JSON Schema, draft 2020-12, for editors. It says what one value shows by itself,
+ * and which keys the kind of spring has; what else only two values together show is left to reading
+ * the file.
  */
 public final class SchemaJson {
 
   private static final String DIALECT = "https://json-schema.org/draft/2020-12/schema";
+
+  /** The key that says which kind of spring a file is for. */
+  private static final String KIND = "spring";
 
   private final Json json;
 
@@ -21,18 +27,40 @@ public final class SchemaJson {
   }
 
   /**
-   * The schema of a file.
+   * The schema of problem files.
    *
-   * @param file the form of the file
+   * @param files the form of the file for each kind of spring
    * @return a JSON document, ended by a line feed
    */
-  public static String of(Form.Block file) {
+  public static String of(Map<Kind, Form.Block> files) {
     return Json.document(
         json -> {
           json.string("$schema", DIALECT);
-          json.string("title", "Problem file of coilwright, for a compression spring");
-          new SchemaJson(json).form(file, false);
+          json.string("title", "Problem file of coilwright");
+          json.string("type", "object");
+          json.strings("required", List.of(KIND));
+          List<String> words = files.keySet().stream().map(Kind::id).toList();
+          json.object("properties", keys -> keys.object(KIND, key -> key.strings("enum", words)));
+          json.array(
+              "allOf",
+              list -> {
+                for (Map.Entry<Kind, Form.Block> file : files.entrySet()) {
+                  list.braces(item -> new SchemaJson(item).file(file.getKey(), file.getValue()));
+                }
+              });
         });
+  }
+
+  /** What holds for the files of one kind of spring. */
+  private void file(Kind kind, Form.Block form) throws IOException {
+    json.object(
+        "if",
+        one -> {
+          one.object(
+              "properties", keys -> keys.object(KIND, key -> key.string("const", kind.id())));
+          one.strings("required", List.of(KIND));
+        });
+    json.object("then", one -> new SchemaJson(one).form(form, false));
   }
 
   private void form(Form form, boolean mayBeEmpty) throws IOException {

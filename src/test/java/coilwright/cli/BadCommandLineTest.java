@@ -91,8 +91,15 @@ class BadCommandLineTest {
         "--top",
         "2");
     refused(
-        "coilwright starter: KIND: \"json\"; accepted: compression", "starter", "--schema", "json");
-    refused("coilwright starter: KIND: \"json\"; accepted: compression", "starter", "--", "json");
+        "coilwright starter: KIND: \"json\"; accepted: compression, extension, torsion",
+        "starter",
+        "--schema",
+        "json");
+    refused(
+        "coilwright starter: KIND: \"json\"; accepted: compression, extension, torsion",
+        "starter",
+        "--",
+        "json");
   }
 
   @Test
@@ -121,11 +128,11 @@ class BadCommandLineTest {
   }
 
   @Test
-  void valuesNotAvailableYet() {
+  void kindsAndSeries() {
     refused(
-        "coilwright starter: KIND: \"torsion\" is not available yet; accepted: compression",
+        "coilwright starter: KIND: \"torsoin\"; accepted: compression, extension, torsion (did you mean torsion?)",
         "starter",
-        "torsion");
+        "torsoin");
     Run.of("wires", "brown-sharp")
         .refused(
             "coilwright wires: SERIES: \"brown-sharp\"; accepted: metric, music-wire-gauge,"
@@ -152,12 +159,12 @@ class BadCommandLineTest {
         "--format",
         "json");
     refused(
-        "coilwright starter: KIND: \"extension\" is not available yet; accepted: compression",
+        "coilwright starter: KIND: \"leaf\"; accepted: compression, extension, torsion",
         "starter",
-        "extension",
+        "leaf",
         "--schema");
     refused(
-        "coilwright starter: KIND is missing; give the kind of spring: compression",
+        "coilwright starter: KIND is missing; give the kind of spring: compression, extension or torsion",
         "starter",
         "--force");
     refused(
@@ -207,9 +214,11 @@ class BadCommandLineTest {
 
   @Test
   void namesOfThings() {
-    refused("coilwright starter: KIND is missing; give the kind of spring: compression", "starter");
     refused(
-        "coilwright starter: KIND: \"compresion\"; accepted: compression (did you mean"
+        "coilwright starter: KIND is missing; give the kind of spring: compression, extension or torsion",
+        "starter");
+    refused(
+        "coilwright starter: KIND: \"compresion\"; accepted: compression, extension, torsion (did you mean"
             + " compression?)",
         "starter",
         "compresion");

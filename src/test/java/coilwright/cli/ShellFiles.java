@@ -2,8 +2,7 @@ package coilwright.cli;
 
 import coilwright.material.Catalogue;
 import coilwright.material.WireSeries;
-import coilwright.problem.Form;
-import coilwright.problem.KeyTable;
+import coilwright.spring.Kind;
 import java.io.File;
 import java.io.IOException;
 import java.io.InputStream;
@@ -106,9 +105,6 @@ public final class ShellFiles {
   }
 
   private static List<String> kinds() {
-    return KeyTable.form().keys().stream()
-        .filter(key -> key.name().equals("spring"))
-        .flatMap(key -> ((Form.Word) key.form()).words().stream())
-        .toList();
+    return Stream.of(Kind.values()).map(Kind::id).toList();
   }
 }

@@ -2,6 +2,8 @@ package coilwright.problem;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import coilwright.spring.Kind;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
@@ -17,7 +19,8 @@ class KeyTableTest {
     Faults faults = new Faults();
     Node node = Document.read("x: " + example, faults).orElseThrow();
     Node value = ((Node.Mapping) node).entries().get(0).value();
-    Spot spot = new Spot(node.mark(), key.path().replace("[]", "[0]"), faults);
+    Spot spot =
+        new Spot(node.mark(), key.path().replace("[]", "[0]"), faults).of(key.kinds().get(0));
     assertThat(key.reader().read(value, spot)).isPresent();
     assertThat(faults.list()).isEmpty();
   }
@@ -25,33 +28,60 @@ class KeyTableTest {
   @Test
   void everyKeyOfTheTableIsAcceptedAndNoOther() {
     for (ProblemKey<?> key : KeyTable.ROWS) {
-      assertThat(KeyTable.names(key.parent())).contains(key.name());
-      assertThat(unknown(key.parent(), key.name())).isFalse();
-      assertThat(unknown(key.parent(), key.name() + "_")).isTrue();
-      assertThat(Later.has(key.path())).isFalse();
+      for (Kind kind : key.kinds()) {
+        assertThat(KeyTable.names(kind, key.parent())).contains(key.name());
+        assertThat(faults(kind, key.parent(), key.name())).isEmpty();
+        assertThat(faults(kind, key.parent(), key.name() + "_")).hasSize(1);
+      }
     }
   }
 
   @Test
-  void aKeyStandsOnceAndInABlockThatStands() {
-    List<String> paths = KeyTable.ROWS.stream().<String>map(ProblemKey::path).toList();
-    assertThat(paths).doesNotHaveDuplicates();
+  void aKeyOfAnotherKindIsRefusedAsWhatItIs() {
+    int foreign = 0;
     for (ProblemKey<?> key : KeyTable.ROWS) {
-      String parent = key.parent().replaceAll("\\[\\]$", "");
-      assertThat(parent.isEmpty() || paths.contains(parent)).as(key.path()).isTrue();
+      for (Kind kind : Kind.values()) {
+        if (!KeyTable.kindsOf(key.parent(), key.name()).contains(kind)) {
+          foreign++;
+          Fault fault = faults(kind, key.parent(), key.name()).get(0);
+          assertThat(fault.found()).startsWith("a key of ").contains(key.kinds().get(0).id());
+          assertThat(fault.remedy()).isEqualTo("must be left out of a " + kind.id() + " file");
+        }
+      }
+    }
+    assertThat(foreign).isGreaterThan(100);
+  }
+
+  @Test
+  void aKeyStandsOnceAndInABlockThatStands() {
+    for (Kind kind : Kind.values()) {
+      List<ProblemKey<?>> rows = new ArrayList<>(KeyTable.ROWS);
+      rows.removeIf(key -> !key.kinds().contains(kind));
+      List<String> paths = rows.stream().<String>map(ProblemKey::path).toList();
+      assertThat(paths).doesNotHaveDuplicates();
+      for (ProblemKey<?> key : rows) {
+        String parent = key.parent().replaceAll("\\[\\]$", "");
+        assertThat(parent.isEmpty() || paths.contains(parent)).as(key.path()).isTrue();
+      }
     }
   }
 
   @Test
   void theTableInMarkdownHasARowForEveryKey() {
     List<String> lines = KeyTable.markdown().lines().toList();
-    assertThat(lines).hasSize(KeyTable.ROWS.size() + 2);
-    assertThat(lines.get(2)).isEqualTo("| `title` | text | no title | free text |");
+    assertThat(lines.subList(2, lines.size()).stream().map(line -> line.split("`")[1]).distinct())
+        .containsExactlyElementsOf(
+            KeyTable.ROWS.stream().<String>map(ProblemKey::path).distinct().toList());
+    assertThat(lines).doesNotHaveDuplicates();
+    assertThat(lines.get(2)).isEqualTo("| `title` | all | text | no title | free text |");
     assertThat(lines)
         .contains(
-            "| `envelope.bore` | a length in mm, um, cm, m, in or ft | no bore | hole it works in:"
-                + " the coil, grown by compression, clears it |")
-        .allMatch(line -> line.chars().filter(sign -> sign == '|').count() == 5);
+            "| `envelope.bore` | compression | a length in mm, um, cm, m, in or ft | no bore | hole"
+                + " it works in: the coil, grown by compression, clears it |",
+            "| `rank.by` | all | mass, margin, cost or robust | mass | lightest, greatest least"
+                + " stress margin, cheapest, or greatest least margin first |")
+        .anyMatch(line -> line.startsWith("| `stroke` | compression, extension | "))
+        .allMatch(line -> line.chars().filter(sign -> sign == '|').count() == 6);
   }
 
   static Stream<Object[]> examples() {
@@ -59,12 +89,12 @@ class KeyTableTest {
         .flatMap(key -> key.examples().stream().map(example -> new Object[] {key, example}));
   }
 
-  private static boolean unknown(String parent, String name) {
+  private static List<Fault> faults(Kind kind, String parent, String name) {
     Faults faults = new Faults();
     Node.Mapping mapping =
         new Node.Mapping(
             Mark.FILE, List.of(new Node.Entry(Mark.FILE, name, new Node.Scalar(Mark.FILE, "x"))));
-    UnknownKeys.report(mapping, new Spot(Mark.FILE, parent.replace("[]", "[0]"), faults));
-    return faults.count() > 0;
+    UnknownKeys.report(mapping, new Spot(Mark.FILE, parent.replace("[]", "[0]"), faults).of(kind));
+    return faults.list();
   }
 }

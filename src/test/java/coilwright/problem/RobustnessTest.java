@@ -2,6 +2,7 @@ package coilwright.problem;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import coilwright.spring.Kind;
 import java.nio.charset.StandardCharsets;
 import java.util.Random;
 import org.junit.jupiter.api.Test;
@@ -60,8 +61,14 @@ class RobustnessTest {
   @EnumSource(Purpose.class)
   void anyMutationIsReadOrRefused(Purpose purpose) {
     Random random = new Random(20260);
-    String[] seeds = {FullFileTest.FULL, Files.DESIGN, Starter.compression().replace("# ", "")};
-    for (int i = 0; i < 600; i++) {
+    String[] seeds = {
+      FullFileTest.FULL,
+      Files.DESIGN,
+      Starter.of(Kind.COMPRESSION).replace("# ", ""),
+      Starter.of(Kind.EXTENSION).replace("# ", ""),
+      Starter.of(Kind.TORSION).replace("# ", "")
+    };
+    for (int i = 0; i < 1000; i++) {
       String text = mutated(seeds[i % seeds.length], random);
       Reading reading = Files.read(text, purpose);
       for (String fault : Files.faults(reading)) {

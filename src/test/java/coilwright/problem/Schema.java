@@ -21,7 +21,7 @@ import java.util.Optional;
 /** The schema of problem files in a validator, and files as an editor hands them to it. */
 final class Schema {
 
-  static final String TEXT = SchemaJson.of(KeyTable.form());
+  static final String TEXT = SchemaJson.of(KeyTable.forms());
 
   private static final ObjectMapper JSON = new ObjectMapper();
   private static final YAMLMapper YAML =

@@ -2,6 +2,7 @@ package coilwright.problem;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import coilwright.spring.Kind;
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.ObjectMapper;
 import com.networknt.schema.SchemaRegistry;
@@ -47,7 +48,13 @@ class SchemaTest {
   @Test
   void takesGoodFiles() {
     for (String text :
-        List.of(Files.LOADS, Files.DESIGN, FullFileTest.FULL, Starter.compression())) {
+        List.of(
+            Files.LOADS,
+            Files.DESIGN,
+            FullFileTest.FULL,
+            Starter.of(Kind.COMPRESSION),
+            Starter.of(Kind.EXTENSION),
+            Starter.of(Kind.TORSION))) {
       assertThat(Schema.complaints(text)).isEmpty();
     }
   }

@@ -2,6 +2,7 @@ package coilwright.problem;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import coilwright.spring.Kind;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.Stream;
@@ -12,7 +13,10 @@ import org.junit.jupiter.params.provider.MethodSource;
 /** The starter file: valid as it stands, with every key, and each key may be put to use. */
 class StarterTest {
 
-  private static final String STARTER = Starter.compression();
+  private static final String STARTER = Starter.of(Kind.COMPRESSION);
+
+  private static final List<ProblemKey<?>> ROWS =
+      KeyTable.ROWS.stream().filter(key -> key.kinds().contains(Kind.COMPRESSION)).toList();
 
   /** A key behind a "# " of its own, in a block that may be behind another. */
   private static final String OFF = "(?s)((?:# )?[ -]*)# ([a-z_]+: .*)";
@@ -64,22 +68,23 @@ class StarterTest {
 
   @Test
   void showsEveryKeyAndItsMeaningOnce() {
-    for (ProblemKey<?> key : KeyTable.ROWS) {
+    for (ProblemKey<?> key : ROWS) {
       assertThat(STARTER).as(key.path()).containsPattern("[ {]" + key.name() + ":|\n" + key.name());
-      if (!key.examples().isEmpty() && KeyTable.children(key.parent()).contains(key)) {
+      if (!key.examples().isEmpty()
+          && KeyTable.children(Kind.COMPRESSION, key.parent()).contains(key)) {
         assertThat(STARTER).contains(key.examples());
       }
     }
-    for (String name : KeyTable.names("")) {
+    for (String name : KeyTable.names(Kind.COMPRESSION, "")) {
       assertThat(STARTER.split("(?m)^(# )?" + name + ":")).as(name).hasSize(2);
     }
   }
 
   @Test
   void explainsEachKeyThatHasALineOfItsOwn() {
-    for (ProblemKey<?> key : KeyTable.ROWS) {
+    for (ProblemKey<?> key : ROWS) {
       boolean inside = key.path().matches(".*(tolerance|strength|modulus)(\\[\\])?\\..*");
-      boolean bound = KeyTable.ROWS.stream().anyMatch(row -> isValueOf(row, key));
+      boolean bound = ROWS.stream().anyMatch(row -> isValueOf(row, key));
       if (!inside && !bound) {
         assertThat(STARTER).as(key.path()).contains("# " + key.help());
       }
