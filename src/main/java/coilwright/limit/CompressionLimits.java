@@ -1,6 +1,5 @@
 package coilwright.limit;
 
-import coilwright.problem.Band;
 import coilwright.problem.BucklingRule;
 import coilwright.problem.DesignLimits;
 import coilwright.problem.LimitName;
@@ -14,17 +13,13 @@ import coilwright.spring.LoadPoint;
 import coilwright.spring.Method;
 import coilwright.spring.Surge;
 import coilwright.unit.Dimension;
-import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
-import java.util.function.ToDoubleFunction;
 
 /** The limits that a problem sets for compression springs, in the order of their names. */
 public final class CompressionLimits {
 
   private static final DesignLimits USUAL = DesignLimits.DEFAULTS;
-  private static final Citation GIVEN = Citation.seen(Source.PROBLEM_FILE, "limits");
-  private static final Citation PRACTICE = Citation.seen(Source.COMMON_PRACTICE, "");
   private static final Citation CLASH =
       Citation.seen(Source.SHIGLEY, "fractional overrun to closure, at least 0.15");
 
@@ -44,7 +39,8 @@ public final class CompressionLimits {
   private final Method method;
   private final boolean overtravel;
   private final String covered;
-  private final List<Limit<CompressionState>> limits = new ArrayList<>();
+  private final Bands<CompressionState> bands = new Bands<>();
+  private final List<Limit<CompressionState>> limits = bands.limits();
 
   private CompressionLimits(Problem problem) {
     this.method = problem.limits().method();
@@ -95,13 +91,13 @@ public final class CompressionLimits {
   }
 
   private void proportions(DesignLimits asked) {
-    band(
+    bands.band(
         LimitName.SPRING_INDEX,
         asked.springIndex(),
         USUAL.springIndex(),
         "mean diameter over wire diameter",
         state -> state.spring().springIndex());
-    band(
+    bands.band(
         LimitName.ACTIVE_COILS,
         asked.activeCoils(),
         USUAL.activeCoils(),
@@ -111,43 +107,9 @@ public final class CompressionLimits {
   }
 
   private void pitchAngle(double greatest) {
-    Citation source = source(OptionalDouble.of(greatest), USUAL.maxPitchAngle(), PRACTICE);
+    Citation source =
+        Bands.source(OptionalDouble.of(greatest), USUAL.maxPitchAngle(), Bands.PRACTICE);
     limits.add(new PitchAngleBound(greatest, source));
-  }
-
-  private void band(
-      LimitName name,
-      Band band,
-      Band usual,
-      String definition,
-      ToDoubleFunction<CompressionState> value) {
-    fixed(
-        new Check(name, Side.MIN, Dimension.NUMBER, definition),
-        value,
-        band.min(),
-        source(band.min(), usual.min(), PRACTICE));
-    fixed(
-        new Check(name, Side.MAX, Dimension.NUMBER, definition),
-        value,
-        band.max(),
-        source(band.max(), usual.max(), PRACTICE));
-  }
-
-  /** Where a bound comes from: the file, unless it is the usual one. */
-  private static Citation source(OptionalDouble bound, OptionalDouble usual, Citation usualSource) {
-    return bound.equals(usual) ? usualSource : GIVEN;
-  }
-
-  /** Adds a limit against a fixed bound, where there is one. */
-  private void fixed(
-      Check check,
-      ToDoubleFunction<CompressionState> value,
-      OptionalDouble bound,
-      Citation source) {
-    if (bound.isPresent()) {
-      boolean straight = check.limit() == LimitName.ACTIVE_COILS;
-      limits.add(ValueLimit.fixed(check, value, bound.getAsDouble(), source, straight));
-    }
   }
 
   private void travel(DesignLimits asked) {
@@ -194,7 +156,7 @@ public final class CompressionLimits {
             "travel left between the most compressed load and solid, of the deflection there"),
         CompressionState::clashAllowance,
         share.getAsDouble(),
-        source(share, USUAL.clashAllowance(), CLASH),
+        Bands.source(share, USUAL.clashAllowance(), CLASH),
         true);
   }
 
@@ -211,7 +173,7 @@ public final class CompressionLimits {
   }
 
   private void surge(DesignLimits asked) {
-    fixed(
+    bands.fixed(
         new Check(
             LimitName.SURGE_FREQUENCY,
             Side.MIN,
@@ -224,7 +186,7 @@ public final class CompressionLimits {
 
   private void nominal(List<LoadPoint> loads, OptionalDouble freeLength) {
     if (loads.stream().anyMatch(LoadPoint::fixesForce)) {
-      limits.add(new NominalLoad(loads, freeLength));
+      limits.add(NominalLoad.ofCompression(loads, freeLength));
     }
   }
 }

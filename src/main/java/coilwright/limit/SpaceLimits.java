@@ -2,9 +2,6 @@ package coilwright.limit;
 
 import coilwright.problem.Envelope;
 import coilwright.problem.LimitName;
-import coilwright.source.Citation;
-import coilwright.source.Source;
-import coilwright.spring.CoilTolerance;
 import coilwright.spring.CompressionState;
 import coilwright.spring.Family;
 import coilwright.spring.Method;
@@ -17,16 +14,15 @@ import java.util.function.ToDoubleFunction;
 /** The limits that the space sets for compression springs. */
 final class SpaceLimits {
 
-  private static final Citation ASKED = Citation.seen(Source.PROBLEM_FILE, "envelope");
-  private static final double JUST = 1e-9;
-
   private final Envelope space;
+  private final Clearance clearance;
   private final Method method;
   private final String covered;
   private final List<Limit<CompressionState>> limits = new ArrayList<>();
 
   private SpaceLimits(Envelope space, Method method, String covered) {
     this.space = space;
+    this.clearance = new Clearance(space);
     this.method = method;
     this.covered = covered;
   }
@@ -83,7 +79,7 @@ final class SpaceLimits {
       OptionalDouble bound) {
     if (bound.isPresent()) {
       Check check = new Check(name, side, Dimension.LENGTH, definition);
-      limits.add(ValueLimit.fixed(check, value, bound.getAsDouble(), ASKED, false));
+      limits.add(ValueLimit.fixed(check, value, bound.getAsDouble(), Clearance.ASKED, false));
     }
   }
 
@@ -100,7 +96,7 @@ final class SpaceLimits {
                       + method.growthMeans()
                       + covered
                       + ", against bore less "
-                      + clearance()),
+                      + clearance.words()),
               CompressionState::outsideDiameterAtSolid,
               state -> bore - clearance(state),
               method.growthCitation(),
@@ -114,42 +110,25 @@ final class SpaceLimits {
                   LimitName.ROD,
                   Side.MIN,
                   Dimension.LENGTH,
-                  "inside diameter, free state" + covered + ", against rod plus " + clearance()),
+                  "inside diameter, free state"
+                      + covered
+                      + ", against rod plus "
+                      + clearance.words()),
               CompressionState::clearInsideDiameter,
               state -> rod + clearance(state),
-              space.clearanceAssumed() ? CoilTolerance.citation() : ASKED,
+              clearance.source(),
               false,
-              family -> space.clearanceAssumed() ? steps(family, rod) : new double[0]));
+              family -> steps(family, rod)));
     }
-  }
-
-  private String clearance() {
-    return space.clearanceAssumed()
-        ? "the coil diameter tolerance of EN 15800 grade 2, assumed"
-        : "clearance";
   }
 
   private double clearance(CompressionState state) {
-    return space
-        .diametralClearance()
-        .orElseGet(
-            () -> CoilTolerance.of(state.spring().meanDiameter(), state.spring().wireDiameter()));
+    return clearance.of(state.spring().meanDiameter(), state.spring().wireDiameter());
   }
 
-  /**
-   * Where the tolerance steps up near the diameter at which the coil just clears the rod: on both
-   * sides of each step, since there a wider coil may clear less.
-   */
-  private static double[] steps(Family<CompressionState> family, double rod) {
+  private double[] steps(Family<CompressionState> family, double rod) {
     AlongFamily along = new AlongFamily(family);
-    double wire = along.any().coatedDiameter();
-    double[] diameters = CoilTolerance.stepsNear(rod + wire, along.any().wire().diameter());
-    double[] turns = new double[2 * diameters.length];
-    for (int i = 0; i < diameters.length; i++) {
-      double coils = along.coilsAt(diameters[i]);
-      turns[2 * i] = coils * (1 - JUST);
-      turns[2 * i + 1] = coils * (1 + JUST);
-    }
-    return turns;
+    return clearance.steps(
+        rod + along.any().coatedDiameter(), along.any().wire().diameter(), along::coilsAt);
   }
 }

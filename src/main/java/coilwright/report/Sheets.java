@@ -17,8 +17,7 @@ public final class Sheets {
     return switch (kind) {
       case COMPRESSION -> new CompressionSheet();
       case TORSION -> new TorsionSheet();
-      case EXTENSION ->
-          throw new IllegalArgumentException("no sheet for " + kind.id() + " springs");
+      case EXTENSION -> new ExtensionSheet();
     };
   }
 }

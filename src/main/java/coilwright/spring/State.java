@@ -29,11 +29,8 @@ public interface State {
   double wireLength();
 
   /**
-   * <<<<<<< HEAD Whether mass hardly varies along its family, so that springs of one wire are
-   * better told apart by something else. ======= Whether springs of one wire that differ in their
-   * coil count alone hardly differ in mass, so that mass is no reason to prefer one of them.
-   * >>>>>>> a51ce22 (Search torsion springs: one family for each wire, its limits, and the check of
-   * one spring)
+   * Whether springs of one wire that differ in their coil count alone hardly differ in mass, so
+   * that mass is no reason to prefer one of them.
    */
   default boolean massHardlyVaries() {
     return false;

@@ -89,6 +89,12 @@ public final class TorsionState implements State {
     return false;
   }
 
+  /** Legs are straightened off the coil; where there are none, nothing is done. */
+  @Override
+  public EndWork endWork() {
+    return spring.legs().length() > 0 ? EndWork.LEG_FORMING : EndWork.NONE;
+  }
+
   @Override
   public double coils() {
     return spring.bodyCoils();

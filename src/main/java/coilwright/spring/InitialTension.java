@@ -1,0 +1,121 @@
+package coilwright.spring;
+
+import coilwright.source.Citation;
+import coilwright.source.Source;
+import coilwright.unit.Dimension;
+import coilwright.unit.Require;
+
+/**
+ * The initial tension that close-wound coils usually come to, as two textbooks give it: a range of
+ * uncorrected torsion stress for each spring index. Both are published for indices of about 4 to 16
+ * and are used beyond; never below zero.
+ */
+public enum InitialTension {
+  /** 33500/exp(0.105 C) psi, give or take 1000 (4 - (C - 3)/6.5) psi. */
+  SHIGLEY("Shigley", Citation.remembered(Source.SHIGLEY, "equation 10-41")) {
+    @Override
+    double low(double c) {
+      return middle33(c) - width(c);
+    }
+
+    @Override
+    double high(double c) {
+      return middle33(c) + width(c);
+    }
+
+    private double middle33(double c) {
+      return 33_500 * StrictMath.exp(-0.105 * c);
+    }
+
+    private double width(double c) {
+      return Math.max(0, 1000 * (4 - (c - 3) / 6.5));
+    }
+  },
+  /** Two cubics of the index. */
+  NORTON("Norton", Citation.remembered(Source.NORTON, "equations of the preferred range")) {
+    @Override
+    double low(double c) {
+      return ((-4.231 * c + 181.5) * c - 3387) * c + 28_640;
+    }
+
+    @Override
+    double high(double c) {
+      return ((-2.987 * c + 139.7) * c - 3427) * c + 38_404;
+    }
+  };
+
+  /** The one that decides: its range stays above zero to an index of about 28. */
+  public static final InitialTension USUAL = SHIGLEY;
+
+  private static final double MPA_PER_PSI = Dimension.STRESS.unit("psi").orElseThrow().toInner(1);
+
+  private final String author;
+  private final Citation citation;
+
+  InitialTension(String author, Citation citation) {
+    this.author = author;
+    this.citation = citation;
+  }
+
+  /** The lower line [psi]. */
+  abstract double low(double c);
+
+  /** The upper line [psi]. */
+  abstract double high(double c);
+
+  /** Whose relation it is. */
+  public String author() {
+    return author;
+  }
+
+  /** Where it is published. */
+  public Citation citation() {
+    return citation;
+  }
+
+  /**
+   * The least of the preferred range.
+   *
+   * @param springIndex C [-]
+   * @return uncorrected stress [MPa], zero or more
+   * @throws IllegalArgumentException if the index is not positive and finite
+   */
+  public double least(double springIndex) {
+    return Math.max(0, low(Require.positive(springIndex, "spring index", "-"))) * MPA_PER_PSI;
+  }
+
+  /**
+   * The greatest of the preferred range.
+   *
+   * @param springIndex C [-]
+   * @return uncorrected stress [MPa], zero or more
+   * @throws IllegalArgumentException if the index is not positive and finite
+   */
+  public double greatest(double springIndex) {
+    return Math.max(0, high(Require.positive(springIndex, "spring index", "-"))) * MPA_PER_PSI;
+  }
+
+  /**
+   * The middle of the preferred range.
+   *
+   * @param springIndex C [-]
+   * @return uncorrected stress [MPa]
+   * @throws IllegalArgumentException if the index is not positive and finite
+   */
+  public double middle(double springIndex) {
+    return (least(springIndex) + greatest(springIndex)) / 2;
+  }
+
+  /**
+   * The force that an uncorrected stress stands for, F0 = pi d^3 tau/(8 D).
+   *
+   * @param stress tau [MPa]
+   * @param meanDiameter D [mm]
+   * @param wireDiameter d [mm]
+   * @return F0 [N]
+   * @throws IllegalArgumentException if a diameter is not positive and finite
+   */
+  public static double force(double stress, double meanDiameter, double wireDiameter) {
+    return stress / ShearStress.uncorrected(1, meanDiameter, wireDiameter);
+  }
+}
