@@ -19,6 +19,9 @@ final class Bracket<S extends State> {
   /** Ratios of value and bound beyond this say only on which side they are. */
   private static final double WIDEST = 30;
 
+  /** Margins below this, without end where a coil is wound off, say only on which side they are. */
+  private static final double FARTHEST_OUT = -1e6;
+
   private static final int MOST_EVALUATIONS = 200;
 
   private final Limit<S> limit;
@@ -66,7 +69,7 @@ final class Bracket<S extends State> {
   private double excess(double coils) {
     Finding finding = limit.judge(trail.at(coils));
     if (straight || !finding.canFail() || !(finding.bound() > 0)) {
-      return Math.min(finding.margin(), WIDEST) + Finding.TOLERANCE;
+      return Math.max(FARTHEST_OUT, Math.min(finding.margin(), WIDEST)) + Finding.TOLERANCE;
     }
     double ratio = Math.min(WIDEST, Math.max(1 / WIDEST, finding.value() / finding.bound()));
     double log = StrictMath.log(ratio);
