@@ -51,6 +51,11 @@ public interface Sheet<S extends State> {
   /** What a reader should know of some springs. */
   List<Note<S>> notes(Problem problem);
 
+  /** What a reader should know of all springs of the kind. */
+  default List<String> generalNotes() {
+    return List.of();
+  }
+
   /** Adds the loads as they were understood, and what they come to. */
   void understandLoads(Understood words);
 

@@ -111,10 +111,13 @@ final class TorsionSheet implements Sheet<TorsionState> {
             TorsionState::fewCoils),
         new Note<>(
             "no angle between the legs is asked: check the one they come to when free",
-            state -> asked(problem).legs().angle().isEmpty()),
-        new Note<>(
-            "friction between coils and on an arbor is not reckoned, but for what the rate constant holds",
-            state -> true));
+            state -> asked(problem).legs().angle().isEmpty()));
+  }
+
+  @Override
+  public List<String> generalNotes() {
+    return List.of(
+        "friction between coils and on an arbor is not reckoned, but for what the rate constant holds");
   }
 
   @Override

@@ -64,6 +64,9 @@ final class Warnings {
     notes.addAll(sheet.notes(problem));
     List<Warning> warnings = new ArrayList<>();
     notes.forEach(note -> warn(warnings, note, springs, ranked));
+    if (!springs.isEmpty()) {
+      sheet.generalNotes().forEach(what -> warnings.add(new Warning(what, List.of(), List.of())));
+    }
     return warnings;
   }
 
