@@ -42,7 +42,7 @@ record Agreement(Section root, LineKeys keys, FixedLine fixed) {
   private void onTheLine(LoadEntry load) {
     double line = fixed.loadAt(load.place());
     if (!agrees(load.load(), line)) {
-      load.loadFault(remedy(fixed.form().shownLoad(line)));
+      load.loadFault(remedy(fixed.form().shownLoad(line), ""));
     }
   }
 
@@ -81,16 +81,18 @@ record Agreement(Section root, LineKeys keys, FixedLine fixed) {
       }
     }
     if (!(Math.abs(given.getAsDouble() - line) <= WITHIN * whole)) {
-      disagrees(keys.zero().get(0), fixed.form().shownPlace(line));
+      ProblemKey<Double> key = keys.zero().get(0);
+      String of = fixed.form().turning() ? " of the greatest deflection" : "";
+      root.spot(key).fault(root.shown(key), remedy(fixed.form().shownPlace(line), of));
     }
   }
 
   private void disagrees(ProblemKey<Double> key, String line) {
-    root.spot(key).fault(root.shown(key), remedy(line));
+    root.spot(key).fault(root.shown(key), remedy(line, ""));
   }
 
-  private String remedy(String line) {
-    return "must be " + line + " within 0.1 %, which follows from " + fixed.rule();
+  private String remedy(String line, String of) {
+    return "must be " + line + " within 0.1 %" + of + ", which follows from " + fixed.rule();
   }
 
   private static boolean agrees(double given, double line) {

@@ -10,6 +10,8 @@ import java.util.OptionalDouble;
  */
 record HookRules(Blocks blocks, HooksAsked hooks) {
 
+  private static final double HALF = 0.5;
+
   /**
    * Reports what contradicts.
    *
@@ -17,11 +19,14 @@ record HookRules(Blocks blocks, HooksAsked hooks) {
    * @param freeLength L0 inside the hooks [mm], where the file gives it
    */
   void check(LineRead line, OptionalDouble freeLength) {
+    coilStep();
     boolean free = hooks.length().rule() == HookLength.Rule.FREE;
     if (freeLength.isPresent() && !free) {
       freeLengthFault(
-          "must be left out, or go with make.hook_length: free; else it follows from body and"
-              + " hooks");
+          blocks.purpose() == Purpose.CHECK
+              ? "must be left out: it follows from body and hooks of the spring to check"
+              : "must be left out, or go with make.hook_length: free; else it follows from body and"
+                  + " hooks");
     } else if (freeLength.isPresent()) {
       onTheLine(line, freeLength.getAsDouble());
     }
@@ -32,6 +37,28 @@ record HookRules(Blocks blocks, HooksAsked hooks) {
           .fault(
               "free with every length left open",
               "must be natural or a length, or a load must give its length");
+    }
+  }
+
+  /**
+   * Reports a step of body coils that loop planes leave no choice for: hooks in one plane have
+   * whole and half coils between them, hooks at a right angle a quarter or three quarters over.
+   */
+  private void coilStep() {
+    if (blocks.make().isEmpty() || !blocks.make().get().has(MakeKeys.COIL_STEP)) {
+      return;
+    }
+    Section make = blocks.make().get();
+    double step = make.read(MakeKeys.COIL_STEP).orElse(HALF);
+    Spot spot = make.spot(MakeKeys.COIL_STEP);
+    if (hooks.planes() == LoopPlanes.RIGHT_ANGLE) {
+      spot.fault(
+          "given beside loop_planes right-angle",
+          "must be left out: a quarter or three quarters of a coil follow whole ones then");
+    } else if (hooks.planes() == LoopPlanes.IN_LINE && step % HALF != 0) {
+      spot.fault(
+          make.shown(MakeKeys.COIL_STEP) + " beside loop_planes in-line",
+          "must be a multiple of 0.5: the body has whole or half coils then");
     }
   }
 

@@ -69,7 +69,7 @@ record LineRead(LineForm form, List<LoadEntry> loads, LineFacts facts, Optional<
     if (stroke.loads().size() == 1 && !stroke.form().startsFree()) {
       spot.fault(
           shown + " beside one load",
-          "must go with two: from the free length, the force jumps first");
+          "must go with two: how far the free length is from one depends on the initial tension");
     } else {
       spot.fault(
           shown + " between loads of which some lack their " + load,

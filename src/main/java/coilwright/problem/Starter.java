@@ -28,11 +28,10 @@ public final class Starter {
    */
   public static String of(Kind kind) {
     Starter starter = new Starter(kind);
-    String article = kind == Kind.EXTENSION ? "an " : "a ";
     starter
         .text
         .append("# The loads ")
-        .append(article)
+        .append(article(kind))
         .append(kind.id())
         .append(" spring must carry, and the space it has.\n");
     starter.text.append(
@@ -41,6 +40,15 @@ public final class Starter {
     starter.text.append("# For check, use the block design, and drop the block make.\n\n");
     starter.keys("", "", "");
     return starter.text.toString();
+  }
+
+  /**
+   * The article before the word of a kind.
+   *
+   * @param kind the kind
+   */
+  static String article(Kind kind) {
+    return kind == Kind.EXTENSION ? "an " : "a ";
   }
 
   private void keys(String parent, String before, String indent) {

@@ -1,5 +1,6 @@
 package coilwright.problem;
 
+import coilwright.spring.AngularRate;
 import coilwright.spring.Method;
 import coilwright.spring.TorquePoint;
 import java.util.ArrayList;
@@ -15,12 +16,6 @@ import java.util.OptionalDouble;
  * @param method whose formulas apply
  */
 record TorsionReader(Blocks blocks, MaterialIds ids, Method method) {
-
-  /** c of the rate per turn in handbooks: friction makes measured rates lower than theory's. */
-  private static final double HANDBOOK_CONSTANT = 10.8;
-
-  /** c of the rate per turn without friction. */
-  private static final double THEORY_CONSTANT = 64 / (2 * Math.PI);
 
   /**
    * Reads it.
@@ -66,7 +61,7 @@ record TorsionReader(Blocks blocks, MaterialIds ids, Method method) {
   }
 
   private double rateConstant() {
-    double usual = method == Method.EN_13906 ? THEORY_CONSTANT : HANDBOOK_CONSTANT;
+    double usual = method == Method.EN_13906 ? AngularRate.FRICTIONLESS : AngularRate.HANDBOOK;
     return blocks.limits().flatMap(section -> section.read(LimitKeys.RATE_CONSTANT)).orElse(usual);
   }
 

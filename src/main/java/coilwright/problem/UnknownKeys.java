@@ -39,7 +39,8 @@ final class UnknownKeys {
     if (!others.isEmpty()) {
       String kinds = String.join(" and ", others.stream().map(Kind::id).toList());
       spot.fault(
-          "a key of " + kinds + " springs", "must be left out of a " + spot.kind().id() + " file");
+          "a key of " + kinds + " springs",
+          "must be left out of " + Starter.article(spot.kind()) + spot.kind().id() + " file");
       return Optional.empty();
     }
     Optional<String> nearest = spot.nearest(key, known);

@@ -17,7 +17,7 @@ enum BeyondSchema {
   /** Of the range of a quantity, or of a number in quotes, the schema knows the sign only. */
   SIZE_OF_A_QUANTITY(
       ": [0-9.e+-]+ ?[^ ;]*(, too (large|small) a number; |; must be at (most|least) [0-9.]+ [^ ,]+$)"
-          + "|: [1-9][^;]*; must be above .* and (at most|below) "
+          + "|: [0-9][^;]*; must be (above|at least) .* and (at most|below) "
           + "|: [0-9e]+; must be at most [0-9]+$"
           + "|, outside what a spring wire can have; "),
 
@@ -39,7 +39,9 @@ enum BeyondSchema {
   /** What must be given because of what else is given, or of what the file is for. */
   PRESENCE_BY_OTHER_KEYS(
       ": missing; needed with|: given beside make|: a design block; |^design .*: missing;"
-          + "|: the facts do not fix the load line;|: no force to go with it|; must be given; leaving it to");
+          + "|: the facts do not fix the load line;|: no (force|torque|angle) to go with it|; must be given; leaving it to"
+          + "|: given beside (loop_planes|legs)| beside (one load|loop_planes)|with every length left open"
+          + "|; must be left out, or go with make|; must be left out: it follows");
 
   private final Pattern words;
 

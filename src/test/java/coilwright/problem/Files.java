@@ -32,6 +32,24 @@ final class Files {
         ends: squared-ground
       """;
 
+  /** Four lines that make a valid problem of an extension spring. */
+  static final String EXTENSION =
+      """
+      spring: extension
+      loads:
+        - {length: 50 mm, force: 18 N}
+        - {length: 65 mm, force: 45 N}
+      """;
+
+  /** Four lines that make a valid problem of a torsion spring. */
+  static final String TORSION =
+      """
+      spring: torsion
+      loads:
+        - {angle: 30 deg, torque: 150 N*mm}
+        - {angle: 120 deg, torque: 600 N*mm}
+      """;
+
   static final Catalogue CATALOGUE = Catalogue.load();
 
   private Files() {}
