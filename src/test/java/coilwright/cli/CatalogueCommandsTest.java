@@ -163,6 +163,8 @@ class CatalogueCommandsTest {
         .isEqualTo("array");
     assertThat(Run.of("starter", "compression", "--schema").found(Status.FOUND).out())
         .isEqualTo(run.out());
-    Run.of("starter", "torsion", "--schema").refused("KIND: \"torsion\"");
+    assertThat(Run.of("starter", "torsion", "--schema").found(Status.FOUND).out())
+        .isEqualTo(run.out());
+    Run.of("starter", "leaf", "--schema").refused("KIND: \"leaf\"");
   }
 }
