@@ -46,10 +46,25 @@ record Clearance(Envelope space) {
    * @return coil counts [-]; none where the clearance is given
    */
   double[] steps(double meanDiameter, double wireDiameter, DoubleUnaryOperator coilsAt) {
-    if (!space.clearanceAssumed()) {
-      return new double[0];
-    }
-    double[] diameters = CoilTolerance.stepsNear(meanDiameter, wireDiameter);
+    return space.clearanceAssumed()
+        ? besides(CoilTolerance.stepsNear(meanDiameter, wireDiameter), coilsAt)
+        : new double[0];
+  }
+
+  /**
+   * The same between two diameters, of a clearance that is assumed.
+   *
+   * @param from D at which the coil just clears the rod by nothing [mm]
+   * @param to D at which it does by the greatest tolerance [mm]
+   * @param wireDiameter d [mm]
+   * @param coilsAt the coil count of a mean diameter
+   * @return coil counts [-]
+   */
+  double[] stepsBetween(double from, double to, double wireDiameter, DoubleUnaryOperator coilsAt) {
+    return besides(CoilTolerance.stepsBetween(from, to, wireDiameter), coilsAt);
+  }
+
+  private static double[] besides(double[] diameters, DoubleUnaryOperator coilsAt) {
     double[] turns = new double[2 * diameters.length];
     for (int i = 0; i < diameters.length; i++) {
       double coils = coilsAt.applyAsDouble(diameters[i]);

@@ -1,28 +1,20 @@
 package coilwright.limit;
 
-import coilwright.problem.Band;
 import coilwright.problem.DesignLimits;
 import coilwright.problem.LegsAsked;
 import coilwright.problem.LimitName;
 import coilwright.problem.Problem;
 import coilwright.problem.TorsionAsked;
-import coilwright.source.Citation;
-import coilwright.source.Source;
 import coilwright.spring.TorquePoint;
 import coilwright.spring.TorsionState;
-import coilwright.unit.Dimension;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import java.util.OptionalDouble;
-import java.util.function.ToDoubleFunction;
 
 /** The limits that a problem sets for torsion springs, in the order of their names. */
 public final class TorsionLimits {
 
   private static final DesignLimits USUAL = DesignLimits.DEFAULTS;
-  private static final Citation GIVEN = Citation.seen(Source.PROBLEM_FILE, "limits");
-  private static final Citation PRACTICE = Citation.seen(Source.COMMON_PRACTICE, "");
 
   private final List<Limit<TorsionState>> limits = new ArrayList<>();
 
@@ -56,40 +48,20 @@ public final class TorsionLimits {
   }
 
   private void proportions(DesignLimits asked) {
-    band(
+    Bands<TorsionState> bands = new Bands<>();
+    bands.band(
         LimitName.SPRING_INDEX,
         asked.springIndex(),
         USUAL.springIndex(),
         "mean diameter over wire diameter, free state",
         state -> state.spring().springIndex());
-    band(
+    bands.band(
         LimitName.ACTIVE_COILS,
         asked.activeCoils(),
         USUAL.activeCoils(),
         "coils of the body, free state",
         TorsionState::coils);
-  }
-
-  private void band(
-      LimitName name,
-      Band band,
-      Band usual,
-      String definition,
-      ToDoubleFunction<TorsionState> value) {
-    bound(new Check(name, Side.MIN, Dimension.NUMBER, definition), value, band.min(), usual.min());
-    bound(new Check(name, Side.MAX, Dimension.NUMBER, definition), value, band.max(), usual.max());
-  }
-
-  private void bound(
-      Check check,
-      ToDoubleFunction<TorsionState> value,
-      OptionalDouble bound,
-      OptionalDouble usual) {
-    if (bound.isPresent()) {
-      boolean straight = check.limit() == LimitName.ACTIVE_COILS;
-      Citation source = bound.equals(usual) ? PRACTICE : GIVEN;
-      limits.add(ValueLimit.fixed(check, value, bound.getAsDouble(), source, straight));
-    }
+    limits.addAll(bands.limits());
   }
 
   private void stress(TorsionAsked asked, BendingBasis basis) {

@@ -2,8 +2,6 @@ package coilwright.limit;
 
 import coilwright.problem.Envelope;
 import coilwright.problem.LimitName;
-import coilwright.source.Citation;
-import coilwright.source.Source;
 import coilwright.spring.CoilTolerance;
 import coilwright.spring.Family;
 import coilwright.spring.TorsionState;
@@ -21,16 +19,13 @@ import java.util.function.ToDoubleFunction;
  */
 final class TorsionSpace {
 
-  private static final Citation ASKED = Citation.seen(Source.PROBLEM_FILE, "envelope");
-  private static final double JUST = 1e-9;
-
-  private final Envelope space;
+  private final Clearance clearance;
   private final boolean closing;
   private final String covered;
   private final List<Limit<TorsionState>> limits = new ArrayList<>();
 
   private TorsionSpace(Envelope space, boolean closing, String covered) {
-    this.space = space;
+    this.clearance = new Clearance(space);
     this.closing = closing;
     this.covered = covered;
   }
@@ -78,7 +73,7 @@ final class TorsionSpace {
       LimitName name, Side side, ToDoubleFunction<TorsionState> value, OptionalDouble bound) {
     if (bound.isPresent()) {
       Check check = new Check(name, side, Dimension.LENGTH, "nominal, free state");
-      limits.add(ValueLimit.fixed(check, value, bound.getAsDouble(), ASKED, false));
+      limits.add(ValueLimit.fixed(check, value, bound.getAsDouble(), Clearance.ASKED, false));
     }
   }
 
@@ -90,10 +85,10 @@ final class TorsionSpace {
                 LimitName.BORE,
                 Side.MAX,
                 Dimension.LENGTH,
-                "outside diameter, " + when + covered + ", against bore less " + clearance()),
+                "outside diameter, " + when + covered + ", against bore less " + clearance.words()),
             TorsionState::greatestOutsideDiameter,
             state -> bore - clearance(state),
-            closing ? clearanceSource() : WoundBody.DIAMETER,
+            closing ? clearance.source() : WoundBody.DIAMETER,
             false));
   }
 
@@ -105,12 +100,12 @@ final class TorsionSpace {
                 LimitName.ARBOR,
                 Side.MIN,
                 Dimension.LENGTH,
-                "inside diameter, " + when + covered + ", against rod plus " + clearance()),
+                "inside diameter, " + when + covered + ", against rod plus " + clearance.words()),
             TorsionState::leastInsideDiameter,
             state -> rod + clearance(state),
-            closing ? WoundBody.DIAMETER : clearanceSource(),
+            closing ? WoundBody.DIAMETER : clearance.source(),
             false,
-            family -> space.clearanceAssumed() ? steps(family, rod) : new double[0]));
+            family -> steps(family, rod)));
   }
 
   private void bodyLength(double greatest) {
@@ -127,44 +122,23 @@ final class TorsionSpace {
             true));
   }
 
-  private String clearance() {
-    return space.clearanceAssumed()
-        ? "the coil diameter tolerance of EN 15800 grade 2, assumed"
-        : "clearance";
-  }
-
-  private Citation clearanceSource() {
-    return space.clearanceAssumed() ? CoilTolerance.citation() : ASKED;
-  }
-
   private double clearance(TorsionState state) {
-    return space
-        .diametralClearance()
-        .orElseGet(
-            () -> CoilTolerance.of(state.spring().meanDiameter(), state.spring().wireDiameter()));
+    return clearance.of(state.spring().meanDiameter(), state.spring().wireDiameter());
   }
 
-  /**
-   * Where the tolerance steps up between the diameter at which the coil just clears the rod without
-   * any and that at which it does with the greatest: on both sides of each step, since there a
-   * wider coil may clear less.
-   */
+  /** A wound-up coil clears the rod by some tolerance where it is wider by as much. */
   private double[] steps(Family<TorsionState> family, double rod) {
+    if (!clearance.space().clearanceAssumed()) {
+      return new double[0];
+    }
     TorsionState end = family.at(family.mostCoils());
     double clears = rod + end.coatedDiameter();
-    double[] diameters =
-        CoilTolerance.stepsBetween(
-            free(end, clears),
-            free(end, clears + CoilTolerance.greatest()),
-            end.spring().wireDiameter());
     double same = end.spring().meanDiameter() * end.coils();
-    double[] turns = new double[2 * diameters.length];
-    for (int i = 0; i < diameters.length; i++) {
-      double coils = same / diameters[i];
-      turns[2 * i] = coils * (1 - JUST);
-      turns[2 * i + 1] = coils * (1 + JUST);
-    }
-    return turns;
+    return clearance.stepsBetween(
+        free(end, clears),
+        free(end, clears + CoilTolerance.greatest()),
+        end.spring().wireDiameter(),
+        meanDiameter -> same / meanDiameter);
   }
 
   /**
