@@ -20,6 +20,12 @@ public final class Order {
    */
   private static final double ALIKE = 0.01;
 
+  /**
+   * Stress margins no farther apart than this are the same: rounding a diameter moves a torque by
+   * little less [-].
+   */
+  private static final double SAME = 0.005;
+
   private Order() {}
 
   /**
@@ -30,18 +36,22 @@ public final class Order {
    * @return the comparator, best first
    */
   public static <S extends State> Comparator<Candidate<S>> by(RankBy by) {
-    ToDoubleFunction<Candidate<S>> merit =
-        switch (by) {
-          case MASS -> candidate -> candidate.state().mass();
-          case MARGIN -> candidate -> -candidate.leastMargin().orElse(0);
-          case COST -> candidate -> Cost.of(candidate.state()).total();
-          case ROBUST -> candidate -> -candidate.limiting().map(Finding::margin).orElse(0.0);
-        };
+    ToDoubleFunction<Candidate<S>> merit = merit(by);
     return Comparator.comparingDouble(merit)
         .thenComparing(candidate -> candidate.state().wire().grade().id())
         .thenComparingDouble(candidate -> candidate.state().wire().diameter())
         .thenComparing(candidate -> candidate.state().endForm())
         .thenComparingDouble(candidate -> candidate.state().coils());
+  }
+
+  /** What is to be least. */
+  private static <S extends State> ToDoubleFunction<Candidate<S>> merit(RankBy by) {
+    return switch (by) {
+      case MASS -> candidate -> candidate.state().mass();
+      case MARGIN -> candidate -> -candidate.leastMargin().orElse(0);
+      case COST -> candidate -> Cost.of(candidate.state()).total();
+      case ROBUST -> candidate -> -candidate.limiting().map(Finding::margin).orElse(0.0);
+    };
   }
 
   /**
@@ -70,7 +80,8 @@ public final class Order {
 
   /**
    * The best spring of one wire. Where mass hardly varies along its counts, those that weigh or
-   * cost alike but for rounding are told apart by their stress margin.
+   * cost alike but for rounding are told apart by their stress margin, and where that is the same
+   * at all counts, by the margin of the limiting check.
    */
   private static <S extends State> Candidate<S> best(
       List<Candidate<S>> wire, RankBy by, Comparator<Candidate<S>> order) {
@@ -82,6 +93,9 @@ public final class Order {
     double most = best.state().mass() * (1 + ALIKE);
     List<Candidate<S>> alike = new ArrayList<>(wire);
     alike.removeIf(candidate -> candidate.state().mass() > most);
-    return Collections.min(alike, by(RankBy.MARGIN));
+    Candidate<S> strongest = Collections.min(alike, by(RankBy.MARGIN));
+    double margin = strongest.leastMargin().orElse(0);
+    alike.removeIf(candidate -> candidate.leastMargin().orElse(0) < margin - SAME);
+    return Collections.min(alike, by(RankBy.ROBUST));
   }
 }

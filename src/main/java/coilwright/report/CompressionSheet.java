@@ -179,7 +179,7 @@ final class CompressionSheet implements Sheet<CompressionState> {
   }
 
   @Override
-  public boolean roundsLength() {
+  public boolean roundsLength(Problem problem) {
     return true;
   }
 

@@ -2,6 +2,7 @@ package coilwright.report;
 
 import coilwright.problem.Design;
 import coilwright.problem.ExtensionAsked;
+import coilwright.problem.HookLength;
 import coilwright.problem.Problem;
 import coilwright.search.ExtensionSearch;
 import coilwright.search.Synthesis;
@@ -138,8 +139,8 @@ final class ExtensionSheet implements Sheet<ExtensionState> {
   }
 
   @Override
-  public boolean roundsLength() {
-    return true;
+  public boolean roundsLength(Problem problem) {
+    return asked(problem).hooks().length().rule() == HookLength.Rule.FREE;
   }
 
   @Override

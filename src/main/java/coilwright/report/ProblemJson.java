@@ -86,7 +86,7 @@ final class ProblemJson implements Json.Part {
     coating(json, make.coating());
     json.number("coil_step", make.coilStep());
     json.number("diameter_step_mm", make.rounding().diameterStep());
-    if (sheet.roundsLength()) {
+    if (sheet.roundsLength(problem)) {
       json.number("length_step_mm", make.rounding().lengthStep());
     }
   }

@@ -65,8 +65,11 @@ public interface Sheet<S extends State> {
   /** Adds how the ends may be made. */
   void understandEnds(Understood words);
 
-  /** Whether a list rounds the free length. */
-  boolean roundsLength();
+  /** Adds what is asked of a spring to check beside the loads, the space and the limits. */
+  default void understandDesign(Understood words) {}
+
+  /** Whether a list rounds the free length to its step. */
+  boolean roundsLength(Problem problem);
 
   /** Adds how it is held, and the limits. */
   void understandLimits(Understood words);

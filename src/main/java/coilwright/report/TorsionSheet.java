@@ -136,7 +136,12 @@ final class TorsionSheet implements Sheet<TorsionState> {
   }
 
   @Override
-  public boolean roundsLength() {
+  public void understandDesign(Understood words) {
+    new TorsionWords(words).legAngle();
+  }
+
+  @Override
+  public boolean roundsLength(Problem problem) {
     return false;
   }
 

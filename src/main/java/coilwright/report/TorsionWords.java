@@ -7,6 +7,7 @@ import coilwright.problem.Tolerance;
 import coilwright.problem.TorqueAsked;
 import coilwright.problem.TorqueLine;
 import coilwright.problem.TorsionAsked;
+import coilwright.problem.TorsionDesign;
 import coilwright.unit.Dimension;
 import java.util.ArrayList;
 import java.util.List;
@@ -77,6 +78,13 @@ final class TorsionWords {
             + (legs.angle().isPresent()
                 ? ", " + angle(legs.angle().getAsDouble()) + " apart at load " + legs.atLoad()
                 : ", at any angle"));
+  }
+
+  /** Adds the angle asked between the legs of a spring to check. */
+  void legAngle() {
+    LegsAsked legs = ((TorsionDesign) problem.design().orElseThrow()).legs();
+    legs.angle()
+        .ifPresent(at -> words.row("legs", angle(at) + " apart asked at load " + legs.atLoad()));
   }
 
   /** Adds the limits. */

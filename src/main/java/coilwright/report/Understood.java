@@ -6,6 +6,7 @@ import coilwright.material.WireSize;
 import coilwright.problem.Envelope;
 import coilwright.problem.Make;
 import coilwright.problem.Problem;
+import coilwright.search.CoilStep;
 import coilwright.spring.Rounding;
 import coilwright.unit.Dimension;
 import java.util.ArrayList;
@@ -41,10 +42,12 @@ final class Understood {
     if (problem.design().isEmpty()) {
       words.make(problem.make());
       sheet.understandEnds(words);
+    } else {
+      sheet.understandDesign(words);
     }
     words.treatment();
     if (problem.design().isEmpty()) {
-      words.steps(problem.make(), sheet.roundsLength());
+      words.steps(sheet);
     }
     sheet.understandLimits(words);
     return words.table.text("  ");
@@ -129,14 +132,17 @@ final class Understood {
     }
   }
 
-  private void steps(Make make, boolean length) {
+  private void steps(Sheet<?> sheet) {
+    Make make = problem.make();
+    CoilStep step = sheet.synthesis().step(problem);
     table.row(
         "steps",
         "coils "
-            + Numbers.brief(make.coilStep(), 6)
+            + Numbers.brief(step.size(), 6)
+            + (step.offset() > 0 ? " and " + Numbers.brief(step.offset(), 4) + " over" : "")
             + ", mean diameter "
             + step(make.rounding().diameterStep(), make.rounding().smallDiameterStep())
-            + (length
+            + (sheet.roundsLength(problem)
                 ? ", free length "
                     + step(make.rounding().lengthStep(), make.rounding().smallLengthStep())
                 : ""));

@@ -53,6 +53,11 @@ public final class CoilStep {
     return size;
   }
 
+  /** How far the counts lie beyond its multiples [-]. */
+  public double offset() {
+    return offset;
+  }
+
   /**
    * The practical counts in a set, its bounds included.
    *
