@@ -8,6 +8,15 @@ import java.util.List;
 /** The keys about the straight line of torque against angle, of torsion springs. */
 final class TorqueKeys {
 
+  static final ProblemKey<Double> ANGLE =
+      of(
+          "loads[].angle",
+          Values.quantity(Dimension.ANGLE, Range.ANY),
+          "",
+          "angle under the load, counted in the winding direction from any one reference",
+          "30 deg",
+          "120 deg");
+
   static final ProblemKey<Double> TORQUE =
       of(
           "loads[].torque",
@@ -28,15 +37,6 @@ final class TorqueKeys {
 
   static final ProblemKey<Double> ARM =
       of("loads[].arm", Values.length(), "torque is given", "arm at which the force acts", "20 mm");
-
-  static final ProblemKey<Double> ANGLE =
-      of(
-          "loads[].angle",
-          Values.quantity(Dimension.ANGLE, Range.ANY),
-          "",
-          "angle under the load, counted in the winding direction from any one reference",
-          "30 deg",
-          "120 deg");
 
   static final ProblemKey<ToleranceAsked> TOLERANCE =
       of(
@@ -97,7 +97,7 @@ final class TorqueKeys {
 
   /** All of them. */
   static final List<ProblemKey<?>> ROWS =
-      List.of(TORQUE, FORCE, ARM, ANGLE, TOLERANCE, PLUS, MINUS, LOADING, RATE, FREE_ANGLE, STROKE);
+      List.of(ANGLE, TORQUE, FORCE, ARM, TOLERANCE, PLUS, MINUS, LOADING, RATE, FREE_ANGLE, STROKE);
 
   private TorqueKeys() {}
 

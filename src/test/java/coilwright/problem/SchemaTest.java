@@ -52,6 +52,10 @@ class SchemaTest {
             Files.LOADS,
             Files.DESIGN,
             FullFileTest.FULL,
+            ExtensionFileTest.FULL,
+            TorsionFileTest.FULL,
+            Files.EXTENSION,
+            Files.TORSION,
             Starter.of(Kind.COMPRESSION),
             Starter.of(Kind.EXTENSION),
             Starter.of(Kind.TORSION))) {

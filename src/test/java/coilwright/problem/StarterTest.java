@@ -1,6 +1,7 @@
 package coilwright.problem;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.within;
 
 import coilwright.spring.Kind;
 import java.util.ArrayList;
@@ -8,18 +9,19 @@ import java.util.List;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.EnumSource;
 import org.junit.jupiter.params.provider.MethodSource;
 
-/** The starter file: valid as it stands, with every key, and each key may be put to use. */
+/** The starter files: valid as they stand, with every key, and each key may be put to use. */
 class StarterTest {
 
   private static final String STARTER = Starter.of(Kind.COMPRESSION);
 
-  private static final List<ProblemKey<?>> ROWS =
-      KeyTable.ROWS.stream().filter(key -> key.kinds().contains(Kind.COMPRESSION)).toList();
-
   /** A key behind a "# " of its own, in a block that may be behind another. */
   private static final String OFF = "(?s)((?:# )?[ -]*)# ([a-z_]+: .*)";
+
+  /** Keys that exclude each other stand no farther apart than this [lines]. */
+  private static final int NEAR = 2;
 
   @Test
   void isAValidProblem() {
@@ -32,61 +34,83 @@ class StarterTest {
   }
 
   @Test
-  void isValidWithItsBlocksInUse() {
-    assertThat(Files.problem(using("own_materials")).ownMaterials()).hasSize(3);
-    assertThat(Files.checked(using("design")).design()).isPresent();
+  void isAValidProblemOfTheOtherKinds() {
+    TensionLine tension =
+        Files.problem(Starter.of(Kind.EXTENSION)).extension().orElseThrow().line().orElseThrow();
+    assertThat(tension.rate()).isCloseTo(1.8, within(1e-12));
+    TorqueLine torque =
+        Files.problem(Starter.of(Kind.TORSION)).torsion().orElseThrow().line().orElseThrow();
+    assertThat(torque.rate() * Math.PI / 180).isCloseTo(5, within(1e-12));
+    assertThat(torque.freeAngle().orElseThrow()).isCloseTo(0, within(1e-12));
   }
 
-  @Test
-  void isValidWithEveryKeyInUse() {
-    Problem problem = Files.problem(allOf(using("own_materials")));
+  @ParameterizedTest
+  @EnumSource(Kind.class)
+  void isValidWithItsBlocksInUse(Kind kind) {
+    assertThat(Files.problem(using(kind, "own_materials")).ownMaterials()).hasSize(3);
+    assertThat(Files.checked(using(kind, "design")).design()).isPresent();
+  }
+
+  @ParameterizedTest
+  @EnumSource(Kind.class)
+  void isValidWithEveryKeyInUse(Kind kind) {
+    Problem problem = Files.problem(allOf(using(kind, "own_materials")));
+    assertThat(problem.kind()).isEqualTo(kind);
     assertThat(problem.make().wireSizes()).isEmpty();
     assertThat(problem.envelope().guides()).isTrue();
     assertThat(problem.ownMaterials().get(0).density()).isEqualTo(7850);
-    assertThat(Files.checked(allOf(using("design"))).design()).isPresent();
+    String design =
+        using(kind, "design").replaceFirst("(?m)^# free_length: .*inside the hooks.*\n", "");
+    assertThat(Files.checked(allOf(design)).design()).isPresent();
   }
 
-  @ParameterizedTest(name = "line {1}")
+  @ParameterizedTest(name = "{0}, line {2}")
   @MethodSource("linesOff")
-  void isValidWithAnyLineInUse(String text, int line) {
+  void isValidWithAnyLineInUse(Kind kind, String text, int line) {
     assertThat(Files.faults(Files.read(withLine(text, line), purpose(text)))).isEmpty();
   }
 
   static Stream<Object[]> linesOff() {
     List<Object[]> cases = new ArrayList<>();
-    for (String text : List.of(STARTER, using("own_materials"), using("design"))) {
-      List<String> lines = text.lines().toList();
-      for (int line = 0; line < lines.size(); line++) {
-        if (lines.get(line).matches(OFF) && !lines.get(line).startsWith("#   ")) {
-          cases.add(new Object[] {text, line});
+    for (Kind kind : Kind.values()) {
+      for (String text :
+          List.of(Starter.of(kind), using(kind, "own_materials"), using(kind, "design"))) {
+        List<String> lines = text.lines().toList();
+        for (int line = 0; line < lines.size(); line++) {
+          boolean off = lines.get(line).matches(OFF) && !lines.get(line).startsWith("#   ");
+          if (off && !lines.get(line).contains("only where make.hook_length is free")) {
+            cases.add(new Object[] {kind, text, line});
+          }
         }
       }
     }
-    assertThat(cases).hasSizeGreaterThan(100);
+    assertThat(cases).hasSizeGreaterThan(300);
     return cases.stream();
   }
 
-  @Test
-  void showsEveryKeyAndItsMeaningOnce() {
-    for (ProblemKey<?> key : ROWS) {
-      assertThat(STARTER).as(key.path()).containsPattern("[ {]" + key.name() + ":|\n" + key.name());
-      if (!key.examples().isEmpty()
-          && KeyTable.children(Kind.COMPRESSION, key.parent()).contains(key)) {
-        assertThat(STARTER).contains(key.examples());
+  @ParameterizedTest
+  @EnumSource(Kind.class)
+  void showsEveryKeyAndItsMeaningOnce(Kind kind) {
+    String text = Starter.of(kind);
+    for (ProblemKey<?> key : rows(kind)) {
+      assertThat(text).as(key.path()).containsPattern("[ {]" + key.name() + ":|\n" + key.name());
+      if (!key.examples().isEmpty() && KeyTable.children(kind, key.parent()).contains(key)) {
+        assertThat(text).contains(key.examples());
       }
     }
-    for (String name : KeyTable.names(Kind.COMPRESSION, "")) {
-      assertThat(STARTER.split("(?m)^(# )?" + name + ":")).as(name).hasSize(2);
+    for (String name : KeyTable.names(kind, "")) {
+      assertThat(text.split("(?m)^(# )?" + name + ":")).as(name).hasSize(2);
     }
   }
 
-  @Test
-  void explainsEachKeyThatHasALineOfItsOwn() {
-    for (ProblemKey<?> key : ROWS) {
+  @ParameterizedTest
+  @EnumSource(Kind.class)
+  void explainsEachKeyThatHasALineOfItsOwn(Kind kind) {
+    for (ProblemKey<?> key : rows(kind)) {
       boolean inside = key.path().matches(".*(tolerance|strength|modulus)(\\[\\])?\\..*");
-      boolean bound = ROWS.stream().anyMatch(row -> isValueOf(row, key));
+      boolean bound = rows(kind).stream().anyMatch(row -> isValueOf(row, key));
       if (!inside && !bound) {
-        assertThat(STARTER).as(key.path()).contains("# " + key.help());
+        assertThat(Starter.of(kind)).as(key.path()).contains("# " + key.help());
       }
     }
   }
@@ -96,10 +120,17 @@ class StarterTest {
     return row.path().equals(key.parent()) && !row.examples().isEmpty();
   }
 
-  @Test
-  void isPlainAsciiWithinReason() {
-    assertThat(STARTER).matches("(?s)[\\x20-\\x7E\\n]*");
-    assertThat(STARTER.lines()).allMatch(line -> line.length() <= 170);
+  @ParameterizedTest
+  @EnumSource(Kind.class)
+  void isPlainAsciiWithinReason(Kind kind) {
+    assertThat(Starter.of(kind)).matches("(?s)[\\x20-\\x7E\\n]*");
+    assertThat(Starter.of(kind).lines()).allMatch(line -> line.length() <= 190);
+  }
+
+  private static List<ProblemKey<?>> rows(Kind kind) {
+    List<ProblemKey<?>> rows = new ArrayList<>(KeyTable.ROWS);
+    rows.removeIf(key -> !key.kinds().contains(kind));
+    return rows;
   }
 
   private static Purpose purpose(String text) {
@@ -107,9 +138,9 @@ class StarterTest {
   }
 
   /** The starter with a block that is left out put to use; design in the place of make. */
-  private static String using(String block) {
+  private static String using(Kind kind, String block) {
     StringBuilder text = new StringBuilder();
-    for (String part : STARTER.split("(?<=\n)\n")) {
+    for (String part : Starter.of(kind).split("(?<=\n)\n")) {
       boolean wanted = part.startsWith("# " + block + ":");
       if (!block.equals("design") || !part.startsWith("make:")) {
         text.append(wanted ? part.replaceAll("(?m)^# ", "") : part).append('\n');
@@ -118,23 +149,29 @@ class StarterTest {
     return text.toString();
   }
 
-  /** The text with one line put to use, and what excludes its key left out. */
+  /** The text with one line put to use, what it needs too, and what excludes it left out. */
   private static String withLine(String text, int line) {
     String[] lines = text.split("\n");
     lines[line] = lines[line].replaceFirst(OFF, "$1$2");
-    String name = lines[line].strip().replaceFirst(":.*", "");
+    String name = lines[line].strip().replaceFirst("^- ", "").replaceFirst(":.*", "");
+    String partner = name.equals("force") ? "arm" : name.equals("arm") ? "force" : "-";
+    int next = name.equals("force") ? line + 1 : line - 1;
+    if (lines[next].strip().startsWith("# " + partner + ":")) {
+      lines[next] = lines[next].replaceFirst(OFF, "$1$2");
+    }
     for (Alternatives some : Alternatives.ALL) {
       List<String> names = some.keys().stream().<String>map(ProblemKey::name).toList();
       for (int i = 0; i < lines.length; i++) {
         String other = lines[i].strip().replaceFirst(":.*", "");
         boolean excluded = some.exclusive() && names.contains(name) && names.contains(other);
-        lines[i] = excluded && i != line && !name.equals(other) ? "" : lines[i];
+        boolean near = Math.abs(i - line) <= NEAR;
+        lines[i] = excluded && near && !name.equals(other) ? "" : lines[i];
       }
     }
     return String.join("\n", lines) + "\n";
   }
 
-  /** The text with every line put to use but those that exclude one before them. */
+  /** The text with every line put to use but those that something else excludes. */
   private static String allOf(String text) {
     StringBuilder all = new StringBuilder();
     for (String line : text.split("\n")) {
@@ -145,6 +182,7 @@ class StarterTest {
               .filter(Alternatives::exclusive)
               .flatMap(some -> some.keys().stream().skip(1))
               .anyMatch(key -> key.name().equals(name));
+      instead |= name.equals("coil_step") && text.contains("legs: {");
       all.append(off && !instead ? line.replaceFirst(OFF, "$1$2") : line).append('\n');
     }
     return all.toString();
