@@ -1,6 +1,8 @@
 package coilwright.spring;
 
 import coilwright.material.Wire;
+import coilwright.source.Citation;
+import coilwright.source.Source;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
@@ -11,8 +13,12 @@ import java.util.OptionalDouble;
  */
 public final class TorsionState implements State {
 
-  /** Fewer body coils than this have friction and ends tell more than the body [-]. */
+  /** Below this many body coils friction and ends tell more than the body [-]. */
   public static final double FEW_COILS = 3;
+
+  /** Where they are taken from. */
+  public static final Citation FEW_COILS_SOURCE =
+      Citation.seen(Source.EN_13906_3, "scope, at least 3 active coils");
 
   private final TorsionSpring spring;
   private final TorsionDuty duty;

@@ -9,7 +9,7 @@ public final class WoundBody {
 
   /** Where the change of the diameter was seen. */
   public static final Citation DIAMETER =
-      Citation.seen(Source.MACHINERYS_HANDBOOK, "torsion springs, inside diameter under load");
+      Citation.seen(Source.MOTT, "chapter 19, mean diameter of a torsion spring at its load");
 
   /** Where the length was seen. */
   public static final Citation LENGTH =
@@ -19,7 +19,8 @@ public final class WoundBody {
 
   /**
    * Mean diameter after turning, D nb / (nb + turns): the wire stays as long as it is. A body
-   * unwound by as many turns as it has is a coil no more.
+   * unwound by as many turns as it has is a coil no more. Machinery's Handbook puts the inside
+   * diameter in place of D, which leaves more room by d turns / (nb + turns).
    *
    * @param meanDiameter D when free [mm]
    * @param bodyCoils nb when free [-]

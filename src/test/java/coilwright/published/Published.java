@@ -154,6 +154,20 @@ public record Published(PublishedFile file, Map<String, String> cells) {
     DEFLECTION,
     /** Stress. */
     STRESS,
+    /** Angular rate. */
+    RATE,
+    /** Torque. */
+    TORQUE,
+    /** Turns of one leg against the other, or of the body. */
+    TURNS,
+    /** Constant of a rate. */
+    CONSTANT,
+    /** Whose constant. */
+    BASIS,
+    /** Coils of the body of a torsion spring. */
+    BODY_COILS,
+    /** Length of both legs. */
+    LEGS,
     /** First natural frequency. */
     FREQUENCY,
     /** Mass. */

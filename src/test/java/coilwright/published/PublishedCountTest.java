@@ -24,6 +24,7 @@ class PublishedCountTest {
   private static final int OF_EACH_GROUP = 5;
   private static final int ALTOGETHER = 120;
   private static final int OF_THE_MECHANICS = 30;
+  private static final int OF_TORSION_SPRINGS = 25;
   private static final int OF_ONE_TABLE = 20;
   private static final int PUBLICATIONS = 10;
 
@@ -32,6 +33,15 @@ class PublishedCountTest {
 
   private static final List<String> MECHANICS =
       List.of("rate", "stress factors", "stress", "solid length and pitch", "buckling");
+
+  /** Torsion springs; that few values were seen of each law is made up for by second methods. */
+  private static final List<String> TORSION =
+      List.of(
+          "angular rate",
+          "torsion body",
+          "bending stress",
+          "bending allowables",
+          "torsion coil tolerance");
 
   private static final List<String> GROUPS =
       Stream.concat(Stream.of("strength", "moduli", "wire tables"), MECHANICS.stream()).toList();
@@ -50,6 +60,13 @@ class PublishedCountTest {
   void altogetherThereAreManySeenValues() {
     assertThat(counted(seen().filter(file -> GROUPS.contains(file.group()))))
         .isGreaterThanOrEqualTo(ALTOGETHER);
+  }
+
+  @Test
+  void torsionSpringsHaveTheirOwn() {
+    assertThat(TORSION.stream().mapToInt(PublishedCountTest::seenOf).sum())
+        .isGreaterThanOrEqualTo(OF_TORSION_SPRINGS);
+    assertThat(TORSION).allSatisfy(group -> assertThat(seenOf(group)).isPositive());
   }
 
   @Test
