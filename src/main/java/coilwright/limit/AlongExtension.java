@@ -16,6 +16,7 @@ import org.apache.commons.math3.analysis.solvers.PegasusSolver;
 final class AlongExtension {
 
   private static final double[] NONE = new double[0];
+  private static final int SAMPLES = 20;
   private static final double JUST = 1e-9;
   private static final double ACCURACY = 1e-12;
   private static final int MOST_EVALUATIONS = 200;
@@ -65,9 +66,9 @@ final class AlongExtension {
     return new double[] {curve.coilsAt(Math.sqrt(Math.sqrt(3 * cubed / (2 * share))))};
   }
 
-  /** Where initial tension beyond an end of its preferred range turns. */
+  /** Where initial tension beyond an end of its preferred range turns, but for a factor. */
   double[] turnsOfTension(boolean least) {
-    return curve.tensionChosen() ? NONE : turns(mean -> excess(mean, least));
+    return curve.tensionChosen() ? NONE : counts(turningDiameters(least));
   }
 
   /** The two sides of every count at which the initial tension leaves its range upward. */
@@ -75,21 +76,51 @@ final class AlongExtension {
     if (curve.tensionChosen()) {
       return NONE;
     }
-    DoubleUnaryOperator excess = mean -> excess(mean, false);
-    double[] turns = Extremes.between(narrowest, widest, excess);
+    double[] turns = turningDiameters(false);
     double[] beside = new double[2 * (turns.length + 1)];
     int count = 0;
     double from = narrowest;
     for (int i = 0; i <= turns.length; i++) {
       double to = i < turns.length ? turns[i] : widest;
-      if (excess.applyAsDouble(from) * excess.applyAsDouble(to) < 0) {
-        double coils = curve.coilsAt(root(excess, from, to));
+      if (excess(from, false) * excess(to, false) < 0) {
+        double coils = curve.coilsAt(root(mean -> excess(mean, false), from, to));
         beside[count++] = coils * (1 - JUST);
         beside[count++] = coils * (1 + JUST);
       }
       from = to;
     }
     return Arrays.copyOf(beside, count);
+  }
+
+  /**
+   * Mean diameters [mm] at which excess times diameter turns, rising: where its slope changes sign
+   * between samples at even ratios. It turns three times at the most.
+   */
+  private double[] turningDiameters(boolean least) {
+    double ratio = StrictMath.pow(widest / narrowest, 1.0 / SAMPLES);
+    double[] turns = new double[SAMPLES];
+    int count = 0;
+    double from = narrowest;
+    double before = slope(from, least);
+    for (int i = 0; i < SAMPLES; i++) {
+      double to = i == SAMPLES - 1 ? widest : from * ratio;
+      double after = slope(to, least);
+      if (before * after < 0) {
+        turns[count++] = root(mean -> slope(mean, least), from, to);
+      }
+      from = to;
+      before = after;
+    }
+    return Arrays.copyOf(turns, count);
+  }
+
+  /** Slope of excess times mean diameter [N] along the mean diameter [mm]. */
+  private double slope(double mean, boolean least) {
+    double d = curve.wire().diameter();
+    double stress = InitialTension.USUAL.slopeAt(mean / d, least) / d;
+    return curve.tensionAt(mean)
+        + mean * curve.tensionSlopeAt(mean)
+        - InitialTension.force(stress, 1, d);
   }
 
   private static double root(DoubleUnaryOperator value, double from, double to) {
@@ -125,10 +156,14 @@ final class AlongExtension {
 
   /** The turns of a number that the mean diameter tells, as counts of body coils. */
   double[] turns(DoubleUnaryOperator byMeanDiameter) {
-    double[] turns = Extremes.between(narrowest, widest, byMeanDiameter);
-    for (int i = 0; i < turns.length; i++) {
-      turns[i] = curve.coilsAt(turns[i]);
+    return counts(Extremes.between(narrowest, widest, byMeanDiameter));
+  }
+
+  private double[] counts(double[] meanDiameters) {
+    double[] counts = new double[meanDiameters.length];
+    for (int i = 0; i < counts.length; i++) {
+      counts[i] = curve.coilsAt(meanDiameters[i]);
     }
-    return turns;
+    return counts;
   }
 }

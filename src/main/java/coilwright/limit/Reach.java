@@ -82,7 +82,7 @@ public final class Reach {
   private static <S extends State> double[] cuts(Limit<S> limit, Trail<S> trail) {
     double low = trail.fewestCoils();
     double high = trail.mostCoils();
-    double[] turns = limit.turns(trail);
+    double[] turns = trail.turnsOf(limit);
     double[] cuts = new double[turns.length + 2];
     int count = 0;
     cuts[count++] = low;

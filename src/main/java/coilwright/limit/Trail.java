@@ -23,6 +23,8 @@ public final class Trail<S extends State> implements Family<S> {
   private final double most;
   private final List<S> states = new ArrayList<>(ROOM);
   private double[] counts = new double[ROOM];
+  private Limit<S> asked;
+  private double[] turns;
 
   /**
    * Begins a trail with the two ends of a family.
@@ -64,6 +66,21 @@ public final class Trail<S extends State> implements Family<S> {
   /** The springs computed so far, by rising coil count. */
   public List<S> states() {
     return states;
+  }
+
+  /**
+   * The counts at which a limit's margin may turn along the family; those of the limit asked last
+   * are remembered.
+   *
+   * @param limit the limit
+   * @return the counts [-], not to be changed
+   */
+  public double[] turnsOf(Limit<S> limit) {
+    if (limit != asked) {
+      asked = limit;
+      turns = limit.turns(this);
+    }
+    return turns;
   }
 
   /** Where a count already computed stands among them. */

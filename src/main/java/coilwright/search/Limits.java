@@ -152,7 +152,7 @@ record Limits(
    */
   private static <S extends State> double grazing(Limit<S> limit, Trail<S> trail) {
     double greatest = 0;
-    for (double coils : limit.turns(trail)) {
+    for (double coils : trail.turnsOf(limit)) {
       if (inRange(coils, trail) == coils) {
         S state = trail.at(coils);
         double near = SAMPLED + limit.sensitivity(state) * blur(coils, trail);

@@ -95,4 +95,15 @@ public record ExtensionCurve(
         ? preferredAt(meanDiameter)
         : rate * (freeLengthAt(meanDiameter) - zeroForceLength.getAsDouble());
   }
+
+  /** How the initial tension of given lengths changes with the mean diameter D [mm], in N/mm. */
+  public double tensionSlopeAt(double meanDiameter) {
+    double active = coilsAt(meanDiameter) + hooks.bothActive();
+    double body = -3 * active / meanDiameter * coatedDiameter();
+    return switch (fit.rule()) {
+      case NATURAL -> rate * (body + 2 * hooks.type().naturalShare());
+      case HOOK_LENGTH -> rate * body;
+      case FREE_LENGTH, PREFERRED_TENSION -> 0;
+    };
+  }
 }

@@ -15,20 +15,26 @@ public enum InitialTension {
   SHIGLEY("Shigley", Citation.remembered(Source.SHIGLEY, "equation 10-41")) {
     @Override
     double low(double c) {
-      return middle33(c) - width(c);
+      return line(c) - width(c);
     }
 
     @Override
     double high(double c) {
-      return middle33(c) + width(c);
+      return line(c) + width(c);
     }
 
-    private double middle33(double c) {
-      return 33_500 * StrictMath.exp(-0.105 * c);
+    @Override
+    double slope(double c, boolean least) {
+      double narrows = width(c) > 0 ? -PER_INDEX : 0;
+      return -DECAY * line(c) + (least ? -narrows : narrows);
+    }
+
+    private double line(double c) {
+      return 33_500 * StrictMath.exp(-DECAY * c);
     }
 
     private double width(double c) {
-      return Math.max(0, 1000 * (4 - (c - 3) / 6.5));
+      return Math.max(0, 4000 - PER_INDEX * (c - 3));
     }
   },
   /** Two cubics of the index. */
@@ -42,10 +48,23 @@ public enum InitialTension {
     double high(double c) {
       return ((-2.987 * c + 139.7) * c - 3427) * c + 38_404;
     }
+
+    @Override
+    double slope(double c, boolean least) {
+      return least
+          ? (3 * -4.231 * c + 2 * 181.5) * c - 3387
+          : (3 * -2.987 * c + 2 * 139.7) * c - 3427;
+    }
   };
 
   /** The one that decides: its range stays above zero to an index of about 28. */
   public static final InitialTension USUAL = SHIGLEY;
+
+  /** What the first relation falls by for each unit of the index. */
+  private static final double DECAY = 0.105;
+
+  /** What its range narrows by on either side, likewise [psi]. */
+  private static final double PER_INDEX = 1000 / 6.5;
 
   private static final double MPA_PER_PSI = Dimension.STRESS.unit("psi").orElseThrow().toInner(1);
 
@@ -62,6 +81,9 @@ public enum InitialTension {
 
   /** The upper line [psi]. */
   abstract double high(double c);
+
+  /** What either line rises by for each unit of the index [psi]. */
+  abstract double slope(double c, boolean least);
 
   /** Whose relation it is. */
   public String author() {
@@ -93,6 +115,17 @@ public enum InitialTension {
    */
   public double greatest(double springIndex) {
     return Math.max(0, high(Require.positive(springIndex, "spring index", "-"))) * MPA_PER_PSI;
+  }
+
+  /**
+   * How an end of the preferred range changes with the index.
+   *
+   * @param springIndex C [-]
+   * @param least whether the least is meant, else the greatest
+   * @return d tau/d C [MPa], where the end is not held at zero
+   */
+  public double slopeAt(double springIndex, boolean least) {
+    return slope(springIndex, least) * MPA_PER_PSI;
   }
 
   /**
