@@ -211,6 +211,11 @@ final class CompressionSheet implements Sheet<CompressionState> {
   }
 
   @Override
+  public void writeSetRemoved(Json json, boolean setRemoved) throws IOException {
+    json.flag("set_removed", setRemoved);
+  }
+
+  @Override
   public void writeDesign(Json json, Design design) throws IOException {
     CompressionProblemJson.design(json, design);
   }

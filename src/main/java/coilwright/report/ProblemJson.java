@@ -8,7 +8,6 @@ import coilwright.problem.Envelope;
 import coilwright.problem.Make;
 import coilwright.problem.Problem;
 import coilwright.spring.CoilTolerance;
-import coilwright.spring.Kind;
 import java.io.IOException;
 import java.util.List;
 
@@ -82,7 +81,7 @@ final class ProblemJson implements Json.Part {
     }
     sheet.writeEnds(json, problem);
     json.string("hand", make.hand().id());
-    setRemoved(json, make.setRemoved());
+    sheet.writeSetRemoved(json, make.setRemoved());
     coating(json, make.coating());
     json.number("coil_step", make.coilStep());
     json.number("diameter_step_mm", make.rounding().diameterStep());
@@ -97,15 +96,8 @@ final class ProblemJson implements Json.Part {
     json.number("mean_diameter_mm", design.meanDiameter());
     sheet.writeDesign(json, design);
     json.string("hand", design.hand().id());
-    setRemoved(json, design.setRemoved());
+    sheet.writeSetRemoved(json, design.setRemoved());
     coating(json, design.coating());
-  }
-
-  /** Only a compression spring can be pressed solid. */
-  private void setRemoved(Json json, boolean setRemoved) throws IOException {
-    if (problem.kind() == Kind.COMPRESSION) {
-      json.flag("set_removed", setRemoved);
-    }
   }
 
   private static void coating(Json json, double thickness) throws IOException {

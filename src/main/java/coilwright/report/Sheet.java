@@ -89,6 +89,9 @@ public interface Sheet<S extends State> {
   /** Writes how the ends may be made. */
   void writeEnds(Json json, Problem problem) throws IOException;
 
+  /** Writes whether it is pressed solid once before use, where it can be. */
+  default void writeSetRemoved(Json json, boolean setRemoved) throws IOException {}
+
   /** Writes what of a checked spring is not common to all kinds. */
   void writeDesign(Json json, Design design) throws IOException;
 

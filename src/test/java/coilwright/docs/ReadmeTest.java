@@ -36,8 +36,8 @@ class ReadmeTest {
   }
 
   @Test
-  void itHasAtMostSixCommandLines() throws IOException {
-    assertThat(commands()).hasSizeBetween(1, 6);
+  void itHasAtMostEightCommandLines() throws IOException {
+    assertThat(commands()).hasSizeBetween(1, 8);
   }
 
   @ParameterizedTest
