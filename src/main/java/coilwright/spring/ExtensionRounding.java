@@ -58,7 +58,8 @@ final class ExtensionRounding {
     double active = coils + curve.hooks().bothActive();
     double stress = active * 2 * rated(mean) / stressSlope(mean);
     double length = moved(mean) + force() / curve.rate() * rated(mean);
-    return SAFETY * (stress + Math.min(MOST * active + 1, length / leastSlope(coils, mean)));
+    double fitting = length > 0 ? length / leastSlope(coils, mean) : 0;
+    return SAFETY * (stress + Math.min(MOST * active + 1, fitting));
   }
 
   /** d ln(K D) / d ln D with the factor (4C + 2)/(4C - 3), kept away from zero. */
