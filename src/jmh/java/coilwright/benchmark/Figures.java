@@ -3,6 +3,7 @@ package coilwright.benchmark;
 import coilwright.docs.Section;
 import java.io.IOException;
 import java.util.Collection;
+import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.TreeMap;
@@ -15,6 +16,9 @@ import org.openjdk.jmh.runner.options.OptionsBuilder;
 public final class Figures {
 
   private static final String PROBLEMS = "src/jmh/resources/benchmark/";
+
+  private static final List<String> SEARCHED =
+      List.of("typical", "loose", "infeasible", "whole", "stroke", "extension", "torsion");
 
   private Figures() {}
 
@@ -64,7 +68,9 @@ public final class Figures {
         "Typical, loose and infeasible try six common grades in the sizes they are stocked in;\n");
     text.append(
         "whole is the typical problem over every grade of the catalogue (supply any, materials\n");
-    text.append("all), stroke the same with the lengths left open.\n\n");
+    text.append(
+        "all), stroke the same with the lengths left open; extension and torsion are springs of\n");
+    text.append("those kinds over every grade.\n\n");
     text.append("| problem | wires | fit | candidates | search ms | scan ms | search/scan |");
     text.append(" states search | states scan | share |\n");
     text.append("|---|---|---|---|---|---|---|---|---|---|\n");
@@ -78,7 +84,7 @@ public final class Figures {
   }
 
   private static String row(String problem, Map<String, Double> times) {
-    Workload workload = Workload.of(problem);
+    Workload<?> workload = Workload.of(problem);
     var answer = workload.search();
     double search = times.get(problem + " search");
     double scan = times.get(problem + " scan");

@@ -1,7 +1,6 @@
 package coilwright.benchmark;
 
 import coilwright.search.Answer;
-import coilwright.spring.CompressionState;
 import java.util.concurrent.TimeUnit;
 import org.openjdk.jmh.annotations.Benchmark;
 import org.openjdk.jmh.annotations.BenchmarkMode;
@@ -29,10 +28,10 @@ import org.openjdk.jmh.annotations.Warmup;
 public class SearchBenchmark {
 
   /** Which problem: see the comment at the head of each file. */
-  @Param({"typical", "loose", "infeasible", "whole", "stroke"})
+  @Param({"typical", "loose", "infeasible", "whole", "stroke", "extension", "torsion"})
   public String problem;
 
-  private Workload workload;
+  private Workload<?> workload;
 
   /** Reads the problem and draws its wires. */
   @Setup
@@ -46,7 +45,7 @@ public class SearchBenchmark {
    * @return its answer
    */
   @Benchmark
-  public Answer<CompressionState> search() {
+  public Answer<?> search() {
     return workload.search();
   }
 

@@ -7,15 +7,16 @@ import coilwright.problem.Problem;
 import coilwright.problem.ProblemReader;
 import coilwright.problem.Purpose;
 import coilwright.problem.Reading;
+import coilwright.report.Sheets;
 import coilwright.search.Answer;
 import coilwright.search.Candidate;
 import coilwright.search.CoilStep;
-import coilwright.search.CompressionSearch;
 import coilwright.search.CountingFamily;
 import coilwright.search.Search;
+import coilwright.search.Synthesis;
 import coilwright.search.WireChoice;
-import coilwright.spring.CompressionState;
 import coilwright.spring.Family;
+import coilwright.spring.State;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.UncheckedIOException;
@@ -23,27 +24,39 @@ import java.util.List;
 import java.util.Objects;
 import java.util.concurrent.atomic.AtomicLong;
 
-/** A problem over the whole catalogue, ready to be searched and to be scanned. */
-final class Workload {
+/**
+ * A problem over the whole catalogue, ready to be searched and to be scanned.
+ *
+ * @param <S> the state of its kind of spring
+ */
+final class Workload<S extends State> {
+
+  /** Where no limit ends the coils of a body, a scan ends here [-]. */
+  private static final double MOST_BODY_COILS = 120;
 
   private final Problem problem;
-  private final List<? extends Family<CompressionState>> families;
-  private final List<Limit<CompressionState>> limits;
+  private final List<? extends Family<S>> families;
+  private final List<Limit<S>> limits;
   private final CoilStep step;
 
-  private Workload(Problem problem, Catalogue catalogue) {
+  private Workload(Problem problem, Synthesis<S> kind, Catalogue catalogue) {
     this.problem = problem;
-    this.families =
-        new CompressionSearch().families(problem, WireChoice.of(problem, catalogue).wires());
-    this.limits = new CompressionSearch().limits(problem);
-    this.step = new CoilStep(problem.make().coilStep());
+    this.families = kind.families(problem, WireChoice.of(problem, catalogue).wires());
+    this.limits = kind.limits(problem);
+    this.step = kind.step(problem);
   }
 
   /** The problem with a name among the resources. */
-  static Workload of(String name) {
+  static Workload<?> of(String name) {
     Catalogue catalogue = Catalogue.load();
     Reading reading = ProblemReader.read(bytes(name), Purpose.SHORTLIST, catalogue);
-    return new Workload(reading.problem().orElseThrow(), catalogue);
+    Problem problem = reading.problem().orElseThrow();
+    return of(problem, Sheets.of(problem.kind()).synthesis(), catalogue);
+  }
+
+  private static <S extends State> Workload<S> of(
+      Problem problem, Synthesis<S> kind, Catalogue catalogue) {
+    return new Workload<>(problem, kind, catalogue);
   }
 
   private static byte[] bytes(String name) {
@@ -60,12 +73,12 @@ final class Workload {
   }
 
   /** The search of the program, with every conflict worked out. */
-  Answer<CompressionState> search() {
+  Answer<S> search() {
     return search(families);
   }
 
-  private Answer<CompressionState> search(List<? extends Family<CompressionState>> over) {
-    Answer<CompressionState> answer = Search.run(over, List.of(), limits, step, 0);
+  private Answer<S> search(List<? extends Family<S>> over) {
+    Answer<S> answer = Search.run(over, List.of(), limits, step, 0);
     answer.conflicts().forEach(Objects::requireNonNull);
     return answer;
   }
@@ -75,11 +88,11 @@ final class Workload {
     return scan(families);
   }
 
-  private int scan(List<? extends Family<CompressionState>> over) {
+  private int scan(List<? extends Family<S>> over) {
     double fewest = problem.limits().activeCoils().min().orElse(0);
-    double most = problem.limits().activeCoils().max().orElse(Double.POSITIVE_INFINITY);
+    double most = problem.limits().activeCoils().max().orElse(MOST_BODY_COILS);
     int held = 0;
-    for (Family<CompressionState> family : over) {
+    for (Family<S> family : over) {
       double last = Math.min(most, family.mostCoils());
       if (fewest > last) {
         continue;
@@ -112,9 +125,7 @@ final class Workload {
     return count.get();
   }
 
-  private List<CountingFamily<CompressionState>> counted(AtomicLong count) {
-    return families.stream()
-        .map(family -> new CountingFamily<CompressionState>(family, count))
-        .toList();
+  private List<CountingFamily<S>> counted(AtomicLong count) {
+    return families.stream().map(family -> new CountingFamily<S>(family, count)).toList();
   }
 }
