@@ -42,7 +42,7 @@ record Alternatives(List<ProblemKey<?>> keys, boolean needed, boolean exclusive)
    * @param kind the kind
    */
   boolean standsFor(Kind kind) {
-    return keys.get(0).kinds().contains(kind);
+    return keys.stream().allMatch(key -> key.kinds().contains(kind));
   }
 
   /** Their form. */

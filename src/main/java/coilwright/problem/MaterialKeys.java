@@ -1,6 +1,7 @@
 package coilwright.problem;
 
 import coilwright.material.StrengthLaw;
+import coilwright.spring.Kind;
 import coilwright.unit.Dimension;
 import java.util.ArrayList;
 import java.util.List;
@@ -118,19 +119,21 @@ final class MaterialKeys {
 
   static final ProblemKey<Double> STRESS_AT_LOAD =
       ProblemKey.of(
-          "own_materials[].stress_at_load",
-          Values.shareOfStrength(),
-          OF_LIKE,
-          "its own allowable share of tensile strength; limits override it",
-          "45 %");
+              "own_materials[].stress_at_load",
+              Values.shareOfStrength(),
+              OF_LIKE,
+              "its own allowable share of tensile strength; limits override it",
+              "45 %")
+          .only(Kind.COMPRESSION);
 
   static final ProblemKey<Double> STRESS_AT_SOLID =
       ProblemKey.of(
-          "own_materials[].stress_at_solid",
-          Values.shareOfStrength(),
-          OF_LIKE,
-          "likewise at solid",
-          "45 %");
+              "own_materials[].stress_at_solid",
+              Values.shareOfStrength(),
+              OF_LIKE,
+              "likewise at solid",
+              "45 %")
+          .only(Kind.COMPRESSION);
 
   /**
    * What is taken from another grade where it is not given; without such a grade, all of it must.

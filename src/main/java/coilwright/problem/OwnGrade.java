@@ -86,7 +86,8 @@ record OwnGrade(
   }
 
   private <T> Optional<T> given(ProblemKey<T> key) {
-    return alone ? section.require(key) : section.read(key);
+    boolean needed = alone && key.kinds().contains(section.spot().kind());
+    return needed ? section.require(key) : section.read(key);
   }
 
   private <L> Optional<L> law(Optional<LawGiven<L>> given, Function<WireGrade, L> ofLike) {
