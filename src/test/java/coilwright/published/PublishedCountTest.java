@@ -42,6 +42,7 @@ class PublishedCountTest {
           "bending stress",
           "bending allowables",
           "torsion coil tolerance");
+
   private static final List<String> OF_EXTENSION =
       List.of("extension allowables", "extension geometry");
 
