@@ -1,6 +1,7 @@
 package coilwright.problem;
 
 import java.util.List;
+import java.util.OptionalDouble;
 
 /**
  * The keys of facts about a load line beside its loads.
@@ -59,7 +60,7 @@ record LineKeys(
   LineFacts read(Section root) {
     return new LineFacts(
         root.number(rate),
-        zero.isEmpty() ? java.util.OptionalDouble.empty() : root.number(zero.get(0)),
+        zero.isEmpty() ? OptionalDouble.empty() : root.number(zero.get(0)),
         root.number(stroke));
   }
 }

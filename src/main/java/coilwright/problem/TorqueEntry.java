@@ -1,5 +1,6 @@
 package coilwright.problem;
 
+import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 
@@ -38,7 +39,7 @@ final class TorqueEntry {
   }
 
   private static OptionalDouble product(Section section) {
-    for (ProblemKey<Double> key : java.util.List.of(TorqueKeys.FORCE, TorqueKeys.ARM)) {
+    for (ProblemKey<Double> key : List.of(TorqueKeys.FORCE, TorqueKeys.ARM)) {
       if (section.has(TorqueKeys.TORQUE) && section.has(key)) {
         section
             .spot(key)
