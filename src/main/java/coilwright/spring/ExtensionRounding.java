@@ -9,7 +9,7 @@ final class ExtensionRounding {
   /** The most of a count that a difference which hardly changes along the family is given [-]. */
   private static final double MOST = 0.15;
 
-  /** A step of the coil count for slopes, as a share. */
+  /** A step of the mean diameter for slopes, as a share. */
   private static final double NEXT = 1e-4;
 
   private final ExtensionFamily family;
@@ -68,28 +68,38 @@ final class ExtensionRounding {
     return Math.max(LEAST_SLOPE, Math.abs(1 + 4 * c / (4 * c + 2) - 4 * c / (4 * c - 3)));
   }
 
-  /** The least slope of what is judged as a length or an initial tension [mm per coil]. */
+  /**
+   * The least slope of what is judged as a length or an initial tension [mm per coil]: of the free
+   * length, of the initial tension beyond either end of its preferred range, and of what the hooks
+   * reach beyond the shortest that can be bent.
+   */
   private double leastSlope(double coils, double mean) {
-    double step = NEXT * (coils + curve.hooks().bothActive());
-    double next = curve.meanDiameterAt(coils + step);
-    double least = curve.coatedDiameter();
-    if (curve.fit().rule() != HookFit.Rule.FREE_LENGTH) {
-      least = Math.min(least, Math.abs(curve.freeLengthAt(next) - curve.freeLengthAt(mean)) / step);
+    double each = mean / (3 * (coils + curve.hooks().bothActive()));
+    double wire = curve.coatedDiameter();
+    if (curve.tensionChosen()) {
+      double next = mean * (1 - NEXT);
+      double free = curve.freeLengthAt(mean) - curve.freeLengthAt(next);
+      double spare = spare(mean) - spare(next);
+      return each / (mean * NEXT) * Math.min(Math.abs(free), Math.abs(spare));
     }
-    if (!curve.tensionChosen()) {
-      double low = excess(next, true) - excess(mean, true);
-      double high = excess(next, false) - excess(mean, false);
-      least = Math.min(least, Math.min(Math.abs(low), Math.abs(high)) / step);
-    }
-    return Math.min(least, Math.abs(spare(next) - spare(mean)) / step);
+    double tension = curve.tensionSlopeAt(mean) / curve.rate();
+    double least = Math.min(beyond(mean, tension, true), beyond(mean, tension, false));
+    double shortest = curve.hooks().type().leastShare();
+    return switch (curve.fit().rule()) {
+      case HOOK_LENGTH -> Math.min(each * Math.min(least, shortest), wire);
+      case FREE_LENGTH -> each * Math.min(least, Math.abs(wire / (2 * each) - shortest));
+      default -> each * Math.min(least, Math.abs(tension));
+    };
   }
 
-  /** Initial tension beyond an end of its preferred range, as a length [mm]. */
-  private double excess(double mean, boolean low) {
+  /** Slope of the initial tension beyond an end of its preferred range, as a length [mm per mm]. */
+  private double beyond(double mean, double tension, boolean least) {
     double d = curve.wire().diameter();
     double c = mean / d;
-    double stress = low ? InitialTension.USUAL.least(c) : InitialTension.USUAL.greatest(c);
-    return (curve.tensionAt(mean) - InitialTension.force(stress, mean, d)) / curve.rate();
+    InitialTension usual = InitialTension.USUAL;
+    double stress = least ? usual.least(c) : usual.greatest(c);
+    double slope = usual.slopeAt(c, least) / d - stress / mean;
+    return Math.abs(tension - InitialTension.force(slope, mean, d) / curve.rate());
   }
 
   /** What the hooks reach beyond the shortest that can be bent [mm]. */
