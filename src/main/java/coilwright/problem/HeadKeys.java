@@ -34,7 +34,9 @@ final class HeadKeys {
 
   private static List<ProblemKey<?>> rows() {
     List<ProblemKey<?>> rows = new ArrayList<>();
-    rows.add(TITLE);
+    rows.add(TITLE.only(Kind.COMPRESSION));
+    rows.add(TITLE.only(Kind.EXTENSION).shown("Shade-cloth tensioner"));
+    rows.add(TITLE.only(Kind.TORSION).shown("Gate-latch return"));
     for (Kind kind : Kind.values()) {
       rows.add(SPRING.only(kind).shown(kind.id()));
     }
