@@ -27,6 +27,7 @@ record ExtensionDesignReader(MaterialIds ids, Section section) {
     HooksAsked hooks =
         HooksReader.read(
             Optional.of(section), type.map(List::of).orElse(List.of()), length, LoopPlanes.ANY);
+    basics.ifPresent(common -> inside(common, hooks));
     if (section.spot().faults().count() > before) {
       return Optional.empty();
     }
@@ -41,5 +42,21 @@ record ExtensionDesignReader(MaterialIds ids, Section section) {
                 hooks,
                 common.hand(),
                 common.coating()));
+  }
+
+  /** A bend whose mean radius is no more than half its wire has no inside. */
+  private void inside(DesignBasics spring, HooksAsked hooks) {
+    boolean side = hooks.sideRadius() <= hooks.bendRadius();
+    double share = side ? hooks.sideRadius() : hooks.bendRadius();
+    double covered = spring.wire().diameter() + 2 * spring.coating();
+    if (!(2 * share * spring.meanDiameter() > covered)) {
+      section
+          .spot(side ? HookKeys.SIDE_RADIUS : HookKeys.BEND_RADIUS)
+          .fault(
+              share + " of the mean diameter",
+              "must be more than half the wire diameter, "
+                  + section.shown(DesignKeys.WIRE_DIAMETER)
+                  + (spring.coating() > 0 ? ", and its coating" : ""));
+    }
   }
 }
