@@ -24,7 +24,7 @@ enum BeyondSchema {
   /** Two values, or a value and a default. */
   VALUES_AGAINST_EACH_OTHER(
       "; must (not )?be (above|below|at most|at least) (rod|bore|min|max|the |min_inside|make)"
-          + "|; must differ from|within 0.1 %|; must leave |: zero on both sides;"
+          + "|; must differ from|within 0.1 %|; must leave |; must be more than half |: zero on both sides;"
           + "|; must be at most .*where a table of this grade ends"
           + "| under stress_basis [a-z0-9-]+; | between loads of which |, at which the load line "),
 
