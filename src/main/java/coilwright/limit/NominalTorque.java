@@ -9,7 +9,10 @@ import coilwright.spring.TorsionState;
 import coilwright.unit.Dimension;
 import java.util.List;
 
-/** The torques of a spring as it is set against the torques asked: what rounding may cost. */
+/**
+ * The torques of a spring as it is set against the torques asked: what rounding may cost. A body
+ * that is wound off before an angle is reached bears nothing there.
+ */
 final class NominalTorque implements Limit<TorsionState> {
 
   private static final double SHARE = 0.01;
@@ -49,12 +52,17 @@ final class NominalTorque implements Limit<TorsionState> {
     double worst = 0;
     List<TorqueState> loads = state.loads();
     for (int i = 0; i < asked.size(); i++) {
-      double torque = loads.get(i).torque();
+      double torque = borne(loads.get(i));
       worst = Math.max(worst, Math.abs(torque - asked.get(i).torque().orElse(torque)));
     }
     return Finding.of(CHECK, worst, bound, SOURCE);
   }
 
+  private static double borne(TorqueState load) {
+    return load.outsideDiameter() < Double.POSITIVE_INFINITY ? load.torque() : 0;
+  }
+
+  /** {@inheritDoc} Only bodies without limits on stress and index can be wound off. */
   @Override
   public boolean onlyAfterRounding() {
     return true;

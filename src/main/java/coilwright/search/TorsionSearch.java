@@ -17,7 +17,6 @@ import coilwright.spring.TorsionSpring;
 import coilwright.spring.TorsionState;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Optional;
 
 /** The search for torsion springs: a problem's wires as families, and its limits. */
 public final class TorsionSearch implements Synthesis<TorsionState> {
@@ -91,7 +90,7 @@ public final class TorsionSearch implements Synthesis<TorsionState> {
 
   @Override
   public List<Limit<TorsionState>> limits(Problem problem) {
-    return TorsionLimits.of(problem, TorsionLoads.of(problem).judged(), Optional.empty());
+    return TorsionLimits.ofSearch(problem, TorsionLoads.of(problem).judged());
   }
 
   @Override
@@ -107,7 +106,7 @@ public final class TorsionSearch implements Synthesis<TorsionState> {
   @Override
   public List<Limit<TorsionState>> checkLimits(Problem problem) {
     TorsionDesign design = (TorsionDesign) problem.design().orElseThrow();
-    return TorsionLimits.of(problem, TorsionLoads.of(problem).judged(), Optional.of(design.legs()));
+    return TorsionLimits.ofCheck(problem, TorsionLoads.of(problem).judged(), design.legs());
   }
 
   private static TorsionAsked asked(Problem problem) {

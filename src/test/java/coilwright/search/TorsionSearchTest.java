@@ -174,6 +174,44 @@ class TorsionSearchTest {
     }
   }
 
+  /** A thick wire at a soft rate: thousands of coils would do, were they not ended. */
+  @Test
+  void whereNothingEndsTheCoilsTwoHundredDo() {
+    TorsionDraft endless =
+        plain()
+            .sizes(4)
+            .without(
+                TorsionBound.MOST_COILS, TorsionBound.LEAST_INDEX, TorsionBound.GREATEST_INDEX);
+    List<Candidate<TorsionState>> found = found(endless);
+    assertThat(found.get(found.size() - 1).state().coils()).isEqualTo(200);
+    assertThat(found(endless.copy().with(TorsionBound.MOST_COILS, 250)))
+        .hasSizeGreaterThan(found.size());
+    double length =
+        found(endless.copy().with(TorsionBound.BODY_LENGTH, 900)).stream()
+            .mapToDouble(spring -> spring.state().coils())
+            .max()
+            .orElseThrow();
+    assertThat(length).isCloseTo(224, within(1.0));
+  }
+
+  /** By the coils alone a body could be unwound by more turns than it has. */
+  @Test
+  void aBodyThatIsWoundOffBearsNothing() {
+    TorsionDraft draft =
+        new TorsionDraft()
+            .opening()
+            .loads(5 / DEG, 0, 720 * DEG)
+            .own(GradeDraft.of("steel", 2000).grade())
+            .sizes(1.2)
+            .stressOff()
+            .coilStep(0.25)
+            .without(TorsionBound.values());
+    List<Candidate<TorsionState>> found = found(draft);
+    assertThat(found.get(0).state().coils()).isEqualTo(2.25);
+    assertThat(found)
+        .allSatisfy(spring -> assertThat(spring.state().greatest().outsideDiameter()).isFinite());
+  }
+
   private static Finding finding(Candidate<TorsionState> spring, LimitName name) {
     return spring.findings().stream()
         .filter(finding -> finding.check().limit() == name)
