@@ -18,7 +18,7 @@ public enum BendingBasis {
   HANDBOOK(
       "with the inner factor Ki",
       Citation.remembered(
-          Source.NORTON, "table 14-13, torsion springs, static, stress-relieved, inner stress")) {
+          Source.NORTON, "torsion springs, static, stress-relieved, inner stress")) {
     @Override
     double share(AllowableClass allowableClass) {
       return switch (allowableClass) {

@@ -24,6 +24,7 @@ final class ExtensionStress implements Limit<ExtensionState> {
   private final StressCorrection correction;
   private final boolean overtravel;
   private final Check check;
+  private final Check ofHighTension;
   private final Check notAssessed;
 
   /**
@@ -47,6 +48,9 @@ final class ExtensionStress implements Limit<ExtensionState> {
     this.correction = correction;
     this.overtravel = overtravel;
     this.check = check(definition() + (overtravel ? ", overtravel included" : ""));
+    this.ofHighTension =
+        check(
+            check.definition() + "; initial tension above the preferred range: shares of the ends");
     this.notAssessed = check("not assessed: the load of a side loop is beside the axis");
   }
 
@@ -75,7 +79,7 @@ final class ExtensionStress implements Limit<ExtensionState> {
       return Finding.cannotFail(notAssessed, BESIDE_THE_AXIS);
     }
     return Finding.of(
-        check,
+        lowered() && highTension(state) ? ofHighTension : check,
         stress(state),
         share(state) * state.wire().tensileStrength(),
         limit.share().isPresent() ? FILE : place.citation(method));

@@ -42,6 +42,8 @@ public enum LimitName {
   HOOK_BENDING_STRESS("hook bending stress", true),
   /** Torsion stress at the bend from the body into a hook. */
   HOOK_TORSION_STRESS("hook torsion stress", true),
+  /** Hooks that are by themselves softer than the rate asked. */
+  HOOKS("hooks", false),
   /** How far a hook can reach beyond the body. */
   HOOK_LENGTH("hook length", false),
   /** Length of an extension spring at its greatest load. */

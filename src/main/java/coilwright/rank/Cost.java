@@ -59,7 +59,7 @@ public record Cost(double wire, double coiling, double stressRelief, EndWork end
 
   private static double share(EndWork work) {
     return switch (work) {
-      case NONE -> 0;
+      case NONE, NO_LEGS -> 0;
       case GRINDING -> GRINDING;
       case HOOK_FORMING -> HOOK_FORMING;
       case LEG_FORMING -> LEG_FORMING;

@@ -11,7 +11,10 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.function.ToDoubleFunction;
 
-/** Orders of candidates, best first. Ties go by material, wire diameter, ends and coil count. */
+/**
+ * Orders of candidates, best first. Springs whose stresses are not assessed stand behind all
+ * others. Ties go by material, wire diameter, ends and coil count.
+ */
 public final class Order {
 
   /**
@@ -24,7 +27,7 @@ public final class Order {
    * Stress margins no farther apart than this are the same: rounding a diameter moves a torque by
    * little less [-].
    */
-  private static final double SAME = 0.005;
+  private static final double SAME = 0.001;
 
   private Order() {}
 
@@ -37,7 +40,10 @@ public final class Order {
    */
   public static <S extends State> Comparator<Candidate<S>> by(RankBy by) {
     ToDoubleFunction<Candidate<S>> merit = merit(by);
-    return Comparator.comparingDouble(merit)
+    Comparator<Candidate<S>> known =
+        Comparator.comparing(candidate -> !candidate.state().stressAssessed());
+    return known
+        .thenComparingDouble(merit)
         .thenComparing(candidate -> candidate.state().wire().grade().id())
         .thenComparingDouble(candidate -> candidate.state().wire().diameter())
         .thenComparing(candidate -> candidate.state().endForm())

@@ -3,6 +3,7 @@ package coilwright.report;
 import coilwright.problem.Design;
 import coilwright.problem.ExtensionAsked;
 import coilwright.problem.HookLength;
+import coilwright.problem.LoopPlanes;
 import coilwright.problem.Problem;
 import coilwright.search.ExtensionSearch;
 import coilwright.search.Synthesis;
@@ -114,7 +115,7 @@ final class ExtensionSheet implements Sheet<ExtensionState> {
     return List.of(
         new Note<>(
             "side loops: load beside the axis, so that rate holds only roughly and no stress is assessed;"
-                + " verify by test",
+                + " they stand behind all springs held to stress; verify by test",
             state -> !state.stressAssessed()),
         new Note<>(
             "index of the side bend C2 below 4: bend the hook with a larger radius if it can be",
@@ -136,6 +137,12 @@ final class ExtensionSheet implements Sheet<ExtensionState> {
   @Override
   public void understandEnds(Understood words) {
     new ExtensionWords(words).hooks();
+  }
+
+  /** {@inheritDoc} Hooks at a right angle fix a quarter of a coil or three. */
+  @Override
+  public boolean stepsCoils(Problem problem) {
+    return asked(problem).hooks().planes() != LoopPlanes.RIGHT_ANGLE;
   }
 
   @Override

@@ -91,7 +91,10 @@ final class ExtensionWords {
             + "; hook bending "
             + share(ExtensionPlace.HOOK_BENDING, asked.hookBending())
             + "; hook torsion "
-            + share(ExtensionPlace.HOOK_TORSION, asked.hookTorsion()));
+            + share(ExtensionPlace.HOOK_TORSION, asked.hookTorsion())
+            + (asked.hooks().types().stream().allMatch(HookType::onAxis)
+                ? ""
+                : "; side loops not assessed"));
     new LimitWords(words).surge();
   }
 

@@ -83,7 +83,9 @@ final class ProblemJson implements Json.Part {
     json.string("hand", make.hand().id());
     sheet.writeSetRemoved(json, make.setRemoved());
     coating(json, make.coating());
-    json.number("coil_step", make.coilStep());
+    if (sheet.stepsCoils(problem)) {
+      json.number("coil_step", sheet.synthesis().step(problem).size());
+    }
     json.number("diameter_step_mm", make.rounding().diameterStep());
     if (sheet.roundsLength(problem)) {
       json.number("length_step_mm", make.rounding().lengthStep());

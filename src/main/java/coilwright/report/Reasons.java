@@ -22,7 +22,7 @@ final class Reasons {
   static String of(Conflict conflict, UnaryOperator<String> ends) {
     List<String> parts = new ArrayList<>();
     for (Conflict.Part part : conflict.parts()) {
-      parts.add(part.limit().text() + " " + coils(part.coils()));
+      parts.add(part(part));
     }
     return wire(conflict, ends) + ": " + String.join(", ", parts);
   }
@@ -30,6 +30,14 @@ final class Reasons {
   private static String wire(Conflict conflict, UnaryOperator<String> ends) {
     Wire wire = conflict.wire();
     return Wires.size(wire) + " " + Wires.markedGrade(wire) + ", " + ends.apply(conflict.endForm());
+  }
+
+  private static String part(Conflict.Part part) {
+    return switch (part.limit()) {
+      case LEGS -> "the legs alone are softer than the rate";
+      case HOOKS -> "the hooks alone are softer than the rate";
+      default -> part.limit().text() + " " + coils(part.coils());
+    };
   }
 
   private static String coils(CoilSet set) {

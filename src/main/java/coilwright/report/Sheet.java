@@ -51,6 +51,11 @@ public interface Sheet<S extends State> {
   /** What a reader should know of some springs. */
   List<Note<S>> notes(Problem problem);
 
+  /** What rests on the density of its wire, in words. */
+  default String restsOnDensity() {
+    return "mass, cost and surge frequency rest";
+  }
+
   /** What a reader should know of all springs of the kind. */
   default List<String> generalNotes() {
     return List.of();
@@ -85,6 +90,11 @@ public interface Sheet<S extends State> {
 
   /** Writes what stands at the top of the file between the space and what is made. */
   default void writeHolding(Json json, Problem problem) throws IOException {}
+
+  /** Whether the file's step of the coil count applies, and nothing else fixes the counts. */
+  default boolean stepsCoils(Problem problem) {
+    return true;
+  }
 
   /** Writes how the ends may be made. */
   void writeEnds(Json json, Problem problem) throws IOException;

@@ -140,6 +140,17 @@ final class TorsionSheet implements Sheet<TorsionState> {
     new TorsionWords(words).legAngle();
   }
 
+  /** {@inheritDoc} An angle between the legs fixes whole coils and a fraction. */
+  @Override
+  public boolean stepsCoils(Problem problem) {
+    return asked(problem).legs().angle().isEmpty();
+  }
+
+  @Override
+  public String restsOnDensity() {
+    return "mass and cost rest";
+  }
+
   @Override
   public boolean roundsLength(Problem problem) {
     return false;

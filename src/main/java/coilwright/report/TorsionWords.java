@@ -35,7 +35,7 @@ final class TorsionWords {
     words.row("loads", String.join("; ", loads) + stroke + words.shared());
     words.row(
         "loading", asked.closing() ? "closing: the loads wind it up" : "opening: they unwind it");
-    asked.line().ifPresent(line -> words.row(words.each(), line(line)));
+    words.row(words.each(), asked.line().map(this::line).orElseGet(this::assumedFreeAngle));
   }
 
   private String load(TorqueAsked load) {
@@ -65,6 +65,17 @@ final class TorsionWords {
             : ", no reference for angles")
         + ", from "
         + line.rule();
+  }
+
+  /** Where the facts fix no line, the spring to check sets it. */
+  private String assumedFreeAngle() {
+    boolean set =
+        asked.loads().stream()
+            .map(TorqueAsked::point)
+            .anyMatch(point -> point.torque().isPresent() && point.angle().isPresent());
+    return set
+        ? "the spring's own, set so that its torque is met at its angle (assumed)"
+        : "the spring's own, angles counted from free (assumed)";
   }
 
   /** Adds the legs. */

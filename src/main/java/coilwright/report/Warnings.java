@@ -59,7 +59,7 @@ final class Warnings {
             state -> state.wire().evidence() == Evidence.MEMORY));
     notes.add(
         new Sheet.Note<>(
-            "density from memory, on which mass, cost and surge frequency rest",
+            "density from memory, on which " + sheet.restsOnDensity(),
             state -> state.wire().grade().densityEvidence() == Evidence.MEMORY));
     notes.addAll(sheet.notes(problem));
     List<Warning> warnings = new ArrayList<>();

@@ -22,12 +22,20 @@ import java.util.Optional;
  * and every limit that would have to give way there.
  *
  * @param conflict why the wire has no candidate
- * @param coils the coil count [-]; NaN where at every count tried a physical fact stands in the way
+ * @param coils the coil count [-]; NaN where the wire has no spring at any count
  * @param failing what fails there
  */
-record WayOut(Conflict conflict, double coils, List<Finding> failing) {
+record WayOut(Conflict conflict, double coils, List<Miss> failing) {
 
   private static final int MOST_COILS_TRIED = 60;
+
+  /**
+   * A bound that fails.
+   *
+   * @param finding what was found
+   * @param removable whether a designer may change it
+   */
+  record Miss(Finding finding, boolean removable) {}
 
   /** A coil count at a bound fails it by no more than the accuracy of the count. */
   private static final double AT_THE_BOUND = 1e-6;
@@ -58,7 +66,7 @@ record WayOut(Conflict conflict, double coils, List<Finding> failing) {
     for (double coils : counts(conflict)) {
       if (coils >= family.fewestCoils() && coils <= family.mostCoils()) {
         WayOut way = new WayOut(conflict, coils, failing(family.at(coils), limits));
-        best = way.shortfall() < best.shortfall() ? way : best;
+        best = way.isNearerThan(best) ? way : best;
       }
     }
     return best;
@@ -94,12 +102,12 @@ record WayOut(Conflict conflict, double coils, List<Finding> failing) {
     return counts;
   }
 
-  private static <S extends State> List<Finding> failing(S state, List<Limit<S>> limits) {
-    List<Finding> failing = new ArrayList<>();
+  private static <S extends State> List<Miss> failing(S state, List<Limit<S>> limits) {
+    List<Miss> failing = new ArrayList<>();
     for (Limit<S> limit : limits) {
       Finding finding = limit.judge(state);
       if (!(finding.margin() >= -AT_THE_BOUND)) {
-        failing.add(finding);
+        failing.add(new Miss(finding, limit.removable() && limit.name().removable()));
       }
     }
     return failing;
@@ -108,31 +116,51 @@ record WayOut(Conflict conflict, double coils, List<Finding> failing) {
   /** The shares by which limits would have to give way, added; infinite where one cannot [-]. */
   double shortfall() {
     double sum = Double.isNaN(coils) ? Double.POSITIVE_INFINITY : 0;
-    for (Finding finding : failing) {
-      boolean removable = finding.check().limit().removable();
-      sum += removable ? -finding.margin() : Double.POSITIVE_INFINITY;
+    for (Miss miss : failing) {
+      sum += miss.removable() ? -miss.finding().margin() : Double.POSITIVE_INFINITY;
     }
     return sum;
   }
 
+  /** Where neither can be enough, the one that misses less in all. */
+  private boolean isNearerThan(WayOut other) {
+    if (Double.isNaN(other.coils) || shortfall() < other.shortfall()) {
+      return true;
+    }
+    return Double.isInfinite(shortfall())
+        && Double.isInfinite(other.shortfall())
+        && missed() < other.missed();
+  }
+
+  private double missed() {
+    return failing.stream().mapToDouble(miss -> -miss.finding().margin()).sum();
+  }
+
   /** "at 11 coils: stress at load 975 MPa, allowed 873 MPa". */
   String text(OutputUnits units) {
-    if (Double.isInfinite(shortfall())) {
+    if (Double.isNaN(coils)) {
       return "at no coil count would changing the limits be enough";
     }
-    String at = "at " + Numbers.brief(coils, 2) + " coils: ";
+    String at =
+        (Double.isInfinite(shortfall())
+                ? "at no coil count would changing the limits be enough; nearest at "
+                : "at ")
+            + Numbers.brief(coils, 2)
+            + " coils: ";
     return failing.isEmpty()
         ? at + "only rounding stands in the way; try finer steps"
         : at + String.join("; ", failing.stream().map(each -> need(each, units)).toList());
   }
 
-  private static String need(Finding finding, OutputUnits units) {
+  private static String need(Miss miss, OutputUnits units) {
+    Finding finding = miss.finding();
     Dimension dimension = finding.check().dimension();
     return judged(finding.check().limit())
         + " "
         + number(units, dimension, finding.value())
         + (finding.check().side() == Side.MAX ? ", allowed " : ", needed ")
-        + number(units, dimension, finding.bound());
+        + number(units, dimension, finding.bound())
+        + (miss.removable() ? "" : " (" + finding.check().definition() + ")");
   }
 
   /** The number that a limit judges, where its name alone would mislead. */

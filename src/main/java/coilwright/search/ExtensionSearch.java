@@ -43,13 +43,13 @@ public final class ExtensionSearch implements Synthesis<ExtensionState> {
     return families;
   }
 
-  /** Where the hooks alone are softer than the rate, the coil would be no wider than its wire. */
+  /** Hooks that alone are softer than the rate leave no body. */
   @Override
   public List<Conflict> impossible(Problem problem, List<Wire> wires) {
     List<Conflict> conflicts = new ArrayList<>();
     for (ExtensionFamily family : all(problem, wires)) {
       if (!family.hasSprings()) {
-        Conflict.Part none = new Conflict.Part(LimitName.SPRING_INDEX, CoilSet.EMPTY);
+        Conflict.Part none = new Conflict.Part(LimitName.HOOKS, CoilSet.EMPTY);
         conflicts.add(new Conflict(family.wire(), family.endForm(), List.of(none)));
       }
     }

@@ -9,7 +9,9 @@ public enum EndWork {
   /** Both are bent up into hooks. */
   HOOK_FORMING("hook forming"),
   /** Both are straightened or bent into legs. */
-  LEG_FORMING("leg forming");
+  LEG_FORMING("leg forming"),
+  /** Nothing, though legs might be formed. */
+  NO_LEGS("leg forming");
 
   private final String words;
 

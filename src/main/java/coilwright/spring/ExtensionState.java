@@ -168,6 +168,7 @@ public final class ExtensionState implements State {
   }
 
   /** Whether its stresses are known: not where the load is beside the axis. */
+  @Override
   public boolean stressAssessed() {
     return spring.hooks().type().onAxis();
   }
@@ -241,7 +242,7 @@ public final class ExtensionState implements State {
 
   /** Under a force; below the initial tension its coils do not part. */
   private ExtensionLoad under(double force) {
-    double length = lengthUnder(force);
+    double length = Math.max(freeLength, lengthUnder(force));
     return load(length, force, length - freeLength);
   }
 

@@ -25,6 +25,9 @@ public record Legs(double first, double second) {
 
   private static final double TURN = 2 * Math.PI;
 
+  /** Angles no farther apart than this are the same [rad]. */
+  private static final double SAME = 1e-9;
+
   /** A leg bends as a cantilever: by a third of what the same wire does under an even moment. */
   private static final double SHARE_OF_AN_EVEN_MOMENT = 1.0 / 3;
 
@@ -71,8 +74,9 @@ public record Legs(double first, double second) {
     return wrapped(freeAngle - IN_LINE) / TURN;
   }
 
+  /** Next to a whole turn is none: it is the rounding of the arithmetic. */
   private static double wrapped(double angle) {
     double rest = angle - TURN * Math.floor(angle / TURN);
-    return rest < TURN ? rest : 0;
+    return rest < TURN - SAME ? rest : 0;
   }
 }

@@ -22,6 +22,13 @@ public interface State {
     return ground() ? EndWork.GRINDING : EndWork.NONE;
   }
 
+  /**
+   * Whether its stresses are known; where they are not, it is no match for springs held to them.
+   */
+  default boolean stressAssessed() {
+    return true;
+  }
+
   /** Mass [kg]. */
   double mass();
 

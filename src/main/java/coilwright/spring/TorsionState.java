@@ -98,7 +98,7 @@ public final class TorsionState implements State {
   /** Legs are straightened off the coil; where there are none, nothing is done. */
   @Override
   public EndWork endWork() {
-    return spring.legs().length() > 0 ? EndWork.LEG_FORMING : EndWork.NONE;
+    return spring.legs().length() > 0 ? EndWork.LEG_FORMING : EndWork.NO_LEGS;
   }
 
   @Override

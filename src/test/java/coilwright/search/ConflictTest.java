@@ -11,7 +11,7 @@ import java.util.Map;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
 
-/** Every conflict is true, and the one that the contract asks for. */
+/** Every conflict is true, and of several the one that is asked for. */
 class ConflictTest {
 
   @ParameterizedTest(name = "seed {0}")

@@ -115,7 +115,7 @@ class ExtensionSearchTest {
         .anySatisfy(
             conflict -> {
               assertThat(conflict.wire().diameter()).isEqualTo(0.05);
-              assertThat(names(conflict)).containsExactly(LimitName.SPRING_INDEX);
+              assertThat(names(conflict)).containsExactly(LimitName.HOOKS);
             });
   }
 
