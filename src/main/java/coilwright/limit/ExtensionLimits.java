@@ -44,7 +44,9 @@ public final class ExtensionLimits {
     all.stress(ExtensionPlace.BODY, all.asked.stressInBody());
     all.stress(ExtensionPlace.HOOK_BENDING, all.asked.hookBending());
     all.stress(ExtensionPlace.HOOK_TORSION, all.asked.hookTorsion());
-    all.limits.addAll(ExtensionSpace.ofHooks(all.asked, problem.envelope(), covered));
+    all.limits.addAll(
+        ExtensionSpace.ofHooks(
+            all.asked, problem.envelope(), covered, problem.overtravel().isPresent()));
     if (loads.stream().anyMatch(load -> load.force().isPresent())) {
       all.limits.add(NominalLoad.ofExtension(loads, all.otherFacts(loads)));
     }

@@ -71,8 +71,10 @@ final class ExtensionSpace {
    *
    * @param asked what only extension springs are asked
    * @param covered what a definition says of the wire's coating, after a comma; empty if bare
+   * @param overtravel whether there is an overtravel beyond the loads
    */
-  static List<Limit<ExtensionState>> ofHooks(ExtensionAsked asked, Envelope space, String covered) {
+  static List<Limit<ExtensionState>> ofHooks(
+      ExtensionAsked asked, Envelope space, String covered, boolean overtravel) {
     ExtensionSpace all = new ExtensionSpace(space, covered);
     if (asked.hooks().length().rule() != HookLength.Rule.NATURAL) {
       all.hookLength();
@@ -80,8 +82,8 @@ final class ExtensionSpace {
     all.add(
         LimitName.EXTENDED_LENGTH,
         Side.MAX,
-        "inside the hooks, at the greatest load",
-        ExtensionState::extendedLength,
+        "inside the hooks, at the greatest load" + (overtravel ? ", overtravel included" : ""),
+        ExtensionState::extremeLength,
         asked.maxExtendedLength(),
         family -> new AlongExtension(family).turnsOfExtendedLength());
     all.add(

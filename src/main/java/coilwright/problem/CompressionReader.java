@@ -31,7 +31,8 @@ record CompressionReader(Blocks blocks, MaterialIds ids, Method method) {
     return new KindPart(
         facts,
         required,
-        OvertravelReader.read(root, facts, required),
+        new OvertravelReader(root, line.form())
+            .read(facts.loads(), required.map(Requirement::completed).orElse(List.of())),
         root.read(EnvelopeKeys.SEATS),
         design.map(Design.class::cast),
         Optional.empty(),

@@ -103,7 +103,7 @@ final class EnvelopeKeys {
               "envelope.max_extended_length",
               Values.length(),
               "no limit",
-              "greatest length inside the hooks at the greatest load",
+              "greatest length inside the hooks, at the greatest load or the overtravel",
               "70 mm")
           .only(Kind.EXTENSION);
 

@@ -31,15 +31,17 @@ record ExtensionReader(Blocks blocks, MaterialIds ids) {
     new HookRules(blocks, hooks).check(line, freeLength);
     Optional<ExtensionDesign> design =
         blocks.design().flatMap(section -> new ExtensionDesignReader(ids, section).read());
+    Optional<TensionLine> one = line.fixed().map(fixed -> perSpring(fixed, facts));
     return new KindPart(
         facts,
         Optional.empty(),
-        OptionalDouble.empty(),
+        new OvertravelReader(root, line.form())
+            .read(facts.loads(), one.map(TensionLine::loads).orElse(List.of())),
         Optional.empty(),
         design.map(Design.class::cast),
         Optional.of(
             new ExtensionAsked(
-                line.fixed().map(fixed -> perSpring(fixed, facts)),
+                one,
                 freeLength,
                 design.map(ExtensionDesign::hooks).orElse(hooks),
                 blocks

@@ -167,7 +167,7 @@ final class LimitKeys {
 
   static final ProblemKey<Setting<Section>> SURGE_FREQUENCY =
       limit("limits.surge_frequency", "not judged", "{min: 200 Hz}", "first natural frequency")
-          .only(Kind.COMPRESSION);
+          .only(Kind.COMPRESSION, Kind.EXTENSION);
 
   static final ProblemKey<Setting<Double>> SURGE_FREQUENCY_MIN =
       bound(
@@ -176,7 +176,7 @@ final class LimitKeys {
               "not judged",
               "least frequency",
               "200 Hz")
-          .only(Kind.COMPRESSION);
+          .only(Kind.COMPRESSION, Kind.EXTENSION);
 
   /** All of them. */
   static final List<ProblemKey<?>> ROWS = rows();

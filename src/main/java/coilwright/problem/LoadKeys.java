@@ -123,6 +123,15 @@ final class LoadKeys {
               "{length: 20 mm}")
           .only(Kind.COMPRESSION);
 
+  static final ProblemKey<Section> OVERTRAVEL_PULLED =
+      ProblemKey.of(
+              "overtravel",
+              new SectionReader("overtravel"),
+              "none",
+              "assembly or abuse beyond the loads: stress, extended length hold",
+              "{length: 70 mm}")
+          .only(Kind.EXTENSION);
+
   static final ProblemKey<Double> OVERTRAVEL_LENGTH =
       ProblemKey.of(
               "overtravel.length",
@@ -131,6 +140,15 @@ final class LoadKeys {
               "length it is pressed to; no force",
               "20 mm")
           .only(Kind.COMPRESSION);
+
+  static final ProblemKey<Double> OVERTRAVEL_PULLED_LENGTH =
+      ProblemKey.of(
+              "overtravel.length",
+              Values.length(),
+              "",
+              "length inside the hooks it is pulled to; no force",
+              "70 mm")
+          .only(Kind.EXTENSION);
 
   static final ProblemKey<Integer> SPRINGS_IN_PARALLEL =
       ProblemKey.of(
@@ -157,7 +175,9 @@ final class LoadKeys {
           STROKE,
           STROKE.only(Kind.EXTENSION).shown("15 mm"),
           OVERTRAVEL,
-          OVERTRAVEL_LENGTH);
+          OVERTRAVEL_PULLED,
+          OVERTRAVEL_LENGTH,
+          OVERTRAVEL_PULLED_LENGTH);
 
   private LoadKeys() {}
 }

@@ -29,15 +29,6 @@ final class CompressionProblemJson {
         });
   }
 
-  /** The loads and the overtravel. */
-  static void loads(Json json, Problem problem) throws IOException {
-    ProblemValues.loads(json, problem.facts());
-    if (problem.overtravel().isPresent()) {
-      json.object(
-          "overtravel", body -> body.number("length_mm", problem.overtravel().getAsDouble()));
-    }
-  }
-
   /** What of a checked spring is not common to all kinds. */
   static void design(Json json, Design design) throws IOException {
     CompressionDesign spring = (CompressionDesign) design;

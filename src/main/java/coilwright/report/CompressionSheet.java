@@ -125,9 +125,7 @@ final class CompressionSheet implements Sheet<CompressionState> {
         new Note<>(
             "would buckle without the bore or rod that guides it, and rubs there",
             state -> buckles(problem, state)),
-        new Note<>(
-            "overtravel no farther than the loads, so that nothing more is asked",
-            CompressionSheet::overtravelWithinLoads));
+        new Note<>(LoadWords.OVERTRAVEL_WITHIN, CompressionSheet::overtravelWithinLoads));
   }
 
   /**
@@ -155,10 +153,7 @@ final class CompressionSheet implements Sheet<CompressionState> {
     Problem problem = words.problem();
     words.row("loads", new LoadWords(words).text());
     problem.required().ifPresent(required -> words.row(words.each(), line(words, required)));
-    problem
-        .overtravel()
-        .ifPresent(
-            length -> words.row("overtravel", "to " + words.length(length) + ", no force asked"));
+    new LoadWords(words).overtravel();
   }
 
   private static String line(Understood words, Requirement required) {
@@ -195,7 +190,7 @@ final class CompressionSheet implements Sheet<CompressionState> {
 
   @Override
   public void writeLoads(Json json, Problem problem) throws IOException {
-    CompressionProblemJson.loads(json, problem);
+    ProblemValues.loads(json, problem);
   }
 
   @Override

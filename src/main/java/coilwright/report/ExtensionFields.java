@@ -5,6 +5,7 @@ import coilwright.problem.ExtensionDesign;
 import coilwright.problem.Problem;
 import coilwright.spring.ExtensionState;
 import coilwright.unit.Dimension;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.ToDoubleFunction;
@@ -26,22 +27,29 @@ final class ExtensionFields {
 
   /** All of them. */
   static List<SpringPart<ExtensionState>> parts(Problem problem) {
-    return List.of(
-        SpringPart.of(List.of(Word.ours("hooks", ExtensionState::endForm))),
-        SpringPart.of(ExtensionQuantities.SPRING),
-        preferred("preferred_initial_tension", ExtensionQuantities.PREFERRED),
-        preferred("preferred_initial_tension_norton", ExtensionQuantities.ALSO_PREFERRED),
-        SpringPart.of(SpringFields.group(problem)),
+    List<SpringPart<ExtensionState>> parts = new ArrayList<>();
+    parts.add(SpringPart.of(List.of(Word.ours("hooks", ExtensionState::endForm))));
+    parts.add(SpringPart.of(ExtensionQuantities.SPRING));
+    parts.add(preferred("preferred_initial_tension", ExtensionQuantities.PREFERRED));
+    parts.add(preferred("preferred_initial_tension_norton", ExtensionQuantities.ALSO_PREFERRED));
+    parts.add(SpringPart.of(SpringFields.group(problem)));
+    parts.add(
         SpringPart.of(
             List.of(
                 SpringFields.data(),
-                new Flag<>("stress_assessed", ExtensionState::stressAssessed))),
+                new Flag<>("stress_assessed", ExtensionState::stressAssessed))));
+    parts.add(
         SpringPart.list(
             "loads",
             "load",
             problem.facts().loads().size(),
             ExtensionQuantities.LOAD,
             ExtensionState::loads));
+    if (problem.overtravel().isPresent()) {
+      parts.add(
+          SpringPart.object("overtravel", ExtensionQuantities.LOAD, ExtensionState::overtravel));
+    }
+    return parts;
   }
 
   private static SpringPart<ExtensionState> preferred(

@@ -7,6 +7,7 @@ import coilwright.problem.LoopPlanes;
 import coilwright.problem.Problem;
 import coilwright.search.ExtensionSearch;
 import coilwright.search.Synthesis;
+import coilwright.spring.ExtensionLoad;
 import coilwright.spring.ExtensionState;
 import coilwright.spring.HookStress;
 import coilwright.unit.Dimension;
@@ -73,7 +74,10 @@ final class ExtensionSheet implements Sheet<ExtensionState> {
 
   @Override
   public TextTable loads(ExtensionState spring, OutputUnits units) {
-    return new LoadTable<>(ExtensionQuantities.LOAD, units).addAll(spring.loads()).table();
+    LoadTable<ExtensionLoad> table = new LoadTable<>(ExtensionQuantities.LOAD, units);
+    table.addAll(spring.loads());
+    spring.overtravel().ifPresent(load -> table.add("overtravel", load));
+    return table.table();
   }
 
   @Override
@@ -119,7 +123,14 @@ final class ExtensionSheet implements Sheet<ExtensionState> {
             state -> !state.stressAssessed()),
         new Note<>(
             "index of the side bend C2 below 4: bend the hook with a larger radius if it can be",
-            state -> state.spring().sideIndex() < HookStress.LEAST_SIDE_INDEX));
+            state -> state.spring().sideIndex() < HookStress.LEAST_SIDE_INDEX),
+        new Note<>(LoadWords.OVERTRAVEL_WITHIN, ExtensionSheet::overtravelWithinLoads));
+  }
+
+  /** Where lengths are found, only the spring tells which of its lengths is the longest. */
+  private static boolean overtravelWithinLoads(ExtensionState state) {
+    return state.overtravel().isPresent()
+        && !(state.overtravel().get().length() > state.extendedLength());
   }
 
   @Override
@@ -162,7 +173,7 @@ final class ExtensionSheet implements Sheet<ExtensionState> {
 
   @Override
   public void writeLoads(Json json, Problem problem) throws IOException {
-    ProblemValues.loads(json, problem.facts());
+    ProblemValues.loads(json, problem);
   }
 
   @Override

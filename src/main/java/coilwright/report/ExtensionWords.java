@@ -32,6 +32,7 @@ final class ExtensionWords {
     asked
         .freeLength()
         .ifPresent(length -> words.row("free length", words.length(length) + " inside the hooks"));
+    new LoadWords(words).overtravel();
   }
 
   private String line(TensionLine line) {

@@ -14,6 +14,10 @@ import java.util.List;
  */
 record LoadWords(Understood words) {
 
+  /** The note on springs whose loads reach as far as their overtravel. */
+  static final String OVERTRAVEL_WITHIN =
+      "overtravel no farther than the loads, so that nothing more is asked";
+
   /** All loads and the stroke. */
   String text() {
     LoadFacts facts = words.problem().facts();
@@ -21,6 +25,15 @@ record LoadWords(Understood words) {
         facts.stroke().isPresent() ? "; stroke " + words.length(facts.stroke().getAsDouble()) : "";
     List<String> loads = facts.loads().stream().map(this::load).toList();
     return String.join("; ", loads) + stroke + words.shared();
+  }
+
+  /** Adds the length beyond the loads where one is asked. */
+  void overtravel() {
+    words
+        .problem()
+        .overtravel()
+        .ifPresent(
+            length -> words.row("overtravel", "to " + words.length(length) + ", no force asked"));
   }
 
   private String load(LoadAsked load) {

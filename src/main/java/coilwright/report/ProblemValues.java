@@ -3,6 +3,7 @@ package coilwright.report;
 import coilwright.problem.Band;
 import coilwright.problem.LoadAsked;
 import coilwright.problem.LoadFacts;
+import coilwright.problem.Problem;
 import coilwright.problem.StressLimit;
 import coilwright.problem.Tolerance;
 import java.io.IOException;
@@ -13,8 +14,9 @@ final class ProblemValues {
 
   private ProblemValues() {}
 
-  /** Loads of force against length, and the other facts about their line. */
-  static void loads(Json json, LoadFacts facts) throws IOException {
+  /** Loads of force against length, the other facts about their line, and the overtravel. */
+  static void loads(Json json, Problem problem) throws IOException {
+    LoadFacts facts = problem.facts();
     json.array(
         "loads",
         list -> {
@@ -25,6 +27,10 @@ final class ProblemValues {
     optional(json, "rate_n_per_mm", facts.rate());
     optional(json, "free_length_mm", facts.freeLength());
     optional(json, "stroke_mm", facts.stroke());
+    if (problem.overtravel().isPresent()) {
+      json.object(
+          "overtravel", body -> body.number("length_mm", problem.overtravel().getAsDouble()));
+    }
   }
 
   private static void load(Json json, LoadAsked load) throws IOException {

@@ -190,6 +190,11 @@ public final class ExtensionState implements State {
     return lengthUnder(greatestForce);
   }
 
+  /** The overtravel where it is beyond the loads, else the length under the greatest force [mm]. */
+  public double extremeLength() {
+    return Math.max(extendedLength(), duty.overtravel().orElse(Double.NEGATIVE_INFINITY));
+  }
+
   /** The shortest length of its loads [mm]. */
   public double shortestLength() {
     double shortest = Double.POSITIVE_INFINITY;

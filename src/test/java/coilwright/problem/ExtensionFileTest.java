@@ -36,6 +36,7 @@ class ExtensionFileTest {
       rate: 1.8 N/mm
       free_length: 46 mm
       stroke: 15 mm
+      overtravel: {length: 68 mm}
       springs_in_parallel: 2
       envelope:
         bore: 16 mm
@@ -71,6 +72,7 @@ class ExtensionFileTest {
         stress_in_body: {max: 40 %}
         hook_bending_stress: {max: 70 %}
         hook_torsion_stress: none
+        surge_frequency: {min: 150 Hz}
       own_materials: [{id: coil-lot-2608, like: music-wire, tensile_strength: 1900 MPa}]
       rank: {by: margin, top: 4}
       """;
@@ -85,7 +87,9 @@ class ExtensionFileTest {
           .replace("46 mm", "1.811023622047244 in")
           .replace("15 mm", "0.5905511811023622 in")
           .replace("6 mm", "0.2362204724409449 in")
-          .replace("70 mm", "2.755905511811024 in");
+          .replace("70 mm", "2.755905511811024 in")
+          .replace("68 mm", "2.677165354330709 in")
+          .replace("150 Hz", "0.15 kHz");
 
   private final Problem problem = Files.problem(FULL);
   private final ExtensionAsked asked = problem.extension().orElseThrow();
@@ -95,7 +99,7 @@ class ExtensionFileTest {
     assertThat(problem.title()).isEqualTo("Gate latch return");
     assertThat(problem.kind()).isEqualTo(Kind.EXTENSION);
     assertThat(problem.required()).isEmpty();
-    assertThat(problem.overtravel()).isEmpty();
+    assertThat(problem.overtravel()).hasValue(68);
     assertThat(problem.seats()).isEmpty();
     assertThat(problem.torsion()).isEmpty();
     assertThat(problem.design()).isEmpty();
@@ -172,7 +176,7 @@ class ExtensionFileTest {
                 new StressLimit(false, NONE),
                 new StressLimit(false, NONE),
                 BucklingRule.NONE,
-                NONE));
+                of(150)));
     assertThat(asked.preferredTension()).isFalse();
     assertThat(asked.stressInBody()).isEqualTo(new StressLimit(true, of(0.4)));
     assertThat(asked.hookBending()).isEqualTo(new StressLimit(true, of(0.7)));
@@ -181,7 +185,10 @@ class ExtensionFileTest {
 
   @Test
   void inchesMeanTheSame() {
-    ExtensionAsked inch = Files.problem(INCH).extension().orElseThrow();
+    Problem read = Files.problem(INCH);
+    assertThat(read.overtravel().orElseThrow()).isCloseTo(68, within(1e-9));
+    assertThat(read.limits().minSurgeFrequency()).hasValue(150);
+    ExtensionAsked inch = read.extension().orElseThrow();
     TensionLine line = inch.line().orElseThrow();
     assertThat(line.rate()).isCloseTo(0.9, within(1e-6));
     assertThat(line.zeroForceLength().orElseThrow()).isCloseTo(40, within(1e-5));
@@ -214,6 +221,7 @@ class ExtensionFileTest {
     assertThat(usual.pin()).isEmpty();
     assertThat(plain.limits().activeCoils()).isEqualTo(new Band(of(3), NONE));
     assertThat(plain.limits()).isEqualTo(DesignLimits.defaults(Kind.EXTENSION));
+    assertThat(plain.overtravel()).isEmpty();
     assertThat(plain.make().coilStep()).isEqualTo(0.25);
   }
 
@@ -258,6 +266,16 @@ class ExtensionFileTest {
   private static TensionLine line(String loads, String fact) {
     String text = "spring: extension\nloads: " + loads + "\n" + (fact == null ? "" : fact) + "\n";
     return Files.problem(text).extension().orElseThrow().line().orElseThrow();
+  }
+
+  @Test
+  void anOvertravelIsReadWhereLengthsAreOpenAndForACheck() {
+    String open =
+        "spring: extension\nloads: [{force: 18 N}, {force: 45 N}]\nrate: 1.8 N/mm\n"
+            + "overtravel: {length: 2 in}\n";
+    assertThat(Files.problem(open).overtravel()).hasValue(50.8);
+    assertThat(Files.checked(DESIGN + "overtravel: {length: 60.1 mm}\n").overtravel())
+        .hasValue(60.1);
   }
 
   @Test
