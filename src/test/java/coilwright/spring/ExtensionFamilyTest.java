@@ -195,14 +195,17 @@ class ExtensionFamilyTest {
   @Test
   void anOvertravelCountsOnlyBeyondTheLoads() {
     ExtensionState state = family(HookFit.natural()).at(22);
-    assertThat(extreme(state, 95)).isCloseTo(30 + 10 * RATE, within(1e-9));
-    assertThat(extreme(state, 80)).isCloseTo(30, within(1e-9));
+    assertThat(beyond(state, 95).extremeForce()).isCloseTo(30 + 10 * RATE, within(1e-9));
+    assertThat(beyond(state, 80).extremeForce()).isCloseTo(30, within(1e-9));
+    assertThat(beyond(state, 95).extremeLength()).isEqualTo(95);
+    assertThat(beyond(state, 80).extremeLength()).isCloseTo(85, within(1e-9));
+    assertThat(state.extremeLength()).isCloseTo(85, within(1e-9));
   }
 
-  private static double extreme(ExtensionState state, double overtravel) {
+  private static ExtensionState beyond(ExtensionState state, double overtravel) {
     ExtensionDuty duty =
         new ExtensionDuty(LOADS, StressCorrection.WAHL, OptionalDouble.of(overtravel));
-    return new ExtensionState(state.spring(), state.initialTension(), duty).extremeForce();
+    return new ExtensionState(state.spring(), state.initialTension(), duty);
   }
 
   private static LoadPoint force(double force) {
