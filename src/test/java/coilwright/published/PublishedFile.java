@@ -6,9 +6,11 @@ import java.net.URISyntaxException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import java.util.stream.Stream;
 
 /**
@@ -82,6 +84,15 @@ public record PublishedFile(
   /** Whether every value of the file was seen; a file that mixes does not say so. */
   public boolean seen() {
     return entry("seen or from memory").equals("seen");
+  }
+
+  /** How many printed values its rows are: those with one text in a column "cell" are one. */
+  public int printed() {
+    Set<String> cells = new HashSet<>();
+    for (int i = 0; i < rows.size(); i++) {
+      cells.add(rows.get(i).getOrDefault("cell", "row " + i));
+    }
+    return cells.size();
   }
 
   private static PublishedFile of(String path, List<String> lines) {
