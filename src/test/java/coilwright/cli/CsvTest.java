@@ -7,6 +7,8 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
 
 /** CSV holds what JSON holds, under the same names, in a closed set of columns. */
 class CsvTest {
@@ -33,6 +35,18 @@ class CsvTest {
       for (int i = 0; i < candidates.size(); i++) {
         same(csv.rows().get(i), FlatJson.of(candidates.get(i)), "problem_title");
       }
+    }
+  }
+
+  @ParameterizedTest
+  @ValueSource(strings = {"louvre-return", "shade-tensioner", "vent-flap-hinge", "bin-lid"})
+  void aDemoWithHooksOrLegsIsItsJsonFlattened(String demo) {
+    String problem = Run.demo(demo);
+    JsonNode candidates = shortlist(problem, "--all", "--format=json").json().path("candidates");
+    CsvRows csv = csv(shortlist(problem, "--all", "--format=csv", "--units=metric"));
+    assertThat(csv.rows()).hasSize(candidates.size()).hasSizeGreaterThan(3);
+    for (int i = 0; i < candidates.size(); i++) {
+      same(csv.rows().get(i), FlatJson.of(candidates.get(i)), "problem_title");
     }
   }
 

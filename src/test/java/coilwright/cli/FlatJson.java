@@ -3,9 +3,14 @@ package coilwright.cli;
 import com.fasterxml.jackson.databind.JsonNode;
 import java.util.LinkedHashMap;
 import java.util.Map;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
 
 /** JSON flattened as README.md says that CSV names its columns: apart from what writes it. */
 final class FlatJson {
+
+  /** A range with its unit, which stands behind "min" and "max" in CSV. */
+  private static final Pattern RANGE = Pattern.compile("(preferred_.*)(_n)");
 
   private FlatJson() {}
 
@@ -33,7 +38,11 @@ final class FlatJson {
 
   private static void leaf(Map<String, String> cells, String key, JsonNode node) {
     if (node.isObject()) {
-      nested(cells, key, node);
+      Matcher range = RANGE.matcher(key);
+      String prefix = range.matches() ? range.group(1) : key;
+      String unit = range.matches() ? range.group(2) : "";
+      node.properties()
+          .forEach(entry -> leaf(cells, prefix + "_" + entry.getKey() + unit, entry.getValue()));
     } else {
       cells.put(key, node.isNull() ? "" : node.asText());
     }
@@ -50,6 +59,9 @@ final class FlatJson {
     StringBuilder prefix = new StringBuilder(kind);
     for (JsonNode name : names) {
       prefix.append('_').append(name.asText().replace(' ', '_'));
+    }
+    if (cells.containsKey(prefix + "_value")) { // a second bound of one limit and side
+      prefix.append("_2");
     }
     element
         .properties()

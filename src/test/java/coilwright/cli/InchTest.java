@@ -6,6 +6,8 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
 
 /** Results in inches and pounds say what the metric ones say. */
 class InchTest {
@@ -23,6 +25,10 @@ class InchTest {
           LBF / 25.4,
           "psi",
           LBF / (25.4 * 25.4),
+          "lbf_in",
+          LBF * 25.4,
+          "lbf_in_per_deg",
+          LBF * 25.4,
           "lb",
           453.59237,
           "lb_per_in3",
@@ -33,12 +39,14 @@ class InchTest {
           "mm", "in",
           "n", "lbf",
           "n_per_mm", "lbf_per_in",
+          "n_mm", "lbf_in",
+          "n_mm_per_deg", "lbf_in_per_deg",
           "mpa", "psi",
           "g", "lb",
           "kg_per_m3", "lb_per_in3");
 
   private static final Map<String, String> UNITS =
-      Map.of("mm", "in", "N", "lbf", "N/mm", "lbf/in", "MPa", "psi");
+      Map.of("mm", "in", "N", "lbf", "N/mm", "lbf/in", "N*mm", "lbf*in", "MPa", "psi");
 
   @Test
   void everyNumberOfAShortlistIsTheMetricOneConverted() {
@@ -47,6 +55,12 @@ class InchTest {
     for (String problem : new String[] {Run.VALVE, twins, beyond}) {
       converted(problem, "shortlist", "-", "--all");
     }
+  }
+
+  @ParameterizedTest
+  @ValueSource(strings = {"louvre-return", "shade-tensioner", "vent-flap-hinge", "bin-lid"})
+  void everyNumberOfADemoWithHooksOrLegsIsTheMetricOneConverted(String demo) {
+    converted(Run.demo(demo), "shortlist", "-", "--all");
   }
 
   @Test
@@ -111,7 +125,7 @@ class InchTest {
   }
 
   private static void converted(String problem, String... args) {
-    CsvRows metric = csv(problem, args);
+    CsvRows metric = csv(problem, with(args, "--units=metric"));
     CsvRows inch = csv(problem, with(args, "--units=inch"));
     assertThat(inch.rows()).hasSameSizeAs(metric.rows()).isNotEmpty();
     assertThat(inch.header()).isEqualTo(metric.header().stream().map(InchTest::inInches).toList());
@@ -147,6 +161,7 @@ class InchTest {
       return switch (unit) {
         case "mm" -> FACTOR.get("in");
         case "N" -> FACTOR.get("lbf");
+        case "N*mm" -> FACTOR.get("lbf_in");
         case "MPa" -> FACTOR.get("psi");
         default -> 1;
       };

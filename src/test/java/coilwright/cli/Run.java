@@ -61,6 +61,15 @@ record Run(int status, byte[] bytes, String err) {
     return new Run(status, out.toByteArray(), err.toString(StandardCharsets.UTF_8));
   }
 
+  /** The text of a problem file under {@code problems}. */
+  static String demo(String name) {
+    try {
+      return Files.readString(Path.of("problems", name + ".yaml"));
+    } catch (IOException e) {
+      throw new UncheckedIOException(e);
+    }
+  }
+
   /** Writes a problem file and returns its path. */
   static String file(Path folder, String name, String text) {
     try {
