@@ -257,6 +257,7 @@ class TorsionSearchTest {
         .isCloseTo(checked.state().rate() * 90 * DEG, within(1e-9));
     assertThat(finding(checked, LimitName.NOMINAL_LOAD).value())
         .isCloseTo(Math.abs(checked.state().rate() * 90 * DEG - 450), within(1e-9));
+    assertThat(finding(checked, LimitName.NOMINAL_LOAD).bound()).isCloseTo(4.5, within(1e-12));
     assertThat(finding(checked, LimitName.NOMINAL_LOAD).holds()).isFalse();
   }
 
@@ -324,6 +325,10 @@ class TorsionSearchTest {
     "6, -150, 0, 10, true",
     "5, 216, 6, 5, false",
     "12, 196, 14, 15, true",
+    "10, 210, 0, 10, true",
+    "10.5, 30, 0, 15, true",
+    "20, 210, 0, 15, true",
+    "20.5, 30, 0, 30, true",
     "22, 236, 26, 30, true",
     "6, 30, 180, 10, false"
   })
