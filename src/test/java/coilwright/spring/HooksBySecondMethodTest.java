@@ -40,9 +40,16 @@ class HooksBySecondMethodTest {
     assertThat(far).isCloseTo(100 / (Math.PI / 4 * D * D), withinPercentage(1e-6));
   }
 
-  /** A loop is half a circle in bending from where the load hangs, a half hook a quarter. */
+  /**
+   * A loop is half a circle in bending from where the load hangs, a half hook a quarter. The
+   * straight piece of an extended hook is stiff.
+   */
   @ParameterizedTest
-  @CsvSource({"FULL_LOOP, 3.141592653589793", "HALF_LOOP, 1.5707963267948966"})
+  @CsvSource({
+    "FULL_LOOP, 3.141592653589793",
+    "EXTENDED_HOOK, 3.141592653589793",
+    "HALF_LOOP, 1.5707963267948966"
+  })
   void aHookDeflectsAsItsShareOfACoil(HookType type, double arc) {
     double mean = 16;
     double coil = 1 / Rate.of(G, D, mean, 1);
