@@ -145,6 +145,20 @@ final class AlongExtension {
                 curve.hookLengthAt(mean) - curve.hooks().leastLength(mean, curve.coatedDiameter()));
   }
 
+  /** Where the opening inside the hooks turns: where their length comes to decide, and with it. */
+  double[] turnsOfHookInside() {
+    boolean growsWithTheCoil =
+        curve.fit().rule() == HookFit.Rule.HOOK_LENGTH
+            || curve.fit().rule() == HookFit.Rule.NATURAL;
+    return growsWithTheCoil
+        ? NONE
+        : turns(
+            mean ->
+                Math.min(
+                    2 * curve.hooks().bendRadius() * mean - curve.coatedDiameter(),
+                    curve.hookLengthAt(mean)));
+  }
+
   /** Where the length under the greatest force turns, where the lengths are left open. */
   double[] turnsOfExtendedLength() {
     return curve.lengthsOpen() ? turns(this::extension) : NONE;

@@ -10,10 +10,14 @@ import coilwright.spring.LoadPoint;
 import coilwright.spring.Surge;
 import coilwright.unit.Dimension;
 import java.util.List;
+import java.util.OptionalDouble;
 import java.util.function.ToDoubleFunction;
 
 /** The limits that a problem sets for extension springs, in the order of their names. */
 public final class ExtensionLimits {
+
+  /** Far more body coils than any extension spring in trade has [-]. */
+  private static final double MOST_COILS = 500;
 
   private static final DesignLimits USUAL = DesignLimits.DEFAULTS;
 
@@ -37,7 +41,7 @@ public final class ExtensionLimits {
   public static List<Limit<ExtensionState>> of(Problem problem, List<LoadPoint> loads) {
     String covered = problem.coating() > 0 ? ", coating included" : "";
     ExtensionLimits all = new ExtensionLimits(problem);
-    all.proportions(problem.limits());
+    all.proportions(problem.limits(), endless(problem));
     all.limits.addAll(ExtensionSpace.ofBody(problem.envelope(), covered));
     all.surge(problem.limits());
     all.tension();
@@ -53,7 +57,18 @@ public final class ExtensionLimits {
     return List.copyOf(all.limits);
   }
 
-  private void proportions(DesignLimits usual) {
+  /** Whether nothing ends the coils of a search: lengths are open, and no bound is set. */
+  private static boolean endless(Problem problem) {
+    ExtensionAsked asked = problem.extension().orElseThrow();
+    boolean open = asked.line().filter(line -> line.zeroForceLength().isEmpty()).isPresent();
+    return open
+        && problem.design().isEmpty()
+        && problem.limits().activeCoils().max().isEmpty()
+        && problem.envelope().maxFreeLength().isEmpty()
+        && asked.maxExtendedLength().isEmpty();
+  }
+
+  private void proportions(DesignLimits usual, boolean endless) {
     bands.band(
         LimitName.SPRING_INDEX,
         usual.springIndex(),
@@ -66,6 +81,17 @@ public final class ExtensionLimits {
         USUAL.activeCoils(),
         "coils of the body",
         ExtensionState::coils);
+    if (endless) {
+      bands.fixed(
+          new Check(
+              LimitName.ACTIVE_COILS,
+              Side.MAX,
+              Dimension.NUMBER,
+              "coils of the body; neither their number nor a length is limited"),
+          ExtensionState::coils,
+          OptionalDouble.of(MOST_COILS),
+          Bands.PRACTICE);
+    }
   }
 
   private void surge(DesignLimits usual) {

@@ -89,9 +89,12 @@ final class ExtensionSpace {
     all.add(
         LimitName.PIN,
         Side.MIN,
-        "inside of the loop" + covered + ", which the pin must pass",
+        "inside of the hook"
+            + covered
+            + ", across the loop or from the body, which the pin must pass",
         state -> state.spring().loopInside(),
-        asked.pin());
+        asked.pin(),
+        family -> new AlongExtension(family).turnsOfHookInside());
     return all.limits;
   }
 

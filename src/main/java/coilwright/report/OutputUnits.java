@@ -100,7 +100,7 @@ enum OutputUnits {
     return switch (dimension) {
       case LENGTH, FORCE, STRESS -> 1;
       case RATE -> -1;
-      case MASS -> 2;
+      case MASS, TORQUE -> 2;
       case DENSITY -> 3;
       default -> 0;
     };

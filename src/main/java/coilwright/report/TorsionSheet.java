@@ -28,13 +28,9 @@ final class TorsionSheet implements Sheet<TorsionState> {
                   3,
                   TorsionState::leastInsideDiameter)),
           new Column<>(
-              "Lb max",
+              "Lb",
               Quantities.of(
-                  "longest_body",
-                  "",
-                  Dimension.LENGTH,
-                  2,
-                  state -> Math.max(state.freeBodyLength(), state.greatest().bodyLength()))),
+                  "loaded_body", "", Dimension.LENGTH, 2, state -> state.greatest().bodyLength())),
           column("legs", "leg_angle"),
           column("index", "spring_index"),
           column("mass", "mass"),
@@ -99,8 +95,8 @@ final class TorsionSheet implements Sheet<TorsionState> {
 
   @Override
   public String legend() {
-    return "nb body coils, D mean and De outside diameter when free, Di min the least inside diameter and\n"
-        + "  Lb max the greatest body length up to the greatest torque, legs the angle between them when free;";
+    return "nb body coils, D mean and De outside diameter when free, Di min the least inside diameter,\n"
+        + "  Lb the body length at the greatest torque, legs the angle between them when free;";
   }
 
   @Override

@@ -12,6 +12,7 @@ import coilwright.problem.TorqueLine;
 import coilwright.problem.TorsionAsked;
 import coilwright.problem.TorsionDesign;
 import coilwright.spring.Legs;
+import coilwright.spring.TorsionDuty;
 import coilwright.spring.TorsionFamily;
 import coilwright.spring.TorsionSpring;
 import coilwright.spring.TorsionState;
@@ -100,7 +101,13 @@ public final class TorsionSearch implements Synthesis<TorsionState> {
         new TorsionSpring(wire, asked.meanDiameter(), asked.coils(), legs(asked.legs()));
     TorsionLoads loads = TorsionLoads.of(problem);
     double rate = spring.rate(asked(problem).rateConstant());
-    return new TorsionState(spring, loads.duty(problem), loads.freeAngleAt(rate));
+    TorsionDuty duty = loads.duty(problem);
+    boolean set = loads.fixed() && asked.legs().angle().isEmpty();
+    double free = loads.freeAngleAt(rate);
+    return new TorsionState(
+        spring,
+        duty,
+        set ? duty.setting(free, asked(problem).line().orElseThrow().rate(), rate) : free);
   }
 
   @Override

@@ -82,9 +82,19 @@ public record ExtensionSpring(
     return hooks.leastLength(meanDiameter, coatedDiameter());
   }
 
-  /** The free opening inside a hook's loop, 2 r1 - d over the coating [mm]. */
+  /**
+   * The free opening inside a hook over the coating [mm]: 2 r1 - d across the loop, and no more
+   * than the hook reaches beyond the body.
+   */
   public double loopInside() {
-    return 2 * hooks.bendRadius() * meanDiameter - coatedDiameter();
+    return Math.min(2 * hooks.bendRadius() * meanDiameter - coatedDiameter(), hookLength);
+  }
+
+  /**
+   * How far a load on the axis lies from the wire of the loop, D/2 or r1 where that is more [mm].
+   */
+  public double loopArm() {
+    return Math.max(0.5, hooks.bendRadius()) * meanDiameter;
   }
 
   /** The index of the loop C1 = 2 r1/d [-]. */

@@ -279,7 +279,7 @@ public final class ExtensionState implements State {
   /** The bending stress of a hook under a force on the axis [N], in MPa. */
   public double hookBendingStress(double force) {
     return HookStress.bending(
-        force, spring.meanDiameter(), spring.wireDiameter(), spring.bendIndex());
+        force, 2 * spring.loopArm(), spring.wireDiameter(), spring.bendIndex());
   }
 
   /** The torsion stress of a hook under a force on the axis [N], in MPa. */

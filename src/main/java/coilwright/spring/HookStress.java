@@ -59,10 +59,11 @@ public final class HookStress {
   }
 
   /**
-   * Greatest tensile stress of the loop, F (K_A 16 D/(pi d^3) + 4/(pi d^2)).
+   * Greatest tensile stress of the loop, F (K_A 16 D/(pi d^3) + 4/(pi d^2)), for a load at D/2 from
+   * the wire.
    *
    * @param force F [N]
-   * @param meanDiameter D [mm]
+   * @param meanDiameter D, twice the arm of the load [mm]
    * @param wireDiameter d [mm]
    * @param bendIndex C1 [-], above 1
    * @return sigma_A [MPa]

@@ -33,6 +33,26 @@ public record TorsionDuty(
     loads = List.copyOf(loads);
   }
 
+  /**
+   * The free angle that a spring of about the rate asked is set to: its least and its greatest load
+   * miss what is asked by the same torque, one above and one below. A single load is met.
+   *
+   * @param asked the free angle asked [rad]
+   * @param askedRate the rate asked [N mm/rad]
+   * @param rate that of the spring [N mm/rad]
+   * @return the angle [rad]
+   */
+  public double setting(double asked, double askedRate, double rate) {
+    double least = Double.POSITIVE_INFINITY;
+    double most = 0;
+    for (TorquePoint load : loads) {
+      double deflection = sign() * (load.angle().orElseThrow() - asked);
+      least = Math.min(least, deflection);
+      most = Math.max(most, deflection);
+    }
+    return asked + sign() * (1 - askedRate / rate) * (least + most) / 2;
+  }
+
   /** The sign of a deflection in the winding direction: 1 where the spring closes, else -1. */
   public int sign() {
     return closing ? 1 : -1;

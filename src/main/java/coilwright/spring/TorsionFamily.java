@@ -111,23 +111,10 @@ public record TorsionFamily(
     return Optional.of(new TorsionState(spring, duty, setting(spring)));
   }
 
-  /**
-   * The free angle that a spring of nearly the rate is set to: its least and its greatest load miss
-   * what is asked by the same torque, one above and one below. A single load is met.
-   */
   private double setting(TorsionSpring spring) {
-    if (legAngleFixed) {
-      return freeAngle;
-    }
-    double least = Double.POSITIVE_INFINITY;
-    double most = 0;
-    for (TorquePoint load : duty.loads()) {
-      double asked = duty.sign() * (load.angle().orElseThrow() - freeAngle);
-      least = Math.min(least, asked);
-      most = Math.max(most, asked);
-    }
-    double softer = 1 - rate / spring.rate(duty.rateConstant());
-    return freeAngle + duty.sign() * softer * (least + most) / 2;
+    return legAngleFixed
+        ? freeAngle
+        : duty.setting(freeAngle, rate, spring.rate(duty.rateConstant()));
   }
 
   /**
