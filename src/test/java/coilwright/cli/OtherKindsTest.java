@@ -96,4 +96,69 @@ class OtherKindsTest {
     assertThat(spring.at("/loads/0/length_mm").asDouble())
         .isEqualTo(spring.path("free_length_mm").asDouble());
   }
+
+  private static final String PULLED =
+      PULL
+          + "envelope: {pin: 15 mm}\ndesign: {material: music-wire, wire_diameter: 1.4 mm,"
+          + " mean_diameter: 11 mm, body_coils: 22, initial_tension: 8 N, hooks: full-loop";
+
+  @Test
+  void aLoopWiderThanTheCoilIsBentBySoMuchMore() {
+    double usual = hookBending(PULLED + "}\n");
+    assertThat(hookBending(PULLED + ", hook_bend_radius: 0.4}\n")).isGreaterThan(usual);
+    assertThat(hookBending(PULLED + ", hook_bend_radius: 0.8}\n"))
+        .isBetween(1.5 * usual, 1.6 * usual);
+  }
+
+  private static double hookBending(String file) {
+    JsonNode json = Run.reading(file, "check", "-", "--format", "json").json();
+    return json.at("/spring/loads/1/hook_bending_stress_mpa").asDouble();
+  }
+
+  @Test
+  void aPinMustAlsoPassBetweenLoopAndBody() {
+    String file = PULLED + ", hook_bend_radius: 0.8}\n";
+    for (JsonNode check :
+        Run.reading(file, "check", "-", "--format", "json").json().at("/spring/checks")) {
+      if (check.path("limit").asText().equals("pin")) {
+        assertThat(check.path("value").asDouble()).isEqualTo(11 - 1.4);
+        assertThat(check.path("holds").asBoolean()).isFalse();
+        return;
+      }
+    }
+    throw new AssertionError("no check of the pin");
+  }
+
+  @Test
+  void aListedTorsionSpringHoldsWhenItIsChecked() {
+    String file =
+        "spring: torsion\nloads: [{torque: 100 N*mm, angle: 0 deg}, {torque: 300 N*mm, angle: 90 deg}]\n";
+    String make = "make: {diameter_step: 0.5 mm, materials: [en-10270-1-sh]}\n";
+    JsonNode listed =
+        Run.reading(file + make, "shortlist", "-", "--format", "json", "--all", "--top", "400")
+            .json()
+            .path("candidates");
+    assertThat(listed).isNotEmpty();
+    for (JsonNode spring : listed) {
+      String design =
+          "design: {material: en-10270-1-sh, wire_diameter: "
+              + spring.path("wire_diameter_mm").asText()
+              + " mm, mean_diameter: "
+              + spring.path("mean_diameter_mm").asText()
+              + " mm, body_coils: "
+              + spring.path("body_coils").asText()
+              + "}\n";
+      Run.reading(file + design, "check", "-", "--format", "json").found(Status.FOUND);
+    }
+  }
+
+  @Test
+  void aSearchWithoutAnyBoundOnLengthEnds() {
+    String file = "spring: extension\nloads: [{force: 1 N}]\nrate: 0.001 N/mm\n";
+    JsonNode json = Run.reading(file, "shortlist", "-", "--format", "json").json();
+    assertThat(json.at("/search/wires").asInt()).isPositive();
+    for (JsonNode candidate : json.path("candidates")) {
+      assertThat(candidate.path("body_coils").asDouble()).isLessThanOrEqualTo(500);
+    }
+  }
 }

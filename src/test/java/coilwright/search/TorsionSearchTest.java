@@ -248,10 +248,11 @@ class TorsionSearchTest {
     }
   }
 
-  /** A spring of the wrong rate keeps the line's free angle, so that its torques miss. */
+  /** Where its legs set it, a spring of the wrong rate keeps the line's free angle. */
   @Test
-  void aLineThatIsFixedFixesTheFreeAngle() {
-    Candidate<TorsionState> checked = check(plain().design(design(14, 6, legs())));
+  void anAngleBetweenTheLegsFixesTheFreeAngle() {
+    LegsAsked asked = new LegsAsked(0, 0, OptionalDouble.of(180 * DEG), 1);
+    Candidate<TorsionState> checked = check(plain().design(design(14, 6, asked)));
     assertThat(checked.state().freeAngle()).hasValue(20 * DEG);
     assertThat(checked.state().loads().get(1).torque())
         .isCloseTo(checked.state().rate() * 90 * DEG, within(1e-9));
@@ -259,6 +260,19 @@ class TorsionSearchTest {
         .isCloseTo(Math.abs(checked.state().rate() * 90 * DEG - 450), within(1e-9));
     assertThat(finding(checked, LimitName.NOMINAL_LOAD).bound()).isCloseTo(4.5, within(1e-12));
     assertThat(finding(checked, LimitName.NOMINAL_LOAD).holds()).isFalse();
+  }
+
+  /** Else it is set as a listed one would be: it misses the two loads by as much. */
+  @Test
+  void aSpringWithoutAnAngleBetweenItsLegsIsSetBetweenItsLoads() {
+    Candidate<TorsionState> checked = check(plain().design(design(14, 6, legs())));
+    double first = checked.state().loads().get(0).torque();
+    double second = checked.state().loads().get(1).torque();
+    List<TorquePoint> asked = checked.state().duty().loads();
+    double over = first - asked.get(0).torque().orElseThrow();
+    assertThat(second - asked.get(1).torque().orElseThrow()).isCloseTo(-over, within(1e-9));
+    assertThat(finding(checked, LimitName.NOMINAL_LOAD).value())
+        .isCloseTo(Math.abs(over), within(1e-9));
   }
 
   @Test
