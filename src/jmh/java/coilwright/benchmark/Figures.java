@@ -74,7 +74,7 @@ public final class Figures {
     text.append("| problem | wires | fit | candidates | search ms | scan ms | search/scan |");
     text.append(" states search | states scan | share |\n");
     text.append("|---|---|---|---|---|---|---|---|---|---|\n");
-    for (String problem : new String[] {"typical", "loose", "infeasible", "whole", "stroke"}) {
+    for (String problem : SEARCHED) {
       text.append(row(problem, times));
     }
     text.append("\n### Whole runs in turns, 21 pairs, at most 256 MB of heap\n\n");
