@@ -13,7 +13,6 @@ import coilwright.spring.LoadState;
 import coilwright.spring.Method;
 import coilwright.unit.Dimension;
 import java.io.IOException;
-import java.util.ArrayList;
 import java.util.List;
 
 /** Compression springs in text, JSON and CSV. */
@@ -84,19 +83,13 @@ final class CompressionSheet implements Sheet<CompressionState> {
 
   @Override
   public List<Column<CompressionState>> columns(Problem problem) {
-    List<Column<CompressionState>> columns = new ArrayList<>(COLUMNS);
-    if (lengthsFound(problem)) {
-      for (int i = 0; i < problem.facts().loads().size(); i++) {
-        columns.add(AFTER_FREE_LENGTH + i, lengthAt(i));
-      }
-    }
-    return columns;
-  }
-
-  private static Column<CompressionState> lengthAt(int load) {
-    String head = "L" + (load + 1);
-    return new Column<>(
-        head, Quantities.of(head, head, Dimension.LENGTH, 2, s -> s.loads().get(load).length()));
+    return lengthsFound(problem)
+        ? FoundLengths.among(
+            COLUMNS,
+            AFTER_FREE_LENGTH,
+            problem.facts().loads().size(),
+            (state, load) -> state.loads().get(load).length())
+        : COLUMNS;
   }
 
   /** Whether the loaded lengths are part of the answer. */
@@ -111,9 +104,7 @@ final class CompressionSheet implements Sheet<CompressionState> {
 
   @Override
   public String remark(Problem problem) {
-    return lengthsFound(problem)
-        ? " L1 and on are the lengths found, in the order of the loads."
-        : "";
+    return lengthsFound(problem) ? FoundLengths.REMARK : "";
   }
 
   @Override

@@ -10,9 +10,7 @@ import coilwright.search.Synthesis;
 import coilwright.spring.ExtensionLoad;
 import coilwright.spring.ExtensionState;
 import coilwright.spring.HookStress;
-import coilwright.unit.Dimension;
 import java.io.IOException;
-import java.util.ArrayList;
 import java.util.List;
 
 /** Extension springs in text, JSON and CSV. */
@@ -82,19 +80,13 @@ final class ExtensionSheet implements Sheet<ExtensionState> {
 
   @Override
   public List<Column<ExtensionState>> columns(Problem problem) {
-    List<Column<ExtensionState>> columns = new ArrayList<>(COLUMNS);
-    if (lengthsFound(problem)) {
-      for (int i = 0; i < problem.facts().loads().size(); i++) {
-        columns.add(AFTER_FREE_LENGTH + i, lengthAt(i));
-      }
-    }
-    return columns;
-  }
-
-  private static Column<ExtensionState> lengthAt(int load) {
-    String head = "L" + (load + 1);
-    return new Column<>(
-        head, Quantities.of(head, head, Dimension.LENGTH, 2, s -> s.loads().get(load).length()));
+    return lengthsFound(problem)
+        ? FoundLengths.among(
+            COLUMNS,
+            AFTER_FREE_LENGTH,
+            problem.facts().loads().size(),
+            (state, load) -> state.loads().get(load).length())
+        : COLUMNS;
   }
 
   private static boolean lengthsFound(Problem problem) {
@@ -109,9 +101,7 @@ final class ExtensionSheet implements Sheet<ExtensionState> {
 
   @Override
   public String remark(Problem problem) {
-    return lengthsFound(problem)
-        ? " L1 and on are the lengths found, in the order of the loads."
-        : "";
+    return lengthsFound(problem) ? FoundLengths.REMARK : "";
   }
 
   @Override
