@@ -22,13 +22,11 @@ final class ExtensionSpace {
   private static final Citation SLACK =
       Citation.seen(Source.FIRST_PRINCIPLES, "a spring longer than the place it works in is slack");
 
-  private final Envelope space;
   private final Clearance clearance;
   private final String covered;
   private final List<Limit<ExtensionState>> limits = new ArrayList<>();
 
   private ExtensionSpace(Envelope space, String covered) {
-    this.space = space;
     this.clearance = new Clearance(space);
     this.covered = covered;
   }
@@ -41,8 +39,7 @@ final class ExtensionSpace {
    */
   static List<Limit<ExtensionState>> ofBody(Envelope space, String covered) {
     ExtensionSpace all = new ExtensionSpace(space, covered);
-    space.bore().ifPresent(all::bore);
-    space.rod().ifPresent(all::rod);
+    all.clearances();
     all.add(
         LimitName.OUTSIDE_DIAMETER,
         Side.MAX,
@@ -127,43 +124,24 @@ final class ExtensionSpace {
     }
   }
 
-  private void bore(double bore) {
-    limits.add(
-        new ValueLimit<>(
-            new Check(
-                LimitName.BORE,
-                Side.MAX,
-                Dimension.LENGTH,
-                "outside diameter, free state, since pulling narrows the coil"
-                    + covered
-                    + ", against bore less "
-                    + clearance.words()),
+  private void clearances() {
+    ToDoubleFunction<ExtensionState> mean = state -> state.spring().meanDiameter();
+    clearance
+        .bore(
+            "outside diameter, free state, since pulling narrows the coil" + covered,
             state -> state.spring().meanDiameter() + state.spring().coatedDiameter(),
-            state -> bore - clearance(state),
-            clearance.source(),
-            false));
-  }
-
-  private void rod(double rod) {
-    limits.add(
-        new ValueLimit<>(
-            new Check(
-                LimitName.ROD,
-                Side.MIN,
-                Dimension.LENGTH,
-                "inside diameter, free state"
-                    + covered
-                    + ", against rod plus "
-                    + clearance.words()),
+            mean,
+            clearance.source())
+        .ifPresent(limits::add);
+    clearance
+        .rod(
+            LimitName.ROD,
+            "free state" + covered,
             state -> state.spring().meanDiameter() - state.spring().coatedDiameter(),
-            state -> rod + clearance(state),
+            mean,
             clearance.source(),
-            false,
-            family -> steps(family, rod)));
-  }
-
-  private double clearance(ExtensionState state) {
-    return clearance.of(state.spring().meanDiameter(), state.spring().wireDiameter());
+            this::steps)
+        .ifPresent(limits::add);
   }
 
   private double[] steps(Family<ExtensionState> family, double rod) {

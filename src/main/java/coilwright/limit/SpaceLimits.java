@@ -14,14 +14,12 @@ import java.util.function.ToDoubleFunction;
 /** The limits that the space sets for compression springs. */
 final class SpaceLimits {
 
-  private final Envelope space;
   private final Clearance clearance;
   private final Method method;
   private final String covered;
   private final List<Limit<CompressionState>> limits = new ArrayList<>();
 
   private SpaceLimits(Envelope space, Method method, String covered) {
-    this.space = space;
     this.clearance = new Clearance(space);
     this.method = method;
     this.covered = covered;
@@ -84,46 +82,23 @@ final class SpaceLimits {
   }
 
   private void clearances() {
-    if (space.bore().isPresent()) {
-      double bore = space.bore().getAsDouble();
-      limits.add(
-          new ValueLimit<>(
-              new Check(
-                  LimitName.BORE,
-                  Side.MAX,
-                  Dimension.LENGTH,
-                  "outside diameter at solid, "
-                      + method.growthMeans()
-                      + covered
-                      + ", against bore less "
-                      + clearance.words()),
-              CompressionState::outsideDiameterAtSolid,
-              state -> bore - clearance(state),
-              method.growthCitation(),
-              false));
-    }
-    if (space.rod().isPresent()) {
-      double rod = space.rod().getAsDouble();
-      limits.add(
-          new ValueLimit<>(
-              new Check(
-                  LimitName.ROD,
-                  Side.MIN,
-                  Dimension.LENGTH,
-                  "inside diameter, free state"
-                      + covered
-                      + ", against rod plus "
-                      + clearance.words()),
-              CompressionState::clearInsideDiameter,
-              state -> rod + clearance(state),
-              clearance.source(),
-              false,
-              family -> steps(family, rod)));
-    }
-  }
-
-  private double clearance(CompressionState state) {
-    return clearance.of(state.spring().meanDiameter(), state.spring().wireDiameter());
+    ToDoubleFunction<CompressionState> mean = state -> state.spring().meanDiameter();
+    clearance
+        .bore(
+            "outside diameter at solid, " + method.growthMeans() + covered,
+            CompressionState::outsideDiameterAtSolid,
+            mean,
+            method.growthCitation())
+        .ifPresent(limits::add);
+    clearance
+        .rod(
+            LimitName.ROD,
+            "free state" + covered,
+            CompressionState::clearInsideDiameter,
+            mean,
+            clearance.source(),
+            this::steps)
+        .ifPresent(limits::add);
   }
 
   private double[] steps(Family<CompressionState> family, double rod) {

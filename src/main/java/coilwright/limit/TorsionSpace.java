@@ -39,7 +39,7 @@ final class TorsionSpace {
    */
   static List<Limit<TorsionState>> outside(Envelope space, boolean closing, String covered) {
     TorsionSpace all = new TorsionSpace(space, closing, covered);
-    space.bore().ifPresent(all::bore);
+    all.bore();
     all.nominal(
         LimitName.OUTSIDE_DIAMETER,
         Side.MAX,
@@ -64,7 +64,7 @@ final class TorsionSpace {
   static List<Limit<TorsionState>> inside(
       Envelope space, OptionalDouble maxBodyLength, boolean closing, String covered) {
     TorsionSpace all = new TorsionSpace(space, closing, covered);
-    space.rod().ifPresent(all::arbor);
+    all.arbor();
     maxBodyLength.ifPresent(all::bodyLength);
     return all.limits;
   }
@@ -77,35 +77,32 @@ final class TorsionSpace {
     }
   }
 
-  private void bore(double bore) {
-    String when = closing ? "free state" : "unwound by the greatest torque";
-    limits.add(
-        new ValueLimit<>(
-            new Check(
-                LimitName.BORE,
-                Side.MAX,
-                Dimension.LENGTH,
-                "outside diameter, " + when + covered + ", against bore less " + clearance.words()),
+  private void bore() {
+    clearance
+        .bore(
+            "outside diameter, "
+                + (closing ? "free state" : "unwound by the greatest torque")
+                + covered,
             TorsionState::greatestOutsideDiameter,
-            state -> bore - clearance(state),
-            closing ? clearance.source() : WoundBody.DIAMETER,
-            false));
+            TorsionSpace::meanDiameter,
+            closing ? clearance.source() : WoundBody.DIAMETER)
+        .ifPresent(limits::add);
   }
 
-  private void arbor(double rod) {
-    String when = closing ? "wound up by the greatest torque" : "free state";
-    limits.add(
-        new ValueLimit<>(
-            new Check(
-                LimitName.ARBOR,
-                Side.MIN,
-                Dimension.LENGTH,
-                "inside diameter, " + when + covered + ", against rod plus " + clearance.words()),
+  private void arbor() {
+    clearance
+        .rod(
+            LimitName.ARBOR,
+            (closing ? "wound up by the greatest torque" : "free state") + covered,
             TorsionState::leastInsideDiameter,
-            state -> rod + clearance(state),
+            TorsionSpace::meanDiameter,
             closing ? WoundBody.DIAMETER : clearance.source(),
-            false,
-            family -> steps(family, rod)));
+            this::steps)
+        .ifPresent(limits::add);
+  }
+
+  private static double meanDiameter(TorsionState state) {
+    return state.spring().meanDiameter();
   }
 
   private void bodyLength(double greatest) {
@@ -120,10 +117,6 @@ final class TorsionSpace {
             greatest,
             WoundBody.LENGTH,
             true));
-  }
-
-  private double clearance(TorsionState state) {
-    return clearance.of(state.spring().meanDiameter(), state.spring().wireDiameter());
   }
 
   /** A wound-up coil clears the rod by some tolerance where it is wider by as much. */
